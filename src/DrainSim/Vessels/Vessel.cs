@@ -1,0 +1,38 @@
+namespace DrainSim.Vessels;
+
+/// <summary>The inside of a tank: volume against level, above its lowest inside point.</summary>
+/// <remarks>
+/// A closed set: the cases live beside this file. Over 0 ≤ level ≤ <see cref="Height"/> the three
+/// functions agree: <see cref="Area"/> is the derivative of <see cref="Volume"/>, and
+/// <see cref="Level"/> is its inverse to the last bits. Below 0 a level counts as 0, above the
+/// height as the height, so that a trial step of the integrator never leaves the domain.
+/// </remarks>
+public abstract record Vessel
+{
+    private protected Vessel()
+    {
+    }
+
+    /// <summary>Inside height from the lowest to the highest point, m.</summary>
+    public abstract double Height { get; }
+
+    /// <summary>Volume when full, m³.</summary>
+    public abstract double Capacity { get; }
+
+    /// <summary>Volume of liquid below a level, m³.</summary>
+    /// <param name="level">level above the lowest inside point, m</param>
+    public abstract double Volume(double level);
+
+    /// <summary>Area of the free surface, m².</summary>
+    /// <param name="level">level above the lowest inside point, m</param>
+    public abstract double Area(double level);
+
+    /// <summary>Level at which the vessel holds a volume, m.</summary>
+    /// <param name="volume">volume of liquid, m³</param>
+    public abstract double Level(double volume);
+
+    /// <summary>
+    /// Levels strictly between 0 and the height, rising, at which the area or its slope has a kink, m.
+    /// </summary>
+    public virtual IReadOnlyList<double> SectionLevels => [];
+}
