@@ -1,0 +1,68 @@
+namespace DrainSim.Draining;
+
+/// <summary>All that a run found.</summary>
+public sealed record DrainResult
+{
+    /// <summary>The job that was run.</summary>
+    public required Job Job { get; init; }
+
+    /// <summary>How it ended.</summary>
+    public required Outcome Outcome { get; init; }
+
+    /// <summary>Why it never started; null when it did.</summary>
+    public NoStart? NoStart { get; init; }
+
+    /// <summary>When it ended, s since the start.</summary>
+    public required double StoppedAt { get; init; }
+
+    /// <summary>Volume in the tank at the start, m³.</summary>
+    public required double InitialVolume { get; init; }
+
+    /// <summary>Volume that left the tank, m³.</summary>
+    public required double DrainedVolume { get; init; }
+
+    /// <summary>Volume in the tank when the run stopped, before any fall-back from the line, m³.</summary>
+    public required double LeftVolume { get; init; }
+
+    /// <summary>Level in the tank when the run stopped, before any fall-back from the line, m.</summary>
+    public required double FinalLevel { get; init; }
+
+    /// <summary>Where the liquid in the line went when the column parted; null when it did not.</summary>
+    public FallBack? FallBack { get; init; }
+
+    /// <summary>Least pressure in the line, Pa absolute, and when.</summary>
+    public required Extreme LeastLowPointPressure { get; init; }
+
+    /// <summary>Least margin at the low point, Pa, and when.</summary>
+    public required Extreme LeastMargin { get; init; }
+
+    /// <summary>Index of the node at which the margin was least; see <see cref="Lines.LineHydraulics"/>.</summary>
+    public required int LeastMarginNode { get; init; }
+
+    /// <summary>Largest flow, m³/s, and when.</summary>
+    public required Extreme LargestFlow { get; init; }
+
+    /// <summary>Largest velocity in the narrowest bore, m/s, and when.</summary>
+    public required Extreme LargestVelocity { get; init; }
+
+    /// <summary>The moments worth knowing, in time order.</summary>
+    public required IReadOnlyList<DrainEvent> Events { get; init; }
+
+    /// <summary>The whole course of the run.</summary>
+    public required Trace Trace { get; init; }
+
+    /// <summary>What a siphon needs before it runs; null for a line that never rises above the level.</summary>
+    public PrimeReport? Prime { get; init; }
+
+    /// <summary>How fair the quasi-steady picture is.</summary>
+    public required SteadinessCheck Steadiness { get; init; }
+
+    /// <summary>What makes the result less sure.</summary>
+    public required IReadOnlyList<RunWarning> Warnings { get; init; }
+
+    /// <summary>What would let it go on; empty where nothing is needed or nothing helps.</summary>
+    public IReadOnlyList<Remedy> Remedies { get; init; } = [];
+
+    /// <summary>What the run cost.</summary>
+    public required Counters Counters { get; init; }
+}

@@ -1,0 +1,17 @@
+namespace DrainSim.Draining;
+
+/// <summary>Why a line never carried a flow.</summary>
+public enum NoStart
+{
+    /// <summary>The level stands below the inlet.</summary>
+    InletAboveLevel,
+
+    /// <summary>The outlet or the receiving surface stands above the level.</summary>
+    NoDrivingHead,
+
+    /// <summary>The column over the crest is higher than the atmosphere can hold.</summary>
+    LiftBeyondLimit,
+
+    /// <summary>A valve on the line is shut.</summary>
+    ValveShut,
+}
