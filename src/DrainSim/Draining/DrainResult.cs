@@ -36,7 +36,7 @@ public sealed record DrainResult
     /// <summary>Least margin at the low point, Pa, and when.</summary>
     public required Extreme LeastMargin { get; init; }
 
-    /// <summary>Index of the node at which the margin was least; see <see cref="Lines.LineHydraulics"/>.</summary>
+    /// <summary>Index of the node at which the margin was least; as the line numbers them.</summary>
     public required int LeastMarginNode { get; init; }
 
     /// <summary>Largest flow, m³/s, and when.</summary>
