@@ -1,0 +1,60 @@
+using System.CommandLine;
+using System.CommandLine.Help;
+
+namespace DrainSim.Cli;
+
+/// <summary>The program from its arguments to its exit code.</summary>
+internal static class CommandLine
+{
+    /// <summary>How long a command may take to end in good order after Ctrl-C.</summary>
+    private static readonly TimeSpan EndsWithin = TimeSpan.FromSeconds(10);
+
+    /// <summary>Runs one command line.</summary>
+    /// <param name="args">the arguments, without the program's name</param>
+    /// <param name="output">takes what was asked for</param>
+    /// <param name="error">takes what went wrong</param>
+    /// <returns>an <see cref="ExitCode"/></returns>
+    public static async Task<int> RunAsync(string[] args, TextWriter output, TextWriter error)
+    {
+        ParseResult parsed = Tree().Parse(args, new ParserConfiguration { ResponseFileTokenReplacer = null });
+        if (parsed.Action is not HelpAction && Refusal.Of(parsed) is { } refusal)
+        {
+            await error.WriteLineAsync(refusal);
+            return ExitCode.Refused;
+        }
+        var invocation = new InvocationConfiguration
+        {
+            Output = output,
+            Error = error,
+            EnableDefaultExceptionHandler = false,
+            ProcessTerminationTimeout = EndsWithin,
+        };
+        try
+        {
+            return await parsed.InvokeAsync(invocation);
+        }
+        catch (OperationCanceledException)
+        {
+            await error.WriteLineAsync("drainsim: interrupted; files already finished are kept.");
+            return ExitCode.Interrupted;
+        }
+#pragma warning disable CA1031 // the last resort: people get one line, not a stack trace
+        catch (Exception fault)
+#pragma warning restore CA1031
+        {
+            await error.WriteLineAsync($"drainsim: a fault of the program itself: {fault.GetType().Name}: {fault.Message}");
+            return ExitCode.Fault;
+        }
+    }
+
+    private static RootCommand Tree()
+    {
+        var root = new RootCommand("Says how long a tank takes to empty by gravity, and whether it empties at all.");
+        foreach (Option option in root.Options)
+        {
+            if (option is HelpOption { Action: HelpAction action } help)
+                help.Action = new HelpWithExamples(action);
+        }
+        return root;
+    }
+}
