@@ -9,6 +9,9 @@ public sealed record FittingKind
     /// <summary>What it is, for people.</summary>
     public required string Description { get; init; }
 
+    /// <summary>Its loss coefficient.</summary>
+    public required LossLaw Loss { get; init; }
+
     /// <summary>Where its coefficients are from.</summary>
     public required string Source { get; init; }
 }

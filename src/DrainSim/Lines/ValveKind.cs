@@ -9,6 +9,12 @@ public sealed record ValveKind
     /// <summary>What it is, for people.</summary>
     public required string Description { get; init; }
 
+    /// <summary>Its loss coefficient when fully open.</summary>
+    public required LossLaw Loss { get; init; }
+
+    /// <summary>How much it passes when partly open.</summary>
+    public required ValveCharacteristic Characteristic { get; init; }
+
     /// <summary>Where its coefficients are from.</summary>
     public required string Source { get; init; }
 }
