@@ -1,0 +1,88 @@
+using System.Diagnostics;
+using DrainSim.Draining;
+using DrainSim.Reports.Measures;
+
+namespace DrainSim.Reports.Wording;
+
+/// <summary>What the events, warnings and remedies of a run say to people.</summary>
+public static class EventWording
+{
+    /// <summary>The text of an event, without a full stop.</summary>
+    /// <param name="moment">the event</param>
+    /// <param name="job">the job it happened in</param>
+    public static string Text(DrainEvent moment, Job job) => moment.Code switch
+    {
+        EventCode.TenthGone => $"{MeasureFormat.Number(Math.Round(10 * moment.Number))} % of the volume is gone",
+        EventCode.LeftTurbulent => $"the flow leaves the turbulent range{Reynolds(moment)}",
+        EventCode.BecameLaminar => $"the flow becomes laminar{Reynolds(moment)}",
+        EventCode.LeftLaminar => $"the flow leaves the laminar range{Reynolds(moment)}",
+        EventCode.BecameTurbulent => $"the flow becomes turbulent{Reynolds(moment)}",
+        EventCode.VapourLimitBegins =>
+            $"the low point reaches {Verdict.LimitName(job)}; from here the flow is held there",
+        EventCode.VapourLimitEnds => $"the low point rises from {Verdict.LimitName(job)}; the flow is free again",
+        EventCode.VapourBreak => $"the low point reaches {Verdict.LimitName(job)} and the column parts",
+        EventCode.InletUncovered => "air reaches the inlet",
+        EventCode.Emptied => "the tank is empty but for a film",
+        EventCode.Levelled => $"the tank is level with {Verdict.FarEnd(job)}",
+        EventCode.TargetReached => "the target is reached",
+        EventCode.TimeLimit => "the longest time given is over",
+        EventCode.NeverStarted => "the line carries no flow",
+        _ => throw new UnreachableException(moment.Code.ToString()),
+    };
+
+    /// <summary>The text of a warning, with its full stop.</summary>
+    public static string Text(RunWarning warning, MeasureFormat format) => warning.Code switch
+    {
+        WarningCode.InertiaMatters =>
+            "The liquid in the line takes long to change its speed: its inertia time is up to "
+            + $"{MeasureFormat.Percent(warning.Number)} of the time in which the head changes. "
+            + "The first and last moments are less sure.",
+        WarningCode.SurfaceVelocityMatters =>
+            "The surface falls fast: its velocity head is up to "
+            + $"{MeasureFormat.Percent(warning.Number)} of the driving head. The flow may be larger than told.",
+        WarningCode.TransitionFlow =>
+            $"For {MeasureFormat.Percent(warning.Number)} of the time the flow is between laminar and turbulent, "
+            + "where friction is least sure.",
+        WarningCode.ThinMargin =>
+            $"At the worst moment only {format.Pressure(warning.Number)} is left at the low point. "
+            + "Warmer liquid, a lower barometer or a rise in the hose would use it up.",
+        _ => throw new UnreachableException(warning.Code.ToString()),
+    };
+
+    /// <summary>The text of a remedy, with its full stop.</summary>
+    public static string Text(Remedy remedy, MeasureFormat format)
+    {
+        string proof = $"would let it run on: run so, {Proof(remedy, format)}.";
+        string change = format.Length(remedy.Change);
+        string value = format.Length(remedy.Value);
+        return remedy.Kind switch
+        {
+            RemedyKind.LowerOutlet => $"Lowering the outlet by {change} (to {value}) {proof}",
+            RemedyKind.LowerCrest => $"Lowering the crest by {change} (to {value}) {proof}",
+            RemedyKind.LowerInlet => $"Lowering the inlet by {change} (to {value}) {proof}",
+            RemedyKind.ThrottleOutlet =>
+                $"Throttling at the outlet by a loss coefficient of {MeasureFormat.Number(remedy.Change)} {proof}",
+            _ => throw new UnreachableException(remedy.Kind.ToString()),
+        };
+    }
+
+    private static string Proof(Remedy remedy, MeasureFormat format)
+    {
+        string time = MeasureFormat.Duration(remedy.ProvedTime);
+        string level = format.Length(remedy.ProvedLevel);
+        return remedy.ProvedOutcome switch
+        {
+            Outcome.Emptied => $"it empties in {time}",
+            Outcome.InletUncovered => $"it goes down to the inlet, at {level}, in {time}",
+            Outcome.VapourBreak => $"the column parts at {level} after {time}",
+            Outcome.Levelled => $"it comes to rest at {level} after {time}",
+            Outcome.TargetReached => $"it reaches its target, at {level}, in {time}",
+            Outcome.TimeLimit => $"it still runs at {level} after {time}",
+            Outcome.NeverStarted => "it does not start",
+            _ => throw new UnreachableException(remedy.ProvedOutcome.ToString()),
+        };
+    }
+
+    private static string Reynolds(DrainEvent moment) =>
+        moment.Number > 0 ? $" (Re {MeasureFormat.Number(Math.Round(moment.Number))})" : "";
+}

@@ -1,0 +1,58 @@
+using System.Diagnostics;
+using DrainSim.Draining;
+
+namespace DrainSim.Reports.Wording;
+
+/// <summary>The closed sets of a result, but for the outcome, as they are written in files.</summary>
+public static class ReportCodes
+{
+    /// <summary>The code of an event.</summary>
+    public static string Of(EventCode code) => code switch
+    {
+        EventCode.TenthGone => "tenth_gone",
+        EventCode.LeftTurbulent => "left_turbulent",
+        EventCode.BecameLaminar => "became_laminar",
+        EventCode.LeftLaminar => "left_laminar",
+        EventCode.BecameTurbulent => "became_turbulent",
+        EventCode.VapourLimitBegins => "vapour_limit_begins",
+        EventCode.VapourLimitEnds => "vapour_limit_ends",
+        EventCode.VapourBreak => "vapour_break",
+        EventCode.InletUncovered => "inlet_uncovered",
+        EventCode.Emptied => "emptied",
+        EventCode.Levelled => "levelled",
+        EventCode.TargetReached => "target_reached",
+        EventCode.TimeLimit => "time_limit",
+        EventCode.NeverStarted => "never_started",
+        _ => throw new UnreachableException(code.ToString()),
+    };
+
+    /// <summary>The code of a reason why a line never started.</summary>
+    public static string Of(NoStart reason) => reason switch
+    {
+        NoStart.InletAboveLevel => "inlet_above_level",
+        NoStart.NoDrivingHead => "no_driving_head",
+        NoStart.LiftBeyondLimit => "lift_beyond_limit",
+        NoStart.ValveShut => "valve_shut",
+        _ => throw new UnreachableException(reason.ToString()),
+    };
+
+    /// <summary>The code of a warning.</summary>
+    public static string Of(WarningCode code) => code switch
+    {
+        WarningCode.InertiaMatters => "inertia_matters",
+        WarningCode.SurfaceVelocityMatters => "surface_velocity_matters",
+        WarningCode.TransitionFlow => "transition_flow",
+        WarningCode.ThinMargin => "thin_margin",
+        _ => throw new UnreachableException(code.ToString()),
+    };
+
+    /// <summary>The code of a remedy.</summary>
+    public static string Of(RemedyKind kind) => kind switch
+    {
+        RemedyKind.LowerOutlet => "lower_outlet",
+        RemedyKind.LowerCrest => "lower_crest",
+        RemedyKind.ThrottleOutlet => "throttle_outlet",
+        RemedyKind.LowerInlet => "lower_inlet",
+        _ => throw new UnreachableException(kind.ToString()),
+    };
+}

@@ -1,0 +1,97 @@
+using System.Diagnostics;
+using DrainSim.Draining;
+using DrainSim.Reports.Measures;
+
+namespace DrainSim.Reports.Wording;
+
+/// <summary>The plain sentence that says how a run ended.</summary>
+public static class Verdict
+{
+    /// <summary>The sentence of a result, with its full stop.</summary>
+    /// <param name="result">what the run found</param>
+    /// <param name="format">writes the measures</param>
+    public static string Sentence(DrainResult result, MeasureFormat format)
+    {
+        string time = MeasureFormat.Duration(result.StoppedAt);
+        string left = format.Volume(result.LeftVolume);
+        string level = format.Length(result.FinalLevel);
+        string stops = $"Stops after {time} with {left} left";
+        return result.Outcome switch
+        {
+            Outcome.Emptied => $"Empties in {time}; nothing but a film is left.",
+            Outcome.InletUncovered => $"{stops}: air reaches the inlet at {level}.",
+            Outcome.VapourBreak =>
+                $"{stops}: at {level} the low point reaches {LimitName(result.Job)} and the column parts.",
+            Outcome.Levelled => $"{stops}: at {level} it stands level with {FarEnd(result.Job)}.",
+            Outcome.TargetReached => Target(result, format, time),
+            Outcome.TimeLimit => $"Not done after {time}, the longest time given: {left} left, at {level}.",
+            Outcome.NeverStarted => $"Never starts: {Reason(result, format)}.",
+            _ => throw new UnreachableException(result.Outcome.ToString()),
+        };
+    }
+
+    /// <summary>The outcome in a word or two, for a curve or a table.</summary>
+    public static string Headline(Outcome outcome) => outcome switch
+    {
+        Outcome.Emptied => "Empty",
+        Outcome.InletUncovered => "Air reaches the inlet",
+        Outcome.VapourBreak => "The column parts",
+        Outcome.Levelled => "Level, no head left",
+        Outcome.TargetReached => "Target reached",
+        Outcome.TimeLimit => "Time is up",
+        Outcome.NeverStarted => "Never starts",
+        _ => throw new UnreachableException(outcome.ToString()),
+    };
+
+    /// <summary>The pressure that the low point must not reach, in words.</summary>
+    internal static string LimitName(Job job) =>
+        LineProfile.IsLimitGiven(job) ? "the least pressure allowed" : "the vapour pressure";
+
+    /// <summary>What the liquid runs to, in words.</summary>
+    internal static string FarEnd(Job job) =>
+        job.ReceiverSurface > new LineProfile(job.Line).Outlet ? "the receiving surface" : "the outlet";
+
+    /// <summary>Why a line never started, as the rest of a sentence.</summary>
+    private static string Reason(DrainResult result, MeasureFormat format)
+    {
+        Job job = result.Job;
+        string level = format.Length(job.Level);
+        return result.NoStart switch
+        {
+            NoStart.InletAboveLevel =>
+                $"the inlet, at {format.Length(job.Line.Inlet.Elevation)}, stands above the level of {level}",
+            NoStart.NoDrivingHead =>
+                $"{FarEnd(job)}, at {format.Length(FarElevation(job))}, stands no lower than the level of {level}",
+            NoStart.LiftBeyondLimit when result.Prime is { } prime =>
+                $"the crest stands {format.Length(prime.StaticLift)} above the level, "
+                + $"and no column higher than {format.Length(prime.LiftLimit)} holds together",
+            NoStart.LiftBeyondLimit => "the crest stands higher above the level than a column holds together",
+            NoStart.ValveShut => "a valve on the line is shut",
+            null => "the line never carries a flow",
+            _ => throw new UnreachableException(result.NoStart.ToString()),
+        };
+    }
+
+    private static double FarElevation(Job job)
+    {
+        double outlet = new LineProfile(job.Line).Outlet;
+        return Math.Max(outlet, job.ReceiverSurface ?? outlet);
+    }
+
+    private static string Target(DrainResult result, MeasureFormat format, string time)
+    {
+        string level = format.Length(result.FinalLevel);
+        string left = format.Volume(result.LeftVolume);
+        return IsVolumeTarget(result)
+            ? $"Reaches the volume asked for, {left}, after {time}; the level is {level}."
+            : $"Reaches the level asked for, {level}, after {time} with {left} left.";
+    }
+
+    private static bool IsVolumeTarget(DrainResult result)
+    {
+        RunSettings run = result.Job.Run;
+        return run.StopAtVolume is { } volume
+            && (run.StopAtLevel is not { } level
+                || Math.Abs(result.LeftVolume - volume) < 1e-6 * volume && result.FinalLevel > level);
+    }
+}
