@@ -1,5 +1,6 @@
 using System.CommandLine;
 using System.CommandLine.Help;
+using DrainSim.Cli.Commands;
 
 namespace DrainSim.Cli;
 
@@ -49,7 +50,16 @@ internal static class CommandLine
 
     private static RootCommand Tree()
     {
-        var root = new RootCommand("Says how long a tank takes to empty by gravity, and whether it empties at all.");
+        var root = new RootCommand("Says how long a tank takes to empty by gravity, and whether it empties at all.")
+        {
+            new NewCommand(),
+            new LiquidsCommand(),
+            new FittingsCommand(),
+            new MaterialsCommand(),
+            new SizesCommand(),
+            new ShapesCommand(),
+            new UnitsCommand(),
+        };
         foreach (Option option in root.Options)
         {
             if (option is HelpOption { Action: HelpAction action } help)

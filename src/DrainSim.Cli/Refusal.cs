@@ -1,4 +1,5 @@
 using System.CommandLine;
+using DrainSim.Scenarios;
 
 namespace DrainSim.Cli;
 
@@ -27,33 +28,8 @@ internal static class Refusal
             ? command.Options.Where(option => !option.Hidden).Select(option => option.Name)
             : command.Subcommands.Select(sub => sub.Name);
         string kind = isOption ? "option" : command.Subcommands.Count > 0 ? "command" : "argument";
-        return Nearest(token, known) is { } near
+        return Nearest.Find(token, known) is { } near
             ? $"no such {kind}: '{token}'; did you mean '{near}'?"
             : $"no such {kind}: '{token}'.";
-    }
-
-    private static string? Nearest(string token, IEnumerable<string> known) => known
-        .Select(name => (Name: name, Distance: Distance(token, name)))
-        .Where(candidate => candidate.Distance <= Math.Max(1, token.Length / 3))
-        .OrderBy(candidate => candidate.Distance)
-        .Select(candidate => candidate.Name)
-        .FirstOrDefault();
-
-    /// <summary>Levenshtein's distance: letters to add, drop or change.</summary>
-    private static int Distance(string from, string to)
-    {
-        int[] above = [.. Enumerable.Range(0, to.Length + 1)];
-        for (int i = 1; i <= from.Length; i++)
-        {
-            int corner = above[0];
-            above[0] = i;
-            for (int j = 1; j <= to.Length; j++)
-            {
-                int change = corner + (from[i - 1] == to[j - 1] ? 0 : 1);
-                corner = above[j];
-                above[j] = Math.Min(change, Math.Min(above[j], above[j - 1]) + 1);
-            }
-        }
-        return above[to.Length];
     }
 }

@@ -1,7 +1,7 @@
 namespace DrainSim.Scenarios;
 
 /// <summary>Finds the word that was probably meant.</summary>
-internal static class Nearest
+public static class Nearest
 {
     /// <summary>Words longer than this are no slips of the finger; it also bounds the work.</summary>
     private const int LongestWord = 64;

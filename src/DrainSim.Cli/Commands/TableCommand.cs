@@ -1,11 +1,13 @@
 using System.CommandLine;
+using DrainSim.Cli.Terminal;
+using System.Globalization;
 
 namespace DrainSim.Cli.Commands;
 
 /// <summary>A command that shows one of the built-in tables.</summary>
 internal abstract class TableCommand : ExplainedCommand
 {
-    private readonly Option<bool> csv = new("--csv") { Description = "As CSV, for a spreadsheet." };
+    private readonly Option<bool> csv = new("--csv") { Description = "As CSV, with all columns and sources." };
 
     protected TableCommand(string name, string description) : base(name, description)
     {
@@ -17,19 +19,27 @@ internal abstract class TableCommand : ExplainedCommand
     public override IReadOnlyList<Example> Examples =>
     [
         new($"drainsim {Name}", "Shows the table."),
-        new($"drainsim {Name} --csv > {Name}.csv", "Writes it for a spreadsheet."),
+        new($"drainsim {Name} --csv > {Name}.csv", "Writes it for a spreadsheet, sources included."),
     ];
 
-    /// <summary>The table, and what is to be known before its numbers are used.</summary>
-    protected abstract ColumnTable Table();
+    /// <summary>The table that the command line asks for.</summary>
+    protected abstract ColumnTable Table(ParseResult parsed);
+
+    /// <summary>A number for a spreadsheet: the shortest text that reads back as the same number; empty for none.</summary>
+    protected static string Exact(double? number) => number?.ToString("R", CultureInfo.InvariantCulture) ?? "";
+
+    /// <summary>A number in a unit that is a power of ten of the SI unit, without the noise of the conversion.</summary>
+    protected static string Exact(double? value, double perSi) =>
+        value is { } number ? ((decimal)number * (decimal)perSi).ToString("0.##########", CultureInfo.InvariantCulture) : "";
 
     private int Show(ParseResult parsed)
     {
         TextWriter output = parsed.InvocationConfiguration.Output;
+        ColumnTable table = Table(parsed);
         if (parsed.GetValue(csv))
-            Table().WriteCsv(output);
+            table.WriteCsv(output);
         else
-            Table().WriteText(output);
+            table.WriteText(output);
         return ExitCode.Ran;
     }
 }

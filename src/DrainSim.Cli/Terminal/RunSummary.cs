@@ -1,0 +1,36 @@
+using DrainSim.Draining;
+using DrainSim.Reports;
+using DrainSim.Reports.Measures;
+using DrainSim.Reports.Wording;
+
+namespace DrainSim.Cli.Terminal;
+
+/// <summary>Several runs in one table.</summary>
+internal static class RunSummary
+{
+    /// <summary>The table, a row for each run, in their order.</summary>
+    public static ColumnTable Of(IEnumerable<RunReport> reports)
+    {
+        var table = new ColumnTable(
+            new Column { Title = "scenario" },
+            new Column { Title = "outcome" },
+            new Column { Title = "time", IsNumber = true },
+            new Column { Title = "left", IsNumber = true },
+            new Column { Title = "level", IsNumber = true },
+            new Column { Title = "least margin", IsNumber = true });
+        foreach (RunReport report in reports)
+        {
+            DrainResult result = report.Result;
+            var format = new MeasureFormat(report.Units);
+            bool hasRun = result.NoStart is null;
+            table.Add(
+                report.Name,
+                OutcomeCodes.Code(result.Outcome),
+                hasRun ? MeasureFormat.Duration(result.StoppedAt) : "",
+                format.Volume(result.LeftVolume),
+                format.Length(result.FinalLevel),
+                hasRun ? format.Pressure(result.LeastMargin.Value) : "");
+        }
+        return table;
+    }
+}
