@@ -3,51 +3,84 @@ using DrainSim.Liquids;
 namespace DrainSim.Lines;
 
 /// <summary>A line compiled for one liquid and gravity: flow for a head, head for a flow, pressures along it.</summary>
+/// <remarks>
+/// <code>
+/// H = Σ f·(L/D)·v²/2g + Σ K·v²/2g + α·v_out²/2g
+/// p_k = p_s + ρ·g·(z_s − z_k) − ρ·α·v_k²/2 − ρ·g·h(0→k)
+/// </code>
+/// Flows are of all parallel lines together. Nothing changes after construction and no method allocates, so one
+/// object serves any number of threads. The loss H rises strictly with the flow; only where the sole loss is the
+/// jet of a pure orifice does its slope touch 0, at Re 4000.
+/// </remarks>
 public sealed class LineHydraulics
 {
-    private readonly LineNode[] nodes = [];
+    /// <summary>Elevations closer than this are one elevation, m: what adding up rises can be off by, with room.</summary>
+    private const double SameElevation = 1e-9;
+
+    private readonly LineNode[] nodes;
+    private readonly LineLosses losses;
+    private readonly double parallel;
+    private readonly double ownArea;
+    private readonly double ownReynolds;
+    private readonly double narrowestArea;
+    private readonly double weight;
 
     /// <summary>Compiles a line.</summary>
     /// <param name="line">the line</param>
     /// <param name="liquid">the liquid in it</param>
     /// <param name="gravity">acceleration of gravity, m/s²; greater than 0</param>
+    /// <exception cref="ArgumentOutOfRangeException">gravity, or a roughness as large as its bore</exception>
     public LineHydraulics(Line line, Liquid liquid, double gravity)
     {
         ArgumentNullException.ThrowIfNull(line);
         ArgumentNullException.ThrowIfNull(liquid);
         Require.Positive(gravity, "gravity", "m/s2");
-        throw new NotSupportedException("a line is not yet compiled");
+        var compiled = new LineCompiler(line, liquid, gravity);
+        nodes = compiled.Nodes;
+        losses = compiled.Losses();
+        parallel = line.Parallel;
+        ownArea = parallel * Area(line.Bore);
+        ownReynolds = losses.Steps[0].ReynoldsPerFlow / parallel;
+        narrowestArea = parallel * Area(nodes.Min(node => node.Bore));
+        weight = liquid.Density * gravity;
+        IsShut = compiled.IsShut;
+        Inertance = compiled.Inertance / parallel;
+        RegimeFlows = Array.AsReadOnly(Array.ConvertAll(
+            compiled.RegimeFlows(compiled.RegimeBores), flow => flow * parallel));
+        CrestIndex = HighestOf(nodes);
+        InnerLegVolume = parallel * compiled.Volumes[CrestIndex];
+        LineVolume = parallel * compiled.Volumes[^1];
     }
 
     /// <summary>Elevation of the inlet, m.</summary>
-    public double InletElevation { get; }
+    public double InletElevation => nodes[0].Elevation;
 
     /// <summary>Elevation of the outlet, m.</summary>
-    public double OutletElevation { get; }
+    public double OutletElevation => nodes[^1].Elevation;
 
     /// <summary>Elevation of the highest node, m.</summary>
-    public double CrestElevation { get; }
+    public double CrestElevation => nodes[CrestIndex].Elevation;
 
     /// <summary>Index of the highest node; the first of several at one elevation.</summary>
     public int CrestIndex { get; }
 
     /// <summary>Whether the crest stands above the inlet.</summary>
-    public bool RisesAboveInlet { get; }
+    public bool RisesAboveInlet => CrestElevation > InletElevation + SameElevation;
 
-    /// <summary>Volume of all parallel lines, m³.</summary>
+    /// <summary>Volume of all parallel lines, m³; fittings and valves hold none.</summary>
     public double LineVolume { get; }
 
     /// <summary>Volume of all parallel lines from the inlet to the crest, m³.</summary>
     public double InnerLegVolume { get; }
 
     /// <summary>Volume of all parallel lines from the crest to the outlet, m³.</summary>
-    public double OuterLegVolume { get; }
+    public double OuterLegVolume => LineVolume - InnerLegVolume;
 
     /// <summary>Developed length of one line, m.</summary>
-    public double TotalLength { get; }
+    public double TotalLength => nodes[^1].Distance;
 
     /// <summary>Area of all parallel outlets, m².</summary>
-    public double OutletArea { get; }
+    public double OutletArea => parallel * Area(nodes[^1].Bore);
 
     /// <summary>Σ L/(g·n·A), s²/m²: the head that speeds the flow up by 1 m³/s in 1 s.</summary>
     public double Inertance { get; }
@@ -56,79 +89,155 @@ public sealed class LineHydraulics
     public bool IsShut { get; }
 
     /// <summary>
-    /// Flows of all parallel lines at which the flow in a straight run or at the outlet stops being laminar or
-    /// becomes fully turbulent, rising, m³/s.
+    /// Flows at which the flow in a straight run or at the outlet stops being laminar or becomes fully turbulent,
+    /// rising, m³/s: the only places where the loss has a kink.
     /// </summary>
-    public IReadOnlyList<double> RegimeFlows { get; } = [];
+    public IReadOnlyList<double> RegimeFlows { get; }
 
     /// <summary>Number of nodes; at least 1.</summary>
     public int NodeCount => nodes.Length;
 
-    /// <summary>A node, counted from the inlet.</summary>
+    /// <summary>A node, counted from just inside the inlet to just inside the outlet.</summary>
     /// <param name="index">from 0 to <see cref="NodeCount"/> − 1</param>
     public LineNode Node(int index) => nodes[index];
 
-    /// <summary>Head used up by a flow, the jet's velocity head included, m.</summary>
-    /// <param name="flow">flow of all parallel lines, m³/s; at least 0</param>
+    /// <summary>Head used up by a flow, the jet's velocity head included, m; infinite through a shut valve.</summary>
+    /// <param name="flow">flow, m³/s; at least 0</param>
     public double HeadLoss(double flow) => HeadLoss(flow, out _);
 
     /// <summary>Head used up by a flow, m, and its slope.</summary>
-    /// <param name="flow">flow of all parallel lines, m³/s; at least 0</param>
-    /// <param name="slope">dH/dQ, s/m²</param>
-    public double HeadLoss(double flow, out double slope) => slope = flow * NodeCount;
+    /// <param name="flow">flow, m³/s; at least 0</param>
+    /// <param name="slope">dH/dQ, s/m²; at no flow that of the laminar law</param>
+    public double HeadLoss(double flow, out double slope)
+    {
+        if (IsShut)
+        {
+            slope = double.PositiveInfinity;
+            return flow > 0 ? double.PositiveInfinity : 0;
+        }
+        if (flow == 0)
+        {
+            slope = (losses.Steps[^1].LinearToHere + losses.Steps[^1].LaminarToHere) / parallel;
+            return 0;
+        }
+        double head = losses.Used(NodeCount - 1, flow / parallel, out double rise);
+        slope = rise / flow;
+        return head;
+    }
 
-    /// <summary>Flow of all parallel lines under a head, m³/s; 0 for no head or a shut valve.</summary>
+    /// <summary>Flow under a head, m³/s; 0 for no head or a shut valve.</summary>
     /// <param name="head">driving head, m</param>
     /// <param name="guess">a flow nearby, m³/s; 0 when none is known</param>
     public double Flow(double head, double guess) => Flow(head, guess, out _);
 
-    /// <summary>Flow of all parallel lines under a head, m³/s, and its slope.</summary>
+    /// <summary>Flow under a head, m³/s, and its slope.</summary>
     /// <param name="head">driving head, m</param>
     /// <param name="guess">a flow nearby, m³/s; 0 when none is known</param>
     /// <param name="slope">dQ/dH, m²/s; 0 where nothing flows</param>
-    public double Flow(double head, double guess, out double slope) => slope = head * guess * NodeCount;
+    public double Flow(double head, double guess, out double slope)
+    {
+        slope = 0;
+        if (IsShut)
+            return 0;
+        double flow = FlowSearch.Flow(losses, NodeCount - 1, head, guess / parallel, out slope);
+        slope *= parallel;
+        return flow * parallel;
+    }
 
     /// <summary>Velocity in the line's own bore, m/s.</summary>
-    /// <param name="flow">flow of all parallel lines, m³/s</param>
-    public double Velocity(double flow) => flow * OutletArea;
+    /// <param name="flow">flow, m³/s</param>
+    public double Velocity(double flow) => flow / ownArea;
 
     /// <summary>Velocity in the narrowest bore, m/s.</summary>
-    /// <param name="flow">flow of all parallel lines, m³/s</param>
-    public double LargestVelocity(double flow) => flow * OutletArea;
+    /// <param name="flow">flow, m³/s</param>
+    public double LargestVelocity(double flow) => flow / narrowestArea;
 
     /// <summary>Reynolds number in the line's own bore, 1.</summary>
-    /// <param name="flow">flow of all parallel lines, m³/s</param>
-    public double Reynolds(double flow) => flow * OutletArea;
+    /// <param name="flow">flow, m³/s</param>
+    public double Reynolds(double flow) => flow * ownReynolds;
 
-    /// <summary>Time in which the head alone would bring the line's liquid to the flow, Σ L·v/(g·H), s.</summary>
-    /// <param name="flow">flow of all parallel lines, m³/s</param>
-    /// <param name="head">driving head, m; 0 is given for no head</param>
+    /// <summary>Water starting time Σ L·v/(g·H): in which the head alone would bring the line to the flow, s.</summary>
+    /// <param name="flow">flow, m³/s</param>
+    /// <param name="head">driving head, m; without head the time counts as 0</param>
     public double InertiaTime(double flow, double head) => head > 0 ? Inertance * flow / head : 0;
 
-    /// <summary>Absolute pressure at every node, Pa.</summary>
-    /// <param name="flow">flow of all parallel lines, m³/s</param>
+    /// <summary>Absolute pressure at every node, Pa; negative where the liquid would have to pull.</summary>
+    /// <remarks>Behind a shut valve the pressure is the one that the tank would give with the valve ajar.</remarks>
+    /// <param name="flow">flow, m³/s; at least 0</param>
     /// <param name="surface">elevation of the liquid's surface in the tank, m</param>
     /// <param name="gasPressure">absolute pressure on that surface, Pa</param>
     /// <param name="pressures">receives <see cref="NodeCount"/> pressures</param>
-    public void Pressures(double flow, double surface, double gasPressure, Span<double> pressures) =>
-        pressures[..NodeCount].Fill(gasPressure + flow * surface);
-
-    /// <summary>The least absolute pressure over the nodes before the outlet, Pa.</summary>
-    /// <param name="flow">flow of all parallel lines, m³/s</param>
-    /// <param name="surface">elevation of the liquid's surface in the tank, m</param>
-    /// <param name="gasPressure">absolute pressure on that surface, Pa</param>
-    /// <param name="node">where it is</param>
-    public double LowPointPressure(double flow, double surface, double gasPressure, out int node)
+    public void Pressures(double flow, double surface, double gasPressure, Span<double> pressures)
     {
-        node = CrestIndex;
-        return gasPressure + flow * surface;
+        var walk = new LossWalk(losses, flow / parallel);
+        while (walk.MoveNext())
+            pressures[walk.Node] = gasPressure + weight * (surface - nodes[walk.Node].Elevation - walk.Used);
     }
 
-    /// <summary>The largest flow at which the low point is not below a pressure, m³/s.</summary>
+    /// <summary>The least absolute pressure over the nodes before the outlet, Pa.</summary>
+    /// <remarks>
+    /// The node at the outlet is left out, because the receiver sets the pressure there; a line of one node has
+    /// its inlet for a low point. Between nodes the pressure is linear, so none lower is missed but the narrowest
+    /// part of the stream inside a fitting.
+    /// </remarks>
+    /// <param name="flow">flow, m³/s; at least 0</param>
+    /// <param name="surface">elevation of the liquid's surface in the tank, m</param>
+    /// <param name="gasPressure">absolute pressure on that surface, Pa</param>
+    /// <param name="node">where it is; the first of equals</param>
+    public double LowPointPressure(double flow, double surface, double gasPressure, out int node)
+    {
+        double highest = double.NegativeInfinity;
+        node = 0;
+        var walk = new LossWalk(losses, flow / parallel);
+        int count = Math.Max(1, NodeCount - 1);
+        for (int i = 0; i < count; i++)
+        {
+            walk.MoveNext();
+            double lift = nodes[i].Elevation + walk.Used;
+            if (lift > highest)
+            {
+                highest = lift;
+                node = i;
+            }
+        }
+        return gasPressure + weight * (surface - highest);
+    }
+
+    /// <summary>
+    /// The largest flow at which the low point is not below a pressure (to rounding), m³/s; 0 when the static lift
+    /// alone is too much.
+    /// </summary>
     /// <param name="leastPressure">pressure to keep, Pa absolute</param>
     /// <param name="surface">elevation of the liquid's surface in the tank, m</param>
     /// <param name="gasPressure">absolute pressure on that surface, Pa</param>
-    /// <param name="most">flow above which no answer is wanted, m³/s</param>
-    public double FlowKeepingLowPoint(double leastPressure, double surface, double gasPressure, double most) =>
-        gasPressure + surface > leastPressure ? most * NodeCount : 0;
+    /// <param name="most">flow above which no answer is wanted, m³/s; at least 0</param>
+    public double FlowKeepingLowPoint(double leastPressure, double surface, double gasPressure, double most)
+    {
+        double flow = IsShut ? 0 : most;
+        int solved = -1;
+        for (int turn = 0; turn < NodeCount; turn++)
+        {
+            double pressure = LowPointPressure(flow, surface, gasPressure, out int node);
+            if (pressure >= leastPressure || node == solved || flow == 0)
+                break;
+            double head = (gasPressure - leastPressure) / weight + surface - nodes[node].Elevation;
+            double kept = FlowSearch.Flow(losses, node, head, flow / parallel, out _);
+            flow = Math.Min(flow, kept * parallel);
+            solved = node;
+        }
+        return flow;
+    }
+
+    private static double Area(double bore) => Math.PI / 4 * bore * bore;
+
+    private static int HighestOf(LineNode[] nodes)
+    {
+        int highest = 0;
+        for (int i = 1; i < nodes.Length; i++)
+        {
+            if (nodes[i].Elevation > nodes[highest].Elevation + SameElevation)
+                highest = i;
+        }
+        return highest;
+    }
 }

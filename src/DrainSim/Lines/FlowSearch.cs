@@ -1,0 +1,93 @@
+namespace DrainSim.Lines;
+
+/// <summary>Finds the flow of one line that uses up a head on the way to a node.</summary>
+/// <remarks>
+/// Newton's method on ln(used) over ln q, where every term is a straight line of slope 1 to 3.4 in its regime, so
+/// that few turns are needed from anywhere. Around it stands a bracket from two quadratics that bound the loss from
+/// below (f at least 64/Re, and at least its fully rough limit; α at least 1) and from above (f at most
+/// 64/Re + f(4000); α at most 2). A step that leaves the bracket is replaced by its geometric middle. The square
+/// of a relative step is the error of its end, times less than 1 in a smooth regime: a step below
+/// <see cref="SmallStep"/> within one regime ends the search without evaluating the loss again.
+/// </remarks>
+internal static class FlowSearch
+{
+    /// <summary>Relative step whose square is below the last bit.</summary>
+    private const double SmallStep = 1.5e-8;
+
+    /// <summary>Head below which nothing is taken to flow, m.</summary>
+    private const double LeastHead = 1e-100;
+
+    /// <summary>Turns that bisection alone would need, with room.</summary>
+    private const int MostTurns = 200;
+
+    /// <summary>The flow of one line, m³/s; 0 for no head.</summary>
+    /// <param name="losses">the line</param>
+    /// <param name="node">node up to which the head is used</param>
+    /// <param name="head">head, m</param>
+    /// <param name="guess">a flow of one line nearby, m³/s; 0 when none is known</param>
+    /// <param name="slope">dq/dH, m²/s; 0 where nothing flows</param>
+    public static double Flow(LineLosses losses, int node, double head, double guess, out double slope)
+    {
+        slope = 0;
+        if (!(head > LeastHead))
+            return 0;
+        (double low, double high) = Bracket(losses.Steps[node], head);
+        double q = guess > low && guess < high ? guess : Math.Sqrt(low * high);
+        for (int turn = 0; turn < MostTurns; turn++)
+        {
+            double used = losses.Used(node, q, out double rise);
+            slope = q / rise;
+            if (used > head)
+                high = q;
+            else
+                low = q;
+            double step = LogRatio(head, used) * used / rise;
+            double next = q * Exp(step);
+            bool inside = next >= low && next <= high;
+            if (inside && Math.Abs(step) < SmallStep && SameRegime(losses.Kinks, q, next))
+                return next;
+            if (!inside || next == q)
+                next = Math.Sqrt(low * high);
+            if (high - low <= 4e-16 * high)
+                return q;
+            q = next;
+        }
+        return q;
+    }
+
+    /// <summary>Flows between which the answer lies, loosened by more than the rounding of the bounds.</summary>
+    private static (double Low, double High) Bracket(in LossStep to, double head)
+    {
+        double laminar = to.LinearToHere + to.LaminarToHere;
+        double least = to.SquareToHere + to.Jet;
+        double most = to.SquareToHere + 2 * to.Jet + to.LargestToHere;
+        double low = Root(most, laminar, head);
+        double high = Math.Min(Root(least, laminar, head), Root(least + to.RoughToHere, to.LinearToHere, head));
+        return (low * (1 - 1e-9), high * (1 + 1e-9));
+    }
+
+    /// <summary>The positive root of a·q² + b·q = head, in the form that does not cancel.</summary>
+    private static double Root(double a, double b, double head) =>
+        2 * head / (b + Math.Sqrt(b * b + 4 * a * head));
+
+    /// <summary>ln(head/used), by its series near 1, where the logarithm would lose digits.</summary>
+    private static double LogRatio(double head, double used)
+    {
+        double e = (head - used) / used;
+        return Math.Abs(e) < 0.01 ? e * (1 - e * (0.5 - e * (1.0 / 3 - e * 0.25))) : Math.Log(head / used);
+    }
+
+    /// <summary>e^x, by its series for the short steps of the last turns.</summary>
+    private static double Exp(double x) =>
+        Math.Abs(x) < 0.01 ? 1 + x * (1 + x * (0.5 + x * (1.0 / 6 + x / 24))) : Math.Exp(x);
+
+    private static bool SameRegime(double[] kinks, double one, double other)
+    {
+        foreach (double kink in kinks)
+        {
+            if (one < kink != other < kink)
+                return false;
+        }
+        return true;
+    }
+}
