@@ -5,7 +5,7 @@ namespace DrainSim.Integration;
 /// <remarks>
 /// The caller evaluates the function, so nothing is captured or allocated: ask <see cref="TryNext"/> for a
 /// point, hand its value to <see cref="Narrow"/>, until there is none. It needs at most one evaluation more than
-/// bisection, whatever the function, and superlinearly few where it is smooth. The end is the width of the
+/// bisection, whatever the function, and about a dozen where it is smooth. The end is the width of the
 /// bracket, never the size of a value, so values of any scale are located alike; that and the strict bound
 /// are why this is not MathNet's Brent, whose limit is on the value too and whose argument is a delegate.
 /// Source: I. F. D. Oliveira, R. H. C. Takahashi, ACM Trans. Math. Softw. 47 (2021) article 5,

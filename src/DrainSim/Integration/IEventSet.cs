@@ -24,5 +24,9 @@ public interface IEventSet
     /// <param name="t">time of the event</param>
     /// <param name="y">state there; may be changed, as may the system's own parameters</param>
     /// <returns>whether the run goes on</returns>
+    /// <remarks>
+    /// A derivative with a jump or a kink keeps its accuracy when it goes on along its present branch beyond
+    /// the place, has an event function there, and changes its branch here: no step then sees both branches.
+    /// </remarks>
     bool OnRestart(int index, double t, Span<double> y);
 }
