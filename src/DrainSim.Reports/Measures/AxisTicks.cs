@@ -1,0 +1,64 @@
+using System.Globalization;
+
+namespace DrainSim.Reports.Measures;
+
+/// <summary>The ticks of an axis at round numbers, labelled alike on every machine.</summary>
+internal sealed class AxisTicks
+{
+    private static readonly double[] TimeSteps = [1, 2, 5, 10, 15, 20, 30, 60, 120];
+    private static readonly double[] HourSteps = [0.25, 0.5, 1, 2, 3, 6, 12, 24];
+
+    private AxisTicks(double least, double most, double step)
+    {
+        int first = (int)Math.Ceiling(least / step - 1e-9);
+        int last = (int)Math.Floor(most / step + 1e-9);
+        int decimals = Math.Max(0, (int)Math.Ceiling(-Math.Log10(step) - 1e-9));
+        if (Math.Abs(step - 0.25) < 1e-9)
+        {
+            decimals = 2;
+        }
+        Positions = [.. Enumerable.Range(first, Math.Max(0, last - first + 1)).Select(count => count * step)];
+        Labels = [.. Positions.Select(at => Label(at, decimals))];
+    }
+
+    /// <summary>Where the ticks stand, in the axis's unit.</summary>
+    public double[] Positions { get; }
+
+    /// <summary>What they say.</summary>
+    public string[] Labels { get; }
+
+    /// <summary>Ticks at 1, 2 or 5 times a power of ten.</summary>
+    /// <param name="least">lower end of the axis</param>
+    /// <param name="most">upper end</param>
+    /// <param name="count">most steps that fit</param>
+    public static AxisTicks Decimal(double least, double most, int count) =>
+        new(least, most, DecimalStep((most - least) / count));
+
+    /// <summary>Ticks of a time axis from 0, at steps that people count in.</summary>
+    /// <param name="unit">the axis's unit</param>
+    /// <param name="most">upper end in that unit</param>
+    /// <param name="count">most steps that fit</param>
+    public static AxisTicks Time(Unit unit, double most, int count)
+    {
+        double least = most / count;
+        double[] steps = unit == Unit.Hour ? HourSteps : unit == Unit.Day ? [] : TimeSteps;
+        double step = least < (steps.Length > 0 ? steps[0] / 2 : 0) ? 0 : Array.Find(steps, one => one >= least);
+        return new(0, most, step > 0 ? step : DecimalStep(least));
+    }
+
+    private static double DecimalStep(double least)
+    {
+        double power = Math.Pow(10, Math.Floor(Math.Log10(least)));
+        return least <= power * (1 + 1e-9) ? power
+            : least <= 2 * power ? 2 * power
+            : least <= 5 * power ? 5 * power
+            : 10 * power;
+    }
+
+    private static string Label(double value, int decimals)
+    {
+        string text = (Math.Abs(value) < 1e-12 ? 0 : value)
+            .ToString("F" + decimals.ToString(CultureInfo.InvariantCulture), CultureInfo.InvariantCulture);
+        return text.Replace('-', '−');
+    }
+}

@@ -1,0 +1,21 @@
+using SkiaSharp;
+
+namespace DrainSim.Reports.Pictures;
+
+/// <summary>The colours of the pictures: told apart by their lightness too, so that they print in grey.</summary>
+internal static class Palette
+{
+    public static readonly SKColor Paper = new(0xFF, 0xFF, 0xFF);
+    public static readonly SKColor Ink = new(0x1E, 0x2B, 0x33);
+    public static readonly SKColor Muted = new(0x5C, 0x6B, 0x75);
+    public static readonly SKColor Grid = new(0xE2, 0xE6, 0xE8);
+    public static readonly SKColor Frame = new(0x9A, 0xA6, 0xAD);
+    public static readonly SKColor Liquid = new(0x17, 0x52, 0x73);
+    public static readonly SKColor LiquidTint = new(0xE6, 0xEF, 0xF4);
+    public static readonly SKColor Flow = new(0x9C, 0x6A, 0x14);
+    public static readonly SKColor Pressure = new(0x5B, 0x3F, 0x73);
+    public static readonly SKColor Limit = new(0xB2, 0x3A, 0x2A);
+
+    /// <summary>The same colour for a figure.</summary>
+    public static ScottPlot.Color Of(SKColor color) => new(color.Red, color.Green, color.Blue);
+}

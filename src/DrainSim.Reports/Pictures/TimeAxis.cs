@@ -1,0 +1,56 @@
+using DrainSim.Reports.Measures;
+using SkiaSharp;
+
+namespace DrainSim.Reports.Pictures;
+
+/// <summary>The time axis that the rows of a picture share.</summary>
+internal sealed class TimeAxis
+{
+    private readonly double most;
+    private readonly AxisTicks ticks;
+
+    /// <summary>An axis from the start to a little after the end; without ticks for a run of no length.</summary>
+    /// <param name="end">when the run stopped, s</param>
+    public TimeAxis(double end)
+    {
+        End = end;
+        Unit = MeasureFormat.TimeUnit(end);
+        most = end > 0 ? 1.04 * Unit.From(end) : 1;
+        ticks = end > 0 ? AxisTicks.Time(Unit, most, 10) : AxisTicks.Decimal(0, 0.5, 1);
+    }
+
+    /// <summary>When the run stopped, s.</summary>
+    public double End { get; }
+
+    /// <summary>The axis's unit.</summary>
+    public Unit Unit { get; }
+
+    /// <summary>A time in the axis's unit.</summary>
+    /// <param name="time">s</param>
+    public double At(double time) => Unit.From(time);
+
+    /// <summary>The times of a course in the axis's unit.</summary>
+    public double[] Times(Course course) => course.Values(now => now.Time, Unit.Size);
+
+    /// <summary>A panel over this axis.</summary>
+    /// <param name="frame">where its data lie, px</param>
+    /// <param name="vertical">its vertical range</param>
+    /// <param name="steps">most steps of the vertical ticks</param>
+    public Panel Panel(SKRect frame, (double Least, double Most) vertical, int steps)
+    {
+        var panel = new Panel(frame, (0, most), vertical);
+        panel.SetTicks(ticks, AxisTicks.Decimal(vertical.Least, vertical.Most, steps));
+        return panel;
+    }
+
+    /// <summary>Draws the moment of the stop down a panel.</summary>
+    public void MarkEnd(Sheet sheet, Panel panel, Notes notes)
+    {
+        if (End > 0)
+        {
+            float x = panel.At(At(End), 0).X;
+            sheet.Line(new SKPoint(x, panel.Frame.Top), new SKPoint(x, panel.Frame.Bottom), Palette.Muted, 1.5f, 3, 5);
+            notes.KeepClearOf(x);
+        }
+    }
+}
