@@ -1,3 +1,4 @@
+using DrainSim.Reports.Pictures;
 using DrainSim.Reports.Series;
 
 namespace DrainSim.Reports.Files;
@@ -6,8 +7,8 @@ namespace DrainSim.Reports.Files;
 public static class RunFiles
 {
     /// <summary>
-    /// Writes <c>NAME.csv</c>, <c>NAME.events.csv</c>, <c>NAME.json</c> and, where asked for, <c>NAME.png</c>
-    /// and <c>NAME.line.png</c>: all of them whole, or none.
+    /// Writes <c>NAME.csv</c>, <c>NAME.events.csv</c>, <c>NAME.json</c>, <c>NAME.png</c> and
+    /// <c>NAME.line.png</c>: all of them whole, or none.
     /// </summary>
     /// <param name="folder">where they go; made where it is missing</param>
     /// <param name="report">the run and how it is told</param>
@@ -34,5 +35,7 @@ public static class RunFiles
         (".csv", stream => SeriesTables.WriteSeries(stream, report.Result)),
         (".events.csv", stream => SeriesTables.WriteEvents(stream, report.Result)),
         (".json", stream => ResultDocument.Write(stream, report)),
+        (".png", stream => RunPicture.Write(stream, report)),
+        (".line.png", stream => LinePicture.Write(stream, report)),
     ];
 }

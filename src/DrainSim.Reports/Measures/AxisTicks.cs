@@ -21,6 +21,11 @@ internal sealed class AxisTicks
         Labels = [.. Positions.Select(at => Label(at, decimals))];
     }
 
+    private AxisTicks() => (Positions, Labels) = ([], []);
+
+    /// <summary>An axis without ticks.</summary>
+    public static AxisTicks None { get; } = new();
+
     /// <summary>Where the ticks stand, in the axis's unit.</summary>
     public double[] Positions { get; }
 

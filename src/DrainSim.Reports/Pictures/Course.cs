@@ -14,15 +14,15 @@ internal sealed class Course
         Trace trace = result.Trace;
         double end = trace.End;
         int stride = 1 + trace.Knots.Count / MostKnots;
-        IEnumerable<double> times = Enumerable.Range(0, end > 0 ? EvenPoints + 1 : 1)
+        IEnumerable<double> times = Enumerable.Range(0, EvenPoints + 1)
             .Select(i => end * i / EvenPoints)
             .Concat(trace.Knots.Where((_, i) => i % stride == 0))
             .Concat(result.Events.Select(moment => Math.Clamp(moment.Time, 0, end)));
-        Instants = [.. times.Distinct().Order().Select(trace.At)];
+        Instants = end > 0 ? [.. times.Distinct().Order().Select(trace.At)] : [trace.At(0), trace.At(0)];
         End = end;
     }
 
-    /// <summary>The points in time order, at least one.</summary>
+    /// <summary>The points in time order, at least two; a run of no length has its only point twice.</summary>
     public IReadOnlyList<Instant> Instants { get; }
 
     /// <summary>When the run stopped, s.</summary>

@@ -76,9 +76,10 @@ internal sealed class LevelPanel(
         SKPoint at = panel.At(axis.At(axis.End), unit.From(result.FinalLevel));
         sheet.Dot(at, 9, Palette.Liquid);
         notes.KeepClearOf(at, 10);
-        string second = axis.End > 0
-            ? $"{MeasureFormat.Duration(axis.End)}, {report.Format.Length(result.FinalLevel)}"
-            : $"level {report.Format.Length(result.FinalLevel)}";
+        string level = report.Format.Length(result.FinalLevel);
+        string second = axis.End <= 0 ? $"level {level}"
+            : result.Outcome == Outcome.Emptied ? MeasureFormat.Duration(axis.End)
+            : $"{MeasureFormat.Duration(axis.End)}, {level}";
         notes.Add(at, new TextLook(24, Palette.Liquid), 400, true, Verdict.Headline(result.Outcome), second);
     }
 

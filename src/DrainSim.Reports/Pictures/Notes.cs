@@ -12,15 +12,16 @@ internal sealed class Notes
     /// <summary>Notes on one panel.</summary>
     /// <param name="sheet">the page</param>
     /// <param name="panel">the figure on it</param>
-    /// <param name="xs">the curve that no note may cover</param>
-    /// <param name="ys">its values</param>
-    public Notes(Sheet sheet, Panel panel, double[] xs, double[] ys)
+    public Notes(Sheet sheet, Panel panel)
     {
         this.sheet = sheet;
         this.panel = panel;
         placer = new LabelPlacer(panel.Frame);
-        placer.KeepClearOf([.. xs.Zip(ys, panel.At)]);
     }
+
+    /// <summary>Keeps notes away from a curve.</summary>
+    public void KeepClearOf(double[] xs, double[] ys) =>
+        placer.KeepClearOf([.. xs.Zip(ys, panel.At).Where(point => float.IsFinite(point.Y))]);
 
     /// <summary>Keeps notes away from a mark.</summary>
     public void KeepClearOf(SKPoint mark, float radius) =>
@@ -56,6 +57,19 @@ internal sealed class Notes
         return true;
     }
 
+    /// <summary>Names a curve: close to it where somewhere along it there is room, else with a pointer.</summary>
+    public void AddAlong(double[] xs, double[] ys, TextLook look, string name)
+    {
+        foreach (double share in (ReadOnlySpan<double>)[0.55, 0.7, 0.4, 0.82, 0.25, 0.12])
+        {
+            if (Add(On(xs, ys, share), look, 12, false, name))
+            {
+                return;
+            }
+        }
+        Add(On(xs, ys, 0.55), look, 400, false, name);
+    }
+
     /// <summary>Draws a thin dashed line across the panel at a value, with its name at the left, above or below it.</summary>
     /// <returns>whether the value lies in the panel</returns>
     public bool Reference(double value, string name, TextLook look, bool isAbove, float width = 1.5f)
@@ -64,7 +78,7 @@ internal sealed class Notes
         {
             return false;
         }
-        SKPoint at = panel.At(0, value);
+        var at = new SKPoint(panel.Frame.Left, panel.At(0, value).Y);
         var end = new SKPoint(panel.Frame.Right, at.Y);
         sheet.Line(at, end, look.Color, width, 9, 6);
         foreach (bool above in (ReadOnlySpan<bool>)[isAbove, !isAbove])
@@ -76,6 +90,19 @@ internal sealed class Notes
         }
         placer.KeepClearOf([at, end]);
         return true;
+    }
+
+    /// <summary>The point of a curve at a share of its horizontal extent, px.</summary>
+    private SKPoint On(double[] xs, double[] ys, double share)
+    {
+        double x = xs[0] + share * (xs[^1] - xs[0]);
+        int next = Math.Max(1, Array.FindIndex(xs, one => one >= x));
+        if (xs.Length == 1 || xs[next] <= xs[next - 1])
+        {
+            return panel.At(x, ys[0]);
+        }
+        double part = (x - xs[next - 1]) / (xs[next] - xs[next - 1]);
+        return panel.At(x, ys[next - 1] + part * (ys[next] - ys[next - 1]));
     }
 
     private bool WriteBeside(float y, string name, TextLook look, bool above)
@@ -106,7 +133,9 @@ internal sealed class Notes
         float distance = SKPoint.Distance(anchor, near);
         float clear = 12 / distance;
         var from = new SKPoint(anchor.X + clear * (near.X - anchor.X), anchor.Y + clear * (near.Y - anchor.Y));
-        sheet.Line(from, near, color.WithAlpha(0x90), 1.5f);
+        float stop = 1 - 5 / distance;
+        var to = new SKPoint(anchor.X + stop * (near.X - anchor.X), anchor.Y + stop * (near.Y - anchor.Y));
+        sheet.Line(from, to, color.WithAlpha(0x90), 1.5f);
         placer.KeepClearOf([from, near]);
     }
 }

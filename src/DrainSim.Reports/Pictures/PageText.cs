@@ -8,9 +8,10 @@ namespace DrainSim.Reports.Pictures;
 /// <summary>What stands around the panels of a page: title, verdict, headings, foot.</summary>
 internal static class PageText
 {
-    private const float Margin = 44;
+    private const float Edge = 44;
 
     private static readonly TextLook TitleLook = new(36, Palette.Ink, IsBold: true);
+    private static readonly TextLook LongTitleLook = new(28, Palette.Ink, IsBold: true);
     private static readonly TextLook VerdictLook = new(25, Palette.Ink);
     private static readonly TextLook HeadingLook = new(23, Palette.Ink, IsBold: true);
     private static readonly TextLook FootLook = new(19, Palette.Muted);
@@ -18,19 +19,28 @@ internal static class PageText
     /// <summary>How a note in a panel looks.</summary>
     public static TextLook Note(SKColor color) => new(21, color);
 
+    /// <summary>The least margin of a run in words, against a limit by name.</summary>
+    public static string Margin(RunReport report, string limit) => report.Result.LeastMargin.Value switch
+    {
+        > 1 and var above => $"{report.Format.Pressure(above)} above {limit}",
+        < -1 and var below => $"{report.Format.Pressure(-below)} below {limit}",
+        _ => $"at {limit}",
+    };
+
     /// <summary>Writes title and subtitle.</summary>
     /// <returns>where the room below them begins, px</returns>
     public static float Head(Sheet sheet, RunReport report, string subtitle)
     {
-        float width = sheet.Width - 2 * Margin;
+        float width = sheet.Width - 2 * Edge;
         float y = 26;
-        foreach ((string text, TextLook look, int lines) in
-            ((string, TextLook, int)[])[(report.Title, TitleLook, 2), (subtitle, VerdictLook, 4)])
+        bool isLong = Sheet.Wrap(report.Title, TitleLook, width, 3).Count > 2;
+        foreach ((string text, TextLook look) in
+            ((string, TextLook)[])[(report.Title, isLong ? LongTitleLook : TitleLook), (subtitle, VerdictLook)])
         {
-            foreach (string line in Sheet.Wrap(text, look, width, lines))
+            foreach (string line in Sheet.Wrap(text, look, width, 4))
             {
                 y += look.LineHeight;
-                sheet.Text(line, Margin, y, look);
+                sheet.Text(line, Edge, y, look);
             }
             y += 6;
         }
@@ -50,19 +60,18 @@ internal static class PageText
         float y = sheet.Height - 50;
         foreach (string text in (ReadOnlySpan<string>)[plant, note])
         {
-            sheet.Text(Sheet.Wrap(text, FootLook, sheet.Width - 2 * Margin, 1)[0], Margin, y, FootLook);
+            sheet.Text(Sheet.Wrap(text, FootLook, sheet.Width - 2 * Edge, 1)[0], Edge, y, FootLook);
             y += FootLook.LineHeight;
         }
     }
 
     /// <summary>Writes the heading of a row above its frame.</summary>
     public static void RowTitle(Sheet sheet, SKRect frame, string text) =>
-        sheet.Text(text, Margin, frame.Top - 14, HeadingLook);
+        sheet.Text(text, Edge, frame.Top - 14, HeadingLook);
 
-    /// <summary>Writes the name of the time axis at the right, on the line of the last row's heading.</summary>
-    public static void TimeTitle(Sheet sheet, SKRect frame, TimeAxis axis)
+    /// <summary>Writes the name of the horizontal axis below the last row, at the right.</summary>
+    public static void AxisTitle(Sheet sheet, SKRect frame, string text)
     {
-        string text = axis.End > 0 ? $"time since the start, {axis.Unit.Sign}" : "at the start";
         TextLook look = Note(Palette.Ink);
         sheet.Text(text, frame.Right - Sheet.Measure(text, look), frame.Bottom + 62, look);
     }

@@ -48,10 +48,11 @@ internal sealed class Panel
     }
 
     /// <summary>Adds a curve.</summary>
-    public void Curve(double[] xs, double[] ys, SKColor color)
+    public void Curve(double[] xs, double[] ys, SKColor color, bool isDashed = false)
     {
         ScottPlot.Plottables.Scatter curve = Plot.Add.ScatterLine(xs, ys, Palette.Of(color));
         curve.LineWidth = 3.5f;
+        curve.LinePattern = isDashed ? LinePattern.Dashed : LinePattern.Solid;
     }
 
     /// <summary>Tints the ground between a curve and the lower edge.</summary>

@@ -54,7 +54,9 @@ public static class RunPicture
         panel.Curve(xs, ys, Palette.Liquid);
         panel.Draw(sheet);
         PageText.RowTitle(sheet, frame, $"Level in the tank, {unit.Sign}");
-        new LevelPanel(sheet, panel, report, axis, unit, new Notes(sheet, panel, xs, ys)).Annotate(profile);
+        var notes = new Notes(sheet, panel);
+        notes.KeepClearOf(xs, ys);
+        new LevelPanel(sheet, panel, report, axis, unit, notes).Annotate(profile);
     }
 
     private static void DrawFlow(Sheet sheet, RunReport report, Course course, TimeAxis axis, SKRect frame)
@@ -62,19 +64,24 @@ public static class RunPicture
         Extreme largest = report.Result.LargestFlow;
         double peak = course.Instants.Max(now => now.Flow);
         Unit unit = report.Format.FlowUnit(peak);
-        Panel panel = axis.Panel(frame, (0, peak > 0 ? 1.32 * unit.From(peak) : 1), 4);
+        Panel panel = axis.Panel(frame, (0, peak > 0 ? 1.32 * unit.From(peak) : 1), peak > 0 ? 4 : 0);
         double[] xs = axis.Times(course);
         double[] ys = course.Values(now => now.Flow, unit.Size);
         panel.Curve(xs, ys, Palette.Flow);
         panel.Draw(sheet);
         PageText.RowTitle(sheet, frame, $"Flow out of the tank, {unit.Sign}");
-        var notes = new Notes(sheet, panel, xs, ys);
+        var notes = new Notes(sheet, panel);
+        notes.KeepClearOf(xs, ys);
         axis.MarkEnd(sheet, panel, notes);
         if (peak > 0)
         {
             SKPoint at = panel.At(axis.At(largest.Time), unit.From(largest.Value));
             sheet.Dot(at, 6, Palette.Flow);
             notes.Add(at, PageText.Note(Palette.Flow), 240, false, $"largest {report.Format.Flow(largest.Value)}");
+        }
+        else
+        {
+            notes.Add(panel.At(0, 0), PageText.Note(Palette.Flow), 100, false, "no flow");
         }
     }
 
@@ -87,14 +94,16 @@ public static class RunPicture
         double most = unit.From(Math.Max(finite.Max(), 1000));
         double least = unit.From(Math.Min(finite.Min(), 0));
         double below = Math.Min(least, unit.From(limit)) < 0.03 * most ? 0.05 : 0;
-        Panel panel = axis.Panel(frame, (least - below * (most - least), most + 0.2 * (most - least)), 5);
+        Panel panel = axis.Panel(frame, (least - below * (most - least), most + 0.2 * (most - least)), 7);
         double[] xs = axis.Times(course);
         double[] ys = course.Values(now => now.LowPointPressure, unit.Size);
         panel.Curve(xs, ys, Palette.Pressure);
         panel.Draw(sheet);
         PageText.RowTitle(sheet, frame, $"Lowest pressure in the line, {unit.Sign} absolute");
-        PageText.TimeTitle(sheet, frame, axis);
-        var notes = new Notes(sheet, panel, xs, ys);
+        PageText.AxisTitle(sheet, frame,
+            axis.End > 0 ? $"time since the start, {axis.Unit.Sign}" : "at the start");
+        var notes = new Notes(sheet, panel);
+        notes.KeepClearOf(xs, ys);
         axis.MarkEnd(sheet, panel, notes);
         string name = LineProfile.IsLimitGiven(result.Job) ? "least pressure allowed" : "vapour pressure";
         notes.Reference(unit.From(limit), $"{name} {report.Format.Pressure(limit)}",
@@ -113,9 +122,7 @@ public static class RunPicture
         }
         SKPoint at = panel.At(axis.At(worst.Time), unit.From(pressure));
         sheet.Dot(at, 7, Palette.Pressure);
-        string margin = worst.Value > 1
-            ? $"{report.Format.Pressure(worst.Value)} above the limit"
-            : worst.Value < -1 ? $"{report.Format.Pressure(-worst.Value)} below the limit" : "at the limit";
+        string margin = PageText.Margin(report, "the limit");
         string when = axis.End > 0 ? ", " + MeasureFormat.Duration(worst.Time) : "";
         notes.Add(at, PageText.Note(Palette.Pressure), 300, true, "worst: " + margin,
             report.Format.Pressure(pressure) + when);

@@ -16,7 +16,7 @@ internal sealed class TimeAxis
         End = end;
         Unit = MeasureFormat.TimeUnit(end);
         most = end > 0 ? 1.04 * Unit.From(end) : 1;
-        ticks = end > 0 ? AxisTicks.Time(Unit, most, 10) : AxisTicks.Decimal(0, 0.5, 1);
+        ticks = end > 0 ? AxisTicks.Time(Unit, most, 10) : AxisTicks.None;
     }
 
     /// <summary>When the run stopped, s.</summary>
@@ -29,17 +29,18 @@ internal sealed class TimeAxis
     /// <param name="time">s</param>
     public double At(double time) => Unit.From(time);
 
-    /// <summary>The times of a course in the axis's unit.</summary>
-    public double[] Times(Course course) => course.Values(now => now.Time, Unit.Size);
+    /// <summary>The times of a course in the axis's unit; a run of no length spans the axis.</summary>
+    public double[] Times(Course course) => End > 0 ? course.Values(now => now.Time, Unit.Size) : [0, most];
 
     /// <summary>A panel over this axis.</summary>
     /// <param name="frame">where its data lie, px</param>
     /// <param name="vertical">its vertical range</param>
-    /// <param name="steps">most steps of the vertical ticks</param>
+    /// <param name="steps">most steps of the vertical ticks; 0 for none</param>
     public Panel Panel(SKRect frame, (double Least, double Most) vertical, int steps)
     {
         var panel = new Panel(frame, (0, most), vertical);
-        panel.SetTicks(ticks, AxisTicks.Decimal(vertical.Least, vertical.Most, steps));
+        panel.SetTicks(ticks,
+            steps > 0 ? AxisTicks.Decimal(vertical.Least, vertical.Most, steps) : AxisTicks.None);
         return panel;
     }
 

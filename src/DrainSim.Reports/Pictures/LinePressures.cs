@@ -1,0 +1,59 @@
+using DrainSim.Draining;
+using DrainSim.Lines;
+
+namespace DrainSim.Reports.Pictures;
+
+/// <summary>The pressure along the line of a run, at the start and at the worst moment.</summary>
+internal sealed class LinePressures
+{
+    private readonly LineHydraulics line;
+    private readonly Job job;
+
+    /// <summary>Compiles the line and takes both moments from a run.</summary>
+    public LinePressures(DrainResult result)
+    {
+        job = result.Job;
+        line = new LineHydraulics(job.Line, job.Liquid, job.Site.Gravity);
+        Start = result.Trace.At(0);
+        Worst = result.Trace.At(Math.Clamp(result.LeastMargin.Time, 0, result.Trace.End));
+        Distances = Along(node => node.Distance);
+        Elevations = Along(node => node.Elevation);
+        CrestIndex = line.CrestIndex;
+    }
+
+    /// <summary>The first moment.</summary>
+    public Instant Start { get; }
+
+    /// <summary>The moment of the least margin.</summary>
+    public Instant Worst { get; }
+
+    /// <summary>Developed lengths of the nodes from the inlet, m.</summary>
+    public double[] Distances { get; }
+
+    /// <summary>Elevations of the nodes above the tank's lowest inside point, m.</summary>
+    public double[] Elevations { get; }
+
+    /// <summary>The highest node.</summary>
+    public int CrestIndex { get; }
+
+    /// <summary>Pressures at the nodes at a moment, Pa absolute.</summary>
+    public double[] Pressures(Instant now)
+    {
+        double[] pressures = new double[line.NodeCount];
+        line.Pressures(now.Flow, now.Level, now.HeadspacePressure ?? job.Site.AtmosphericPressure, pressures);
+        return pressures;
+    }
+
+    /// <summary>
+    /// Elevations to which the liquid would stand in an open riser at each node, z + (p − p_atm)/(ρ·g), m.
+    /// </summary>
+    /// <param name="pressures">pressures at the nodes, Pa absolute</param>
+    public double[] Heads(double[] pressures)
+    {
+        double weight = job.Liquid.Density * job.Site.Gravity;
+        return [.. pressures.Zip(Elevations, (p, z) => z + (p - job.Site.AtmosphericPressure) / weight)];
+    }
+
+    private double[] Along(Func<LineNode, double> value) =>
+        [.. Enumerable.Range(0, line.NodeCount).Select(index => value(line.Node(index)))];
+}
