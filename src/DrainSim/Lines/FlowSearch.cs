@@ -2,17 +2,24 @@ namespace DrainSim.Lines;
 
 /// <summary>Finds the flow of one line that uses up a head on the way to a node.</summary>
 /// <remarks>
-/// Newton's method on ln(used) over ln q, where every term is a straight line of slope 1 to 3.4 in its regime, so
-/// that few turns are needed from anywhere. Around it stands a bracket from two quadratics that bound the loss from
-/// below (f at least 64/Re, and at least its fully rough limit; α at least 1) and from above (f at most
-/// 64/Re + f(4000); α at most 2). A step that leaves the bracket is replaced by its geometric middle. The square
-/// of a relative step is the error of its end, times less than 1 in a smooth regime: a step below
-/// <see cref="SmallStep"/> within one regime ends the search without evaluating the loss again.
+/// Newton's method on y = ln(used) over u = ln q, where every term is a straight line of slope 1 to 3.4 in its
+/// regime, so that few turns are needed from anywhere. From the second turn on, the curvature of the cubic through
+/// the last two points and their slopes is added:
+/// <code>
+/// step = m1·t + (2·m1 + m0 − 3·Δu/h)·t²/h        m = du/dy,  t = ln(head/used),  h = y1 − y0
+/// </code>
+/// Around it stands a bracket from two quadratics that bound the loss from below (f at least 64/Re, and at least
+/// its least value; α at least 1) and from above (f at most 64/Re + f(4000); α at most 2). A step that leaves the
+/// bracket is replaced by its geometric middle. Within one regime the error left by a step is below (t0·t1)², t at
+/// the two points, without a second point below t²: where that is under the last bit the loss is not evaluated again.
 /// </remarks>
 internal static class FlowSearch
 {
-    /// <summary>Relative step whose square is below the last bit.</summary>
-    private const double SmallStep = 1.5e-8;
+    /// <summary>Root of the last bit of a double.</summary>
+    private const double LastBitRoot = 1.5e-8;
+
+    /// <summary>Widest pair of points, in ln(used), whose cubic is trusted.</summary>
+    private const double WidestPair = 0.5;
 
     /// <summary>Head below which nothing is taken to flow, m.</summary>
     private const double LeastHead = 1e-100;
@@ -33,6 +40,7 @@ internal static class FlowSearch
             return 0;
         (double low, double high) = Bracket(losses.Steps[node], head);
         double q = guess > low && guess < high ? guess : Math.Sqrt(low * high);
+        double moved = double.NaN, before = 0, beforeInverse = 0, beforeT = 0;
         for (int turn = 0; turn < MostTurns; turn++)
         {
             double used = losses.Used(node, q, out double rise);
@@ -41,15 +49,24 @@ internal static class FlowSearch
                 high = q;
             else
                 low = q;
-            double step = LogRatio(head, used) * used / rise;
+            double inverse = used / rise;
+            double t = LogRatio(head, used);
+            double step = inverse * t;
+            double h = beforeT - t;
+            bool paired = double.IsFinite(moved) && Math.Abs(beforeT) < WidestPair && h != 0
+                && SameRegime(losses.Kinks, before, q);
+            if (paired)
+                step += (2 * inverse + beforeInverse - 3 * moved / h) * t * t / h;
             double next = q * Exp(step);
             bool inside = next >= low && next <= high;
-            if (inside && Math.Abs(step) < SmallStep && SameRegime(losses.Kinks, q, next))
+            double left = paired ? t * beforeT : t;
+            if (inside && Math.Abs(left) < LastBitRoot && SameRegime(losses.Kinks, q, next))
                 return next;
-            if (!inside || next == q)
-                next = Math.Sqrt(low * high);
             if (high - low <= 4e-16 * high)
                 return q;
+            (moved, before, beforeInverse, beforeT) = (step, q, inverse, t);
+            if (!inside || next == q)
+                (moved, next) = (double.NaN, Math.Sqrt(low * high));
             q = next;
         }
         return q;
@@ -62,7 +79,7 @@ internal static class FlowSearch
         double least = to.SquareToHere + to.Jet;
         double most = to.SquareToHere + 2 * to.Jet + to.LargestToHere;
         double low = Root(most, laminar, head);
-        double high = Math.Min(Root(least, laminar, head), Root(least + to.RoughToHere, to.LinearToHere, head));
+        double high = Math.Min(Root(least, laminar, head), Root(least + to.LeastToHere, to.LinearToHere, head));
         return (low * (1 - 1e-9), high * (1 + 1e-9));
     }
 

@@ -164,7 +164,7 @@ internal sealed class LineCompiler
             SquareToHere = before.SquareToHere + square,
             LinearToHere = before.LinearToHere + linear,
             LaminarToHere = before.LaminarToHere + laminarPipe,
-            RoughToHere = before.RoughToHere + friction.FullyRough * pipe,
+            LeastToHere = before.LeastToHere + friction.Least * pipe,
             LargestToHere = before.LargestToHere + friction.LargestTurbulent * pipe,
         });
         nodes.Add(new LineNode(name, item, place, elevation, distance, bore));

@@ -171,7 +171,7 @@ public sealed class LineHydraulics
     {
         var walk = new LossWalk(losses, flow / parallel);
         while (walk.MoveNext())
-            pressures[walk.Node] = gasPressure + weight * (surface - nodes[walk.Node].Elevation - walk.Used);
+            pressures[walk.Node] = gasPressure + weight * (surface - (nodes[walk.Node].Elevation + walk.Used));
     }
 
     /// <summary>The least absolute pressure over the nodes before the outlet, Pa.</summary>

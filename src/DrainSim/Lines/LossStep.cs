@@ -30,8 +30,8 @@ internal readonly record struct LossStep
     /// <summary>Σ of the laminar friction 64/(Re/q)·<see cref="Pipe"/> from the inlet, s/m².</summary>
     public required double LaminarToHere { get; init; }
 
-    /// <summary>Σ of the fully rough friction from the inlet, s²/m⁵: the least that turbulent flow uses.</summary>
-    public required double RoughToHere { get; init; }
+    /// <summary>Σ of the least friction factor at any Re from the inlet, s²/m⁵.</summary>
+    public required double LeastToHere { get; init; }
 
     /// <summary>Σ of the friction at Re 4000 from the inlet, s²/m⁵: with the laminar sum, the most it uses.</summary>
     public required double LargestToHere { get; init; }

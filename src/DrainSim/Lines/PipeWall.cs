@@ -30,7 +30,7 @@ internal readonly struct PipeWall
         ReynoldsPerFlow = reynoldsPerFlow;
         LargestTurbulent = Turbulent(FrictionFactor.TurbulentLimit, out _);
         bridgeSlope = (LargestTurbulent - LaminarEnd) / (FrictionFactor.TurbulentLimit - FrictionFactor.LaminarLimit);
-        FullyRough = FrictionFactor.FullyRough(relativeRoughness);
+        Least = Math.Min(FrictionFactor.FullyRough(relativeRoughness), LaminarEnd);
     }
 
     /// <summary>Reynolds number per flow of one line, s/m³.</summary>
@@ -39,8 +39,10 @@ internal readonly struct PipeWall
     /// <summary>The factor at Re 4000, the largest beyond the laminar limit, 1.</summary>
     public double LargestTurbulent { get; }
 
-    /// <summary>The factor at infinite Re, below every other, 1.</summary>
-    public double FullyRough { get; }
+    /// <summary>
+    /// What the factor never falls below, 1: its limit at infinite Re or, on a very rough wall, the end of laminar flow.
+    /// </summary>
+    public double Least { get; }
 
     /// <summary>The Darcy friction factor, 1, and its slope d ln f/d ln Re.</summary>
     public double Factor(double re, out double slope)

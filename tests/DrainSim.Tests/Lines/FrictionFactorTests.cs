@@ -11,7 +11,7 @@ namespace DrainSim.Tests.Lines;
 public sealed class FrictionFactorTests
 {
     [Theory]
-    [InlineData("colebrook_white", 57)]
+    [InlineData("colebrook_white", 58)]
     [InlineData("laminar", 5)]
     [InlineData("fully_rough", 4)]
     [InlineData("crane_fT", 8)]

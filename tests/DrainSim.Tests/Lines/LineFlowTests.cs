@@ -139,8 +139,7 @@ public sealed class LineFlowTests
         Assert.Equal(1e-3 / 2 / (Math.PI / 4 * 0.038 * 0.038), line.Velocity(1e-3), 1e-12);
         Assert.Equal(4, line.LargestVelocity(1e-3) / line.Velocity(1e-3), 1e-12);
         Assert.Equal(line.Velocity(1e-3) * 0.038 * 998.2 / 1.002e-3, line.Reynolds(1e-3), 1e-8);
-        Assert.Equal(4, line.RegimeFlows.Count);
-        Assert.Equal([1000, 2000, 2000, 4000], line.RegimeFlows.Select(line.Reynolds).Select(re => Math.Round(re, 9)).Order());
+        Assert.Equal([1000, 2000, 4000], line.RegimeFlows.Select(line.Reynolds).Select(re => Math.Round(re, 9)).Order());
     }
 
     [Fact]

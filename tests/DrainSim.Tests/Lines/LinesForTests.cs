@@ -57,11 +57,17 @@ internal static class LinesForTests
                 Roughness = roughness,
                 Parallel = parallel,
                 Inlet = new() { Elevation = 1, EdgeLoss = edge },
-                Path = path,
+                Path = new PrintedPath(path),
             });
 
     /// <summary>A flow over ten decades of Reynolds number in the line's own bore, its factor drawn at random.</summary>
     public static double FlowAt(LineHydraulics line, double logReynolds) => Math.Exp(logReynolds) / line.Reynolds(1);
 
     public static LineHydraulics Compile(this Line line, Liquid? liquid = null) => new(line, liquid ?? Water, Gravity);
+
+    /// <summary>A path that shows its items when a random case is printed.</summary>
+    private sealed class PrintedPath(IEnumerable<PathItem> items) : List<PathItem>(items)
+    {
+        public override string ToString() => string.Join(", ", this);
+    }
 }
