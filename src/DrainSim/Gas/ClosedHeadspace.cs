@@ -1,0 +1,4 @@
+namespace DrainSim.Gas;
+
+/// <summary>A headspace that no gas enters or leaves.</summary>
+public sealed record ClosedHeadspace : ConfinedHeadspace;
