@@ -12,6 +12,7 @@ namespace DrainSim.Lines;
 /// its least value; α at least 1) and from above (f at most 64/Re + f(4000); α at most 2). A step that leaves the
 /// bracket is replaced by its geometric middle. Within one regime the error left by a step is below (t0·t1)², t at
 /// the two points, without a second point below t²: where that is under the last bit the loss is not evaluated again.
+/// Where the loss rises less than in proportion (a jet just below Re 4000) its curvature is great, and more is asked.
 /// </remarks>
 internal static class FlowSearch
 {
@@ -59,8 +60,9 @@ internal static class FlowSearch
                 step += (2 * inverse + beforeInverse - 3 * moved / h) * t * t / h;
             double next = q * Exp(step);
             bool inside = next >= low && next <= high;
-            double left = paired ? t * beforeT : t;
-            if (inside && Math.Abs(left) < LastBitRoot && SameRegime(losses.Kinks, q, next))
+            double left = Math.Abs(paired ? t * beforeT : t);
+            double small = inverse > 1 ? LastBitRoot * LastBitRoot : LastBitRoot;
+            if (inside && left < small && SameRegime(losses.Kinks, q, next))
                 return next;
             if (high - low <= 4e-16 * high)
                 return q;
