@@ -14,6 +14,8 @@ public static class Nearest
     /// <param name="known">the words that would have been right; the first of equals is taken</param>
     public static string? Find(string text, IEnumerable<string> known)
     {
+        ArgumentNullException.ThrowIfNull(text);
+        ArgumentNullException.ThrowIfNull(known);
         if (text.Length is 0 or > LongestWord)
             return null;
         string? best = null;
@@ -32,7 +34,7 @@ public static class Nearest
     /// Letters to insert, delete, replace or swap with a neighbour so that one word becomes the
     /// other: the optimal string alignment distance (Damerau 1964, each letter edited once).
     /// </summary>
-    public static int Edits(string a, string b)
+    internal static int Edits(string a, string b)
     {
         int[,] d = new int[a.Length + 1, b.Length + 1];
         for (int i = 0; i <= a.Length; i++)

@@ -6,33 +6,29 @@ namespace DrainSim.Scenarios;
 /// <summary>The problems of one scenario as text for people.</summary>
 public static class ProblemReport
 {
-    /// <summary>Most problems that are printed; the closing line counts all.</summary>
-    public const int MostShown = 50;
-
-    /// <summary>Every problem with its line and a caret, and a closing line; lines end in a line feed.</summary>
-    /// <param name="scenarioFile">the scenario's file as the user named it</param>
-    /// <param name="problems">the refusals, in file order; at least one</param>
-    public static string Refusal(string scenarioFile, IReadOnlyList<Problem> problems)
+    /// <summary>Every problem with its line and a caret, and a closing line; empty when there is no problem.</summary>
+    /// <param name="reading">the reading of the file</param>
+    public static string Refusal(ScenarioReading reading)
     {
-        ArgumentNullException.ThrowIfNull(problems);
-        StringBuilder text = new(Entries(scenarioFile, problems));
-        string count = problems.Count == 1
-            ? "1 problem"
-            : string.Create(CultureInfo.InvariantCulture, $"{problems.Count} problems");
-        string shown = problems.Count > MostShown
-            ? string.Create(CultureInfo.InvariantCulture, $", the first {MostShown} shown")
+        ArgumentNullException.ThrowIfNull(reading);
+        if (!reading.IsRefused)
+            return "";
+        int count = reading.Problems.Count + reading.Untold;
+        string problems = count == 1 ? "1 problem" : string.Create(CultureInfo.InvariantCulture, $"{count} problems");
+        string shown = reading.Untold > 0
+            ? string.Create(CultureInfo.InvariantCulture, $", {reading.Problems.Count} of them shown")
             : "";
-        return text.Append(count).Append(shown).Append(". Nothing was run and nothing was written.\n").ToString();
+        return $"{Entries(reading.FileName, reading.Problems)}{problems}{shown}. Nothing was run and nothing was written.\n";
     }
 
-    /// <summary>Every problem or warning with its line and a caret; lines end in a line feed.</summary>
+    /// <summary>Problems or warnings, each with its line and a caret; lines end in a line feed.</summary>
     /// <param name="scenarioFile">the scenario's file as the user named it</param>
     /// <param name="problems">problems or warnings, in file order</param>
     public static string Entries(string scenarioFile, IReadOnlyList<Problem> problems)
     {
         ArgumentNullException.ThrowIfNull(problems);
         StringBuilder text = new();
-        foreach (Problem problem in problems.Take(MostShown))
+        foreach (Problem problem in problems)
         {
             text.Append(problem.Text(scenarioFile)).Append('\n');
             if (problem.Excerpt is not { } excerpt)

@@ -268,7 +268,17 @@ public static class Quantities
         Units = [Row("1", 1, "the number itself"), Row("%", 1e-2, "1/100")],
     };
 
-    /// <summary>All quantities, in the order of the table.</summary>
+    /// <summary>Flow coefficients of valves: bare numbers, the units being those of Kv or Cv.</summary>
+    public static Quantity FlowCoefficient { get; } = new()
+    {
+        Name = "flow coefficient",
+        SiUnit = "1",
+        Examples = "12 or 3.5",
+        IsBareNumberRead = true,
+        Units = [Row("1", 1, "the number itself: Kv in m3/h at 1 bar, Cv in US gal/min at 1 psi")],
+    };
+
+    /// <summary>All quantities with units, in the order of the table.</summary>
     public static IReadOnlyList<Quantity> All { get; } =
     [
         Length, Area, Volume, Flow, Time, Pressure, Density, Viscosity, KinematicViscosity,

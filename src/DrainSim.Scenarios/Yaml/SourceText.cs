@@ -10,6 +10,18 @@ internal sealed class SourceText(string text)
 
     private readonly string[] lines = text.ReplaceLineEndings("\n").Split('\n');
 
+    /// <summary>The first character that no text has, such as a NUL; null when there is none.</summary>
+    public Position? FindControlCharacter()
+    {
+        for (int line = 0; line < lines.Length; line++)
+        {
+            int column = lines[line].AsSpan().IndexOfAnyInRange('\u0000', '\u0008');
+            if (column >= 0)
+                return new Position(line + 1, column + 1);
+        }
+        return null;
+    }
+
     /// <summary>The problem with the line that it points to, made printable.</summary>
     public Problem Show(Problem problem)
     {

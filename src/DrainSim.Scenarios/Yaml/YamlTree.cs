@@ -17,6 +17,7 @@ internal sealed class YamlTree
     private readonly Parser parser;
     private readonly List<Problem> problems;
     private readonly Stack<Position> openBrackets = [];
+    private readonly Stack<string> keys = [];
     private int depth;
 
     private YamlTree(string text, List<Problem> problems)
@@ -122,12 +123,14 @@ internal sealed class YamlTree
                 throw new YamlRefusal(At(e.Start), "a list or a block stands where a key should be", "A key is one word");
             if (key is { Text: "<<", IsQuoted: false })
                 throw new YamlRefusal(key.At, "merge keys are not read", "Write the keys out");
+            keys.Push(Quote.Plain(key.Text));
             Node value = Node(Next());
             if (seen.TryAdd(key.Text, key.At))
                 entries.Add(new Entry(key.Text, key.At, value));
             else
-                problems.Add(new Problem(key.At.Line, key.At.Column, Quote.Plain(key.Text),
+                problems.Add(new Problem(key.At.Line, key.At.Column, string.Join('.', keys.Reverse()),
                     $"the key stands twice, first in line {seen[key.Text].Line}", "Each key stands once"));
+            keys.Pop();
         }
         return new BlockNode(entries, at);
     }
