@@ -6,4 +6,6 @@ namespace DrainSim.Draining;
 /// <param name="Level">level in the tank, m</param>
 /// <param name="Volume">volume in the tank, m³</param>
 /// <param name="Number">the number that belongs to the code, 0 where it has none</param>
-public readonly record struct DrainEvent(double Time, EventCode Code, double Level, double Volume, double Number);
+/// <param name="Line">index of the line that it happened to; 0 for what concerns the tank</param>
+public readonly record struct DrainEvent(
+    double Time, EventCode Code, double Level, double Volume, double Number, int Line = 0);

@@ -60,6 +60,24 @@ public sealed record DrainResult
     /// <summary>What makes the result less sure.</summary>
     public required IReadOnlyList<RunWarning> Warnings { get; init; }
 
+    /// <summary>What was found for each line, in the order of the job.</summary>
+    public required IReadOnlyList<LineResult> Lines { get; init; }
+
+    /// <summary>The bounds of the job, kept or broken; empty where it has none.</summary>
+    public IReadOnlyList<LimitCheck> LimitChecks { get; init; } = [];
+
+    /// <summary>Largest vacuum in the headspace, Pa below the atmosphere, and when; null where the tank is open.</summary>
+    public Extreme? LargestVacuum { get; init; }
+
+    /// <summary>Level at which the inflow and the outflow balance, m; null where there is no inflow or no such level.</summary>
+    public double? BalanceLevel { get; init; }
+
+    /// <summary>Depth in the first receiving tank when the run stopped, m; null where there is none.</summary>
+    public double? ReceiverLevel { get; init; }
+
+    /// <summary>Pressure in the headspace when the run stopped, Pa absolute; null where the tank is open.</summary>
+    public double? HeadspacePressure { get; init; }
+
     /// <summary>What would let it go on; empty where nothing is needed or nothing helps.</summary>
     public IReadOnlyList<Remedy> Remedies { get; init; } = [];
 

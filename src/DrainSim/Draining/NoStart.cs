@@ -12,6 +12,9 @@ public enum NoStart
     /// <summary>The column over the crest is higher than the atmosphere can hold.</summary>
     LiftBeyondLimit,
 
+    /// <summary>The liquid's front in the outer leg does not stand below the level.</summary>
+    NoPrime,
+
     /// <summary>A valve on the line is shut.</summary>
     ValveShut,
 }

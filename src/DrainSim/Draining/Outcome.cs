@@ -12,8 +12,26 @@ public enum Outcome
     /// <summary>The low point reached the vapour pressure or the least pressure allowed.</summary>
     VapourBreak,
 
+    /// <summary>A vent on the line was uncovered.</summary>
+    AirBreak,
+
     /// <summary>The driving head is used up: level with the outlet or with the receiver.</summary>
     Levelled,
+
+    /// <summary>The closed headspace holds the liquid up.</summary>
+    VacuumHeld,
+
+    /// <summary>The driving head no longer exceeds the liquid's yield stress.</summary>
+    YieldHeld,
+
+    /// <summary>The inflow equals the outflow.</summary>
+    Balanced,
+
+    /// <summary>The receiver reached its brim.</summary>
+    ReceiverFull,
+
+    /// <summary>More ran in than out until the tank ran over.</summary>
+    Overflowed,
 
     /// <summary>The level or the volume asked for was reached.</summary>
     TargetReached,

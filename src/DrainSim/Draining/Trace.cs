@@ -1,19 +1,55 @@
+using MathNet.Numerics.RootFinding;
+
 namespace DrainSim.Draining;
 
 /// <summary>The course of a run, continuous in time.</summary>
-public abstract class Trace
+public sealed class Trace
 {
+    private readonly Func<double, Instant> at;
+    private readonly Func<double, double> volumeAt;
+
+    /// <param name="knots">times that bound smooth pieces, rising, the first 0, the last the end of the run, s</param>
+    /// <param name="at">the state at a time between them</param>
+    /// <param name="volumeAt">the volume in the tank, m³, at a time between them; cheaper than the whole state</param>
+    public Trace(IReadOnlyList<double> knots, Func<double, Instant> at, Func<double, double> volumeAt)
+    {
+        ArgumentNullException.ThrowIfNull(knots);
+        ArgumentOutOfRangeException.ThrowIfZero(knots.Count, nameof(knots));
+        (Knots, this.at, this.volumeAt) = (knots, at, volumeAt);
+    }
+
     /// <summary>When the run stopped, s.</summary>
-    public abstract double End { get; }
+    public double End => Knots[^1];
 
     /// <summary>Times of the integrator's steps and of the events, rising, the first 0 and the last <see cref="End"/>, s.</summary>
-    public abstract IReadOnlyList<double> Knots { get; }
+    public IReadOnlyList<double> Knots { get; }
 
     /// <summary>The state at a time; the flow is solved anew for it.</summary>
     /// <param name="time">since the start, s; from 0 to <see cref="End"/></param>
-    public abstract Instant At(double time);
+    /// <exception cref="ArgumentOutOfRangeException">the time lies outside the run</exception>
+    public Instant At(double time) => at(Require.Within(time, 0, End, "time", "s"));
 
-    /// <summary>When the volume had fallen to a value, s; null when it never did.</summary>
+    /// <summary>When the volume first fell to a value, s; null when it never did.</summary>
     /// <param name="volume">volume in the tank, m³</param>
-    public abstract double? TimeAtVolume(double volume);
+    public double? TimeAtVolume(double volume)
+    {
+        if (volumeAt(0) <= volume)
+            return volumeAt(0) == volume ? 0 : null;
+        for (int i = 1; i < Knots.Count; i++)
+        {
+            double last = volumeAt(Knots[i]);
+            if (last == volume)
+                return Knots[i];
+            if (last < volume)
+                return TimeWithin(Knots[i - 1], Knots[i], volume);
+        }
+
+        return null;
+    }
+
+    private double TimeWithin(double from, double to, double volume)
+    {
+        double scale = volumeAt(from) - volumeAt(to);
+        return Brent.TryFindRoot(t => (volumeAt(t) - volume) / scale, from, to, 1e-14, 100, out double root) ? root : to;
+    }
 }

@@ -12,6 +12,27 @@ public enum WarningCode
     /// <summary>Much of the run is in the transition; the number is <see cref="SteadinessCheck.TransitionShare"/>.</summary>
     TransitionFlow,
 
+    /// <summary>Air may be drawn into the inlet from some moment on; the number is the submergence then, m.</summary>
+    AirMayBeDrawn,
+
+    /// <summary>The headspace passed the tank's vacuum rating; the number is the largest vacuum, Pa.</summary>
+    VacuumRatingPassed,
+
+    /// <summary>The headspace passed the tank's pressure rating; the number is the largest overpressure, Pa.</summary>
+    PressureRatingPassed,
+
+    /// <summary>The low point passed the hose's vacuum rating; the number is the largest vacuum there, Pa.</summary>
+    HoseMayFlatten,
+
+    /// <summary>
+    /// The low point stays below a third of an atmosphere for long, so that dissolved gas may gather at the crest; low
+    /// confidence; the number is the share of the run, 1.
+    /// </summary>
+    GasMayGather,
+
+    /// <summary>The inflow is more than the line ever carries at this level; the number is the inflow that it could carry, m³/s.</summary>
+    NeverEmpties,
+
     /// <summary>The least margin at the low point is thin; the number is the margin, Pa.</summary>
     ThinMargin,
 }

@@ -11,4 +11,14 @@ public sealed record Inlet
 
     /// <summary>Loss coefficient of the edge on the velocity head in the line's first bore, 1; at least 0.</summary>
     public double EdgeLoss { get; init => field = Require.NotNegative(value, "inlet loss", ""); } = 0.78;
+
+    /// <summary>Height of a rim that looks down above the floor, m; null where it is not known.</summary>
+    public double? FloorClearance
+    {
+        get;
+        init => field = value is { } clearance ? Require.Positive(clearance, "floor clearance", "m") : null;
+    }
+
+    /// <summary>What follows when the submergence no longer keeps air out.</summary>
+    public AirDraw AirDraw { get; init; } = AirDraw.Warn;
 }

@@ -36,4 +36,14 @@ public sealed record Line
         get;
         init => field = value is { } pressure ? Require.NotNegative(pressure, "least pressure", "Pa") : null;
     }
+
+    /// <summary>Elevation of a hole or vent on the line, below which the level lets air in, m; null for none.</summary>
+    public double? AirBreak { get; init => field = value is { } hole ? Require.NotNegative(hole, "air break", "m") : null; }
+
+    /// <summary>Vacuum that the hose stands before it flattens, Pa below the atmosphere; null where it is not known.</summary>
+    public double? VacuumRating
+    {
+        get;
+        init => field = value is { } rating ? Require.NotNegative(rating, "hose vacuum rating", "Pa") : null;
+    }
 }

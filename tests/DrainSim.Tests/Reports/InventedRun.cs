@@ -62,29 +62,33 @@ internal sealed record InventedRun
         },
         Vessel = new StraightTank(Area, Math.Max(3.0, StartLevel)),
         Level = StartLevel,
-        Line = new Line
-        {
-            Bore = 0.038,
-            Roughness = 1.5e-6,
-            Inlet = new Inlet { Elevation = 0.05 },
-            LeastPressure = LeastPressure,
-            Path =
-            [
-                new StraightRun { Length = Math.Abs(CrestElevation - 0.05) + 0.1, Rise = CrestElevation - 0.05 },
-                new StraightRun
-                {
-                    Length = Math.Abs(OutletElevation - CrestElevation) + 1.35,
-                    Rise = OutletElevation - CrestElevation,
-                },
-            ],
-        },
-        ReceiverSurface = ReceiverSurface,
+        DrawOffs = [new DrawOff { Line = TheLine, Receiver = TheReceiver }],
         Run = Run,
+    };
+
+    private FixedSurface? TheReceiver =>
+        ReceiverSurface is { } surface ? new FixedSurface { Elevation = surface } : null;
+
+    private Line TheLine => new()
+    {
+        Bore = 0.038,
+        Roughness = 1.5e-6,
+        Inlet = new Inlet { Elevation = 0.05 },
+        LeastPressure = LeastPressure,
+        Path =
+        [
+            new StraightRun { Length = Math.Abs(CrestElevation - 0.05) + 0.1, Rise = CrestElevation - 0.05 },
+            new StraightRun
+            {
+                Length = Math.Abs(OutletElevation - CrestElevation) + 1.35,
+                Rise = OutletElevation - CrestElevation,
+            },
+        ],
     };
 
     public DrainResult Result()
     {
-        var trace = new EvenRootTrace(this);
+        var trace = new EvenRootCourse(this).ToTrace();
         Instant first = trace.At(0);
         Instant last = trace.At(trace.End);
         return new DrainResult
@@ -108,6 +112,7 @@ internal sealed record InventedRun
             Steadiness = new SteadinessCheck(0.002, 1e-5, 0),
             Warnings = Warnings,
             Remedies = Remedies,
+            Lines = [],
             Counters = new Counters(21, 2, 140, 161, 60),
         };
     }
@@ -127,7 +132,7 @@ internal sealed record InventedRun
         return new DrainEvent(last.Time, code, last.Level, last.Volume, 0);
     }
 
-    private static IEnumerable<DrainEvent> Tenths(EvenRootTrace trace)
+    private static IEnumerable<DrainEvent> Tenths(Trace trace)
     {
         double whole = trace.At(0).Volume;
         for (int tenth = 1; tenth < 10; tenth++)
@@ -153,15 +158,15 @@ internal sealed record InventedRun
         public override double Level(double volume) => Math.Clamp(volume / Section, 0, Tall);
     }
 
-    private sealed class EvenRootTrace(InventedRun run) : Trace
+    private sealed class EvenRootCourse(InventedRun run)
     {
-        public override double End => run.Outcome == Outcome.NeverStarted ? 0 : run.End;
-
-        public override IReadOnlyList<double> Knots => End > 0 ? [0, End / 3, End] : [0];
+        private double End => run.Outcome == Outcome.NeverStarted ? 0 : run.End;
 
         private double Slope => End > 0 ? (Math.Sqrt(run.StartLevel) - Math.Sqrt(run.EndLevel)) / End : 0;
 
-        public override Instant At(double time)
+        public Trace ToTrace() => new(End > 0 ? [0, End / 3, End] : [0], At, time => At(time).Volume);
+
+        private Instant At(double time)
         {
             double root = Math.Sqrt(run.StartLevel) - Slope * time;
             double level = root * root;
@@ -182,18 +187,6 @@ internal sealed record InventedRun
                 LowPointMargin = pressure - Math.Max(run.VapourPressure, run.LeastPressure ?? 0),
                 ReceiverLevel = run.ReceiverLevel,
             };
-        }
-
-        public override double? TimeAtVolume(double volume)
-        {
-            double first = run.Area * run.StartLevel;
-            if (volume >= first)
-            {
-                return 0;
-            }
-            return Slope > 0 && volume >= run.Area * run.EndLevel
-                ? (Math.Sqrt(run.StartLevel) - Math.Sqrt(volume / run.Area)) / Slope
-                : null;
         }
     }
 }

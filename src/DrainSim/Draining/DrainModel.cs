@@ -1,0 +1,405 @@
+using System.Diagnostics;
+using DrainSim.Integration;
+using DrainSim.Vessels;
+
+namespace DrainSim.Draining;
+
+/// <summary>The balance of a tank, its lines, their receivers and its gas, as the integrator steps it.</summary>
+/// <remarks>
+/// State: y[i] is the volume that line i has taken out of the tank, m³, so that its slope is the line's flow, the volume in
+/// the tank is V = V₀ + ∫inflow − Σy[i] and that in a receiver Vr₀ + y[i]: the balance closes by construction. Where gas
+/// comes and goes its mass, kg, is the last component.
+/// </remarks>
+internal sealed class DrainModel : IOdeSystem, IEventSet
+{
+    private readonly Vessel vessel;
+    private readonly RunSettings run;
+    private readonly double atmosphere;
+    private readonly bool hasMass;
+    private readonly Watch[] watches;
+    private readonly double[] guesses;
+    private readonly List<Epoch> epochs;
+    private readonly Plant[] plantsAfter;
+    private Epoch now;
+
+    /// <param name="plant">the plant at the start</param>
+    /// <param name="modes">how its lines work at the start</param>
+    public DrainModel(Plant plant, LineMode[] modes)
+    {
+        Job = plant.Job;
+        (vessel, run, atmosphere) = (Job.Vessel, Job.Run, Job.Site.AtmosphericPressure);
+        LineCount = plant.Lines.Length;
+        StartVolume = vessel.Volume(Job.Level);
+        plantsAfter = [.. Job.Timeline.Select(act => new Plant(act.After))];
+        hasMass = plant.Gas.Breathes || (plantsAfter.Length > 0 && plantsAfter.Append(plant).Any(p => p.Gas.IsConfined));
+        StartMass = plant.Gas.StartMass;
+        guesses = new double[LineCount];
+        watches = WatchList.Of(plant, TargetVolume);
+        now = new Epoch(0, plant, modes, 0);
+        epochs = [now];
+    }
+
+    /// <summary>The job.</summary>
+    public Job Job { get; }
+
+    /// <summary>Number of lines.</summary>
+    public int LineCount { get; }
+
+    /// <summary>Volume in the tank at the start, m³.</summary>
+    public double StartVolume { get; }
+
+    /// <summary>Mass of gas over the liquid at the start, kg.</summary>
+    public double StartMass { get; }
+
+    /// <summary>Solutions of a line for its flow so far.</summary>
+    public long FlowSolutions { get; private set; }
+
+    /// <summary>The stretches of the run so far, in time order.</summary>
+    public IReadOnlyList<Epoch> Epochs => epochs;
+
+    /// <inheritdoc/>
+    public int Dimension => LineCount + (hasMass ? 1 : 0);
+
+    /// <inheritdoc/>
+    public int EventCount => watches.Length;
+
+    /// <summary>What the event functions watch, in the order of their indices.</summary>
+    public IReadOnlyList<Watch> Watches => watches;
+
+    /// <summary>Whether the gas over the liquid decides how stiff the balance is.</summary>
+    public bool IsStiff => hasMass;
+
+    private double? TargetVolume => (run.StopAtLevel, run.StopAtVolume) switch
+    {
+        ({ } level, { } volume) => Math.Max(vessel.Volume(level), volume),
+        ({ } level, null) => vessel.Volume(level),
+        (null, { } volume) => volume,
+        _ => null,
+    };
+
+    /// <summary>Writes the state at the start.</summary>
+    public void StartState(Span<double> y)
+    {
+        y.Clear();
+        if (hasMass)
+            y[LineCount] = StartMass;
+    }
+
+    /// <summary>The stretch that a time belongs to; at a restart the one before it.</summary>
+    /// <param name="t">time, s</param>
+    public Epoch EpochAt(double t)
+    {
+        int i = epochs.Count - 1;
+        while (i > 0 && epochs[i].From >= t)
+            i--;
+        return epochs[i];
+    }
+
+    /// <summary>Volume in the tank, m³.</summary>
+    public double Volume(Epoch epoch, double t, ReadOnlySpan<double> y)
+    {
+        double volume = StartVolume + epoch.InflowVolume(t);
+        for (int i = 0; i < LineCount; i++)
+            volume -= y[i];
+        return Math.Clamp(volume, 0, vessel.Capacity);
+    }
+
+    /// <summary>Pressure on the liquid, Pa absolute.</summary>
+    public double GasPressure(Epoch epoch, double volume, ReadOnlySpan<double> y) =>
+        epoch.Plant.Gas.Pressure(volume, hasMass ? y[LineCount] : StartMass);
+
+    /// <summary>Flow of a line out of the tank, solved for, m³/s.</summary>
+    public double Flow(Epoch epoch, int line, double surface, double gas, double delivered, bool limited)
+    {
+        if (!epoch.Modes[line].IsAtWork)
+            return 0;
+        FlowSolutions++;
+        double flow = epoch.Plant.Lines[line].Flow(new LineConditions(surface, gas, delivered, limited), guesses[line]);
+        if (flow != 0)
+            guesses[line] = flow;
+        return flow;
+    }
+
+    /// <summary>The state of the job at a time, the flows solved anew.</summary>
+    /// <param name="t">time, s</param>
+    /// <param name="y">state then</param>
+    public Instant At(double t, ReadOnlySpan<double> y)
+    {
+        Epoch epoch = EpochAt(t);
+        double volume = Volume(epoch, t, y), surface = vessel.Level(volume), gas = GasPressure(epoch, volume, y);
+        Span<double> flows = stackalloc double[LineCount];
+        for (int i = 0; i < LineCount; i++)
+            flows[i] = Flow(epoch, i, surface, gas, y[i], epoch.Modes[i].IsLimited);
+        return At(t, y, flows);
+    }
+
+    /// <summary>The state of the job at a time, for flows that are known.</summary>
+    /// <param name="t">time, s</param>
+    /// <param name="y">state then</param>
+    /// <param name="flows">flow of each line then, m³/s</param>
+    public Instant At(double t, ReadOnlySpan<double> y, ReadOnlySpan<double> flows)
+    {
+        Epoch epoch = EpochAt(t);
+        double volume = Volume(epoch, t, y), surface = vessel.Level(volume), gas = GasPressure(epoch, volume, y);
+        (double pressure, double margin) = LowPoint(epoch, surface, gas, flows);
+        CompiledLine first = epoch.Plant.Lines[0];
+        double total = 0;
+        foreach (double flow in flows[..LineCount])
+            total += flow;
+        return new Instant
+        {
+            Time = t,
+            Level = surface,
+            Volume = volume,
+            Flow = total,
+            Velocity = first.Hydraulics.Velocity(flows[0]),
+            Reynolds = first.Hydraulics.Reynolds(Math.Abs(flows[0])),
+            Head = first.Head(surface, gas, y[0]),
+            LowPointPressure = pressure,
+            LowPointMargin = margin,
+            ReceiverLevel = ReceiverLevel(epoch, y),
+            HeadspacePressure = Job.Headspace is Gas.OpenHeadspace ? null : gas,
+            LineFlows = LineCount > 1 ? flows[..LineCount].ToArray() : null,
+        };
+    }
+
+    /// <inheritdoc/>
+    public void Derivative(double t, ReadOnlySpan<double> y, Span<double> dydt)
+    {
+        double volume = Volume(now, t, y), surface = vessel.Level(volume), gas = GasPressure(now, volume, y);
+        for (int i = 0; i < LineCount; i++)
+            dydt[i] = Flow(now, i, surface, gas, y[i], now.Modes[i].IsLimited);
+        if (hasMass)
+            dydt[LineCount] = now.Plant.Gas.MassFlow(gas);
+    }
+
+    /// <summary>
+    /// The tolerance is meant for the clock: an error in a delivered volume is measured against what the flow moves in
+    /// the time since the start and what is still to come, so that the last centimetres of a head that goes to zero are
+    /// timed as well as the first.
+    /// </summary>
+    public void ErrorScale(double t, ReadOnlySpan<double> y, ReadOnlySpan<double> dydt, Span<double> scale)
+    {
+        double volume = Volume(now, t, y), surface = vessel.Level(volume), gas = GasPressure(now, volume, y);
+        for (int i = 0; i < LineCount; i++)
+        {
+            CompiledLine line = now.Plant.Lines[i];
+            double toRest = vessel.Area(surface) * Math.Abs(line.Head(surface, gas, y[i]));
+            double toAir = Math.Max(0, volume - line.UncoverVolume);
+            scale[i] = Math.Max(1e-12 * vessel.Capacity, Math.Abs(dydt[i]) * t + Math.Min(toRest, toAir));
+        }
+
+        if (hasMass)
+            scale[LineCount] = Math.Max(y[LineCount], 1e-9 * StartMass);
+    }
+
+    /// <inheritdoc/>
+    public double LargestStep(double t, ReadOnlySpan<double> y, ReadOnlySpan<double> dydt) => double.PositiveInfinity;
+
+    /// <inheritdoc/>
+    public void EventValues(double t, ReadOnlySpan<double> y, ReadOnlySpan<double> dydt, Span<double> values)
+    {
+        double volume = Volume(now, t, y), surface = vessel.Level(volume);
+        double unclamped = StartVolume + now.InflowVolume(t);
+        for (int i = 0; i < LineCount; i++)
+            unclamped -= y[i];
+        var moment = new Moment(t, unclamped, surface, GasPressure(now, volume, y));
+        for (int i = 0; i < watches.Length; i++)
+            values[i] = Value(watches[i], moment, y, dydt);
+    }
+
+    /// <inheritdoc/>
+    public EventRule Rule(int index)
+    {
+        Watch watch = watches[index];
+        EventAction action = watch.Kind switch
+        {
+            WatchKind.TargetReached or WatchKind.TankBrims or WatchKind.AllSettle or WatchKind.FlowsBalance => EventAction.Stop,
+            WatchKind.VacuumRatingPasses or WatchKind.PressureRatingPasses => EventAction.Record,
+            WatchKind.SectionPasses or WatchKind.ActFalls or WatchKind.InflowTurns => EventAction.Restart,
+            _ when !now.Modes[watch.Line].IsAtWork => EventAction.Ignore,
+            WatchKind.BoreUncovers => EventAction.Record,
+            WatchKind.LiftExhausts when !now.Modes[watch.Line].IsLimited => EventAction.Ignore,
+            WatchKind.HeadSettles when !EndsAtRest(watch.Line) => EventAction.Ignore,
+            _ => EventAction.Restart,
+        };
+        bool bothWays = watch.Kind == WatchKind.MarginVanishes && now.Plant.Lines[watch.Line].HoldsAtVapour;
+        return new EventRule(bothWays ? EventDirection.Either : Direction(watch.Kind), action);
+    }
+
+    /// <inheritdoc/>
+    public bool OnRestart(int index, double t, Span<double> y)
+    {
+        Watch watch = watches[index];
+        LineMode mode = now.Modes[watch.Line];
+        if (watch.Kind == WatchKind.ActFalls)
+            Begin(AfterAct(watch.Ordinal, t, y));
+        else if (watch.Kind == WatchKind.MarginVanishes && now.Plant.Lines[watch.Line].HoldsAtVapour)
+            Begin(now.With(t, watch.Line, mode with { IsLimited = !mode.IsLimited }));
+        else if (EndingOf(watch, t, y) is { } ending)
+            Begin(now.With(t, watch.Line, mode with { Ending = ending, EndedAt = t }));
+        return now.Modes.Any(m => m.IsAtWork);
+    }
+
+    /// <summary>How the line of a watch ends when it fires; null where it does not end.</summary>
+    public Outcome? EndingOf(Watch watch, double t, ReadOnlySpan<double> y) => watch.Kind switch
+    {
+        WatchKind.InletUncovers => HoldsHeel(watch.Line) ? Outcome.InletUncovered : Outcome.Emptied,
+        WatchKind.AirDrawn => Outcome.InletUncovered,
+        WatchKind.AirBreakUncovers => Outcome.AirBreak,
+        WatchKind.MarginVanishes or WatchKind.LiftExhausts => Outcome.VapourBreak,
+        WatchKind.HeadSettles => RestOf(watch.Line, t, y),
+        WatchKind.ReceiverBrims => Outcome.ReceiverFull,
+        _ => null,
+    };
+
+    private static EventDirection Direction(WatchKind kind) => kind switch
+    {
+        WatchKind.RegimePasses or WatchKind.SectionPasses or WatchKind.OutletCovers
+            or WatchKind.BoreUncovers => EventDirection.Either,
+        WatchKind.ReceiverBrims or WatchKind.VacuumRatingPasses or WatchKind.PressureRatingPasses or WatchKind.TankBrims
+            or WatchKind.InflowTurns => EventDirection.Rising,
+        _ => EventDirection.Falling,
+    };
+
+    /// <summary>The line with the least margin: its low point's pressure and margin, Pa.</summary>
+    private (double Pressure, double Margin) LowPoint(Epoch epoch, double surface, double gas, ReadOnlySpan<double> flows)
+    {
+        (double Pressure, double Margin) least = (double.PositiveInfinity, double.PositiveInfinity);
+        bool anyAtWork = epoch.LinesAtWork > 0;
+        for (int i = 0; i < LineCount; i++)
+        {
+            CompiledLine line = epoch.Plant.Lines[i];
+            double margin = line.Margin(flows[i], surface, gas);
+            if (margin < least.Margin && (epoch.Modes[i].IsAtWork || !anyAtWork))
+                least = (margin + line.Threshold, margin);
+        }
+
+        return least;
+    }
+
+    private double? ReceiverLevel(Epoch epoch, ReadOnlySpan<double> y)
+    {
+        for (int i = 0; i < LineCount; i++)
+        {
+            if (epoch.Plant.Lines[i].ReceiverDepth(y[i]) is { } depth)
+                return depth;
+        }
+
+        return null;
+    }
+
+    private void Begin(Epoch next)
+    {
+        epochs.Add(next);
+        now = next;
+    }
+
+    private Epoch AfterAct(int ordinal, double t, Span<double> y)
+    {
+        Plant after = plantsAfter[ordinal];
+        if (hasMass && after.Gas.IsConfined && !now.Plant.Gas.IsConfined)
+            y[LineCount] = after.Gas.MassAt(GasPressure(now, Volume(now, t, y), y), Volume(now, t, y));
+        return now.With(t, after);
+    }
+
+    private bool HoldsHeel(int line) =>
+        now.Plant.Lines[line].Hydraulics.InletElevation > Math.Max(run.SettledWithin, 0);
+
+    /// <summary>A line ends at rest when it hangs in the air, or when nothing else can move the surfaces again.</summary>
+    private bool EndsAtRest(int line)
+    {
+        CompiledLine compiled = now.Plant.Lines[line];
+        bool isAlone = now.LinesAtWork == 1 && now.Plant.Job.Inflow is null;
+        return isAlone || (compiled.DrawOff.Receiver is null && compiled.Hydraulics.RisesAboveInlet);
+    }
+
+    private Outcome RestOf(int line, double t, ReadOnlySpan<double> y)
+    {
+        double volume = Volume(now, t, y), surface = vessel.Level(volume);
+        double liquidHead = surface - now.Plant.Lines[line].OutletLevel(y[line]);
+        if (now.Plant.Gas.IsConfined && liquidHead > 2 * run.SettledWithin)
+            return Outcome.VacuumHeld;
+        return !HoldsHeel(line) && surface <= 2 * run.SettledWithin ? Outcome.Emptied : Outcome.Levelled;
+    }
+
+    private double Value(Watch watch, in Moment at, ReadOnlySpan<double> y, ReadOnlySpan<double> dydt)
+    {
+        CompiledLine line = now.Plant.Lines[watch.Line];
+        double delivered = y[watch.Line], flow = dydt[watch.Line];
+        return watch.Kind switch
+        {
+            WatchKind.TargetReached or WatchKind.SectionPasses or WatchKind.TankBrims => (at.Volume - watch.Value) / vessel.Capacity,
+            WatchKind.InletUncovers => (at.Volume - line.UncoverVolume) / vessel.Capacity,
+            WatchKind.AirBreakUncovers => at.Surface - line.DrawOff.Line.AirBreak!.Value,
+            WatchKind.AirDrawn => at.Surface - line.SubmergedAbove(flow),
+            WatchKind.MarginVanishes => FreeMargin(watch.Line, at, delivered, flow) / atmosphere,
+            WatchKind.LiftExhausts => line.Margin(0, at.Surface, at.Gas) / line.SpecificWeight - run.SettledWithin,
+            WatchKind.HeadSettles => Math.Abs(line.Head(at.Surface, at.Gas, delivered)) - run.SettledWithin,
+            WatchKind.AllSettle => LargestHead(at, y) - run.SettledWithin,
+            WatchKind.BoreUncovers => BoreCover(line.InletLimit(at.Surface), flow),
+            WatchKind.OutletCovers => line.ReceiverSurface(delivered) - line.Hydraulics.OutletElevation,
+            WatchKind.ReceiverBrims => line.ReceiverDepth(delivered)!.Value - line.BrimDepth!.Value,
+            WatchKind.RegimePasses => RegimeDistance(line, watch, at, delivered),
+            WatchKind.VacuumRatingPasses => (atmosphere - at.Gas - Job.VacuumRating!.Value) / atmosphere,
+            WatchKind.PressureRatingPasses => (at.Gas - atmosphere - Job.PressureRating!.Value) / atmosphere,
+            WatchKind.FlowsBalance => Imbalance(at.Time, dydt),
+            WatchKind.ActFalls => Job.Timeline[watch.Ordinal] is { Time: { } time } ? time - at.Time : at.Surface - Job.Timeline[watch.Ordinal].Level!.Value,
+            WatchKind.InflowTurns => at.Time - watch.Value,
+            _ => throw new UnreachableException($"no event function watches {watch.Kind}"),
+        };
+    }
+
+    /// <summary>The margin in free flow, Pa; the flow of the dense output serves where it is free.</summary>
+    private double FreeMargin(int line, in Moment at, double delivered, double flow)
+    {
+        double free = now.Modes[line].IsLimited ? Flow(now, line, at.Surface, at.Gas, delivered, limited: false) : flow;
+        return now.Plant.Lines[line].Margin(free, at.Surface, at.Gas);
+    }
+
+    /// <summary>Positive while the inlet could let in more than the line carries; 1 where it is well covered.</summary>
+    private static double BoreCover(double limit, double flow) =>
+        double.IsInfinity(limit) ? 1 : limit <= 0 ? -1 : CoverAtEquality - flow / limit;
+
+    private double RegimeDistance(CompiledLine line, Watch watch, in Moment at, double delivered)
+    {
+        double flow = line.Hydraulics.RegimeFlows[watch.Ordinal];
+        if (line.Hydraulics.IsShut)
+            return -1;
+        return now.Modes[watch.Line].IsLimited
+            ? line.Margin(flow, at.Surface, at.Gas) / atmosphere
+            : Math.Abs(line.Head(at.Surface, at.Gas, delivered)) - line.RegimeHeads[watch.Ordinal];
+    }
+
+    private double LargestHead(in Moment at, ReadOnlySpan<double> y)
+    {
+        double largest = 0;
+        for (int i = 0; i < LineCount; i++)
+        {
+            if (now.Modes[i].IsAtWork)
+                largest = Math.Max(largest, Math.Abs(now.Plant.Lines[i].Head(at.Surface, at.Gas, y[i])));
+        }
+
+        return largest;
+    }
+
+    /// <summary>Relative difference of inflow and outflow above that which counts as none; 1 before the inflow's last turn.</summary>
+    private double Imbalance(double t, ReadOnlySpan<double> dydt)
+    {
+        double inflow = now.Inflow(t), outflow = 0;
+        if (now.Plant.Job.Inflow is not { } table || inflow <= 0 || t < table.Points[^1].Time)
+            return 1;
+        for (int i = 0; i < LineCount; i++)
+            outflow += dydt[i];
+        return Math.Abs(inflow - outflow) / inflow - BalancedWithin;
+    }
+
+    /// <summary>Flow over inlet limit where the line alone would carry just the limit, 1; see <see cref="Lines.Inlets.FlowBlend"/>.</summary>
+    private const double CoverAtEquality = 1 - Lines.Inlets.FlowBlend.HalfWidth / 4;
+
+    /// <summary>Share of the inflow by which the outflow may differ and still count as balanced, 1.</summary>
+    private const double BalancedWithin = 1e-3;
+
+    /// <summary>What the event functions look at.</summary>
+    private readonly record struct Moment(double Time, double Volume, double Surface, double Gas);
+}

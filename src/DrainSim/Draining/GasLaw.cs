@@ -1,0 +1,57 @@
+using DrainSim.Gas;
+
+namespace DrainSim.Draining;
+
+/// <summary>The pressure over the liquid for a volume of liquid and a mass of gas.</summary>
+internal sealed class GasLaw
+{
+    /// <summary>Least share of the tank that the gas is taken to fill, 1: a brimful closed tank has no gas to stretch.</summary>
+    private const double LeastGas = 1e-6;
+
+    private readonly double held;
+    private readonly GasSpace? space;
+    private readonly VentedHeadspace? vents;
+    private readonly Surroundings outside;
+    private readonly double capacity;
+
+    /// <param name="job">the job</param>
+    public GasLaw(Job job)
+    {
+        capacity = job.Vessel.Capacity;
+        double atmosphere = job.Site.AtmosphericPressure;
+        held = atmosphere + ((job.Headspace as HeldPressure)?.Overpressure ?? 0);
+        outside = new Surroundings(atmosphere, job.Liquid.Temperature);
+        vents = job.Headspace as VentedHeadspace;
+        if (job.Headspace is not ConfinedHeadspace confined)
+            return;
+        double pressure = confined.InitialPressure ?? atmosphere;
+        space = new GasSpace(pressure, job.Liquid.Temperature, job.Liquid.VapourPressure, confined.PolytropicExponent);
+        StartMass = space.Mass(pressure, GasVolume(job.Vessel.Volume(job.Level)));
+    }
+
+    /// <summary>Mass of gas at the start, kg; 0 where its mass does not matter.</summary>
+    public double StartMass { get; }
+
+    /// <summary>Whether gas comes and goes, so that its mass is part of the state.</summary>
+    public bool Breathes => vents is not null;
+
+    /// <summary>Whether the gas has a pressure of its own that the fall of the level changes.</summary>
+    public bool IsConfined => space is not null;
+
+    /// <summary>Pressure on the liquid, Pa absolute.</summary>
+    /// <param name="liquid">volume of liquid in the tank, m³</param>
+    /// <param name="mass">mass of gas over it, kg</param>
+    public double Pressure(double liquid, double mass) =>
+        space is null ? held : space.Pressure(Math.Max(mass, double.Epsilon), GasVolume(liquid));
+
+    /// <summary>Mass of gas over a volume of liquid at a pressure, kg.</summary>
+    /// <param name="pressure">pressure on the liquid, Pa absolute</param>
+    /// <param name="liquid">volume of liquid in the tank, m³</param>
+    public double MassAt(double pressure, double liquid) => space?.Mass(pressure, GasVolume(liquid)) ?? 0;
+
+    /// <summary>Mass flow of gas into the headspace, kg/s.</summary>
+    /// <param name="pressure">pressure on the liquid, Pa absolute</param>
+    public double MassFlow(double pressure) => vents?.MassFlow(pressure, outside, out _) ?? 0;
+
+    private double GasVolume(double liquid) => Math.Max(LeastGas * capacity, capacity - liquid);
+}

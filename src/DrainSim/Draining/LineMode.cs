@@ -1,0 +1,11 @@
+namespace DrainSim.Draining;
+
+/// <summary>How a line works between two restarts.</summary>
+/// <param name="IsLimited">whether its flow is held at the threshold of the low point</param>
+/// <param name="Ending">how it ended; null while it works</param>
+/// <param name="EndedAt">when it ended, s</param>
+internal readonly record struct LineMode(bool IsLimited, Outcome? Ending = null, double EndedAt = 0)
+{
+    /// <summary>Whether the line still works.</summary>
+    public bool IsAtWork => Ending is null;
+}

@@ -1,0 +1,44 @@
+using DrainSim.Lines;
+
+namespace DrainSim.Draining;
+
+/// <summary>Whether a line can carry a flow at the first instant, and what it needs for it.</summary>
+internal static class StartCheck
+{
+    /// <summary>Why a line does not flow; null when it does.</summary>
+    /// <param name="job">the job</param>
+    /// <param name="line">one of its lines</param>
+    /// <param name="gas">pressure on the liquid at the start, Pa absolute</param>
+    public static NoStart? Refusal(Job job, CompiledLine line, double gas)
+    {
+        double head = line.Head(job.Level, gas, delivered: 0);
+        bool runsBack = head < -job.Run.SettledWithin && line.IsSubmerged(0);
+        return line switch
+        {
+            { Hydraulics.IsShut: true } when !job.Timeline.Any() => NoStart.ValveShut,
+            _ when job.Level <= line.Hydraulics.InletElevation => NoStart.InletAboveLevel,
+            _ when !runsBack && head <= job.Run.SettledWithin => NoStart.NoDrivingHead,
+            _ when line.Margin(0, job.Level, gas) <= 0 => NoStart.LiftBeyondLimit,
+            _ => null,
+        };
+    }
+
+    /// <summary>What the line needs before it runs; null where it never rises above its inlet.</summary>
+    /// <param name="job">the job</param>
+    /// <param name="line">one of its lines</param>
+    public static PrimeReport? Prime(Job job, CompiledLine line)
+    {
+        LineHydraulics hydraulics = line.Hydraulics;
+        if (!hydraulics.RisesAboveInlet)
+            return null;
+        double lift = hydraulics.CrestElevation - job.Level;
+        return new PrimeReport(
+            hydraulics.LineVolume,
+            hydraulics.InnerLegVolume,
+            hydraulics.OuterLegVolume,
+            job.Level,
+            lift,
+            (job.Site.AtmosphericPressure - line.Threshold) / line.SpecificWeight,
+            Math.Max(0, lift * line.SpecificWeight));
+    }
+}

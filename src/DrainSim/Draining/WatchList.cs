@@ -1,0 +1,67 @@
+using DrainSim.Lines;
+
+namespace DrainSim.Draining;
+
+/// <summary>Draws up what a run has to watch.</summary>
+/// <remarks>Of events at one instant the one that stands first here counts: a target before air, air before rest.</remarks>
+internal static class WatchList
+{
+    /// <summary>The event functions of a job.</summary>
+    /// <param name="plant">the plant at the start</param>
+    /// <param name="target">volume at which the job is done, m³; null where there is none</param>
+    public static Watch[] Of(Plant plant, double? target)
+    {
+        var watches = new List<Watch>();
+        if (target is { } volume)
+            watches.Add(new Watch(WatchKind.TargetReached, Value: volume));
+        for (int i = 0; i < plant.Lines.Length; i++)
+            watches.AddRange(OfLine(plant.Lines[i], i));
+        watches.AddRange(OfTank(plant.Job, plant.Lines.Length, plant.Gas));
+        return [.. watches];
+    }
+
+    private static IEnumerable<Watch> OfLine(CompiledLine line, int index)
+    {
+        yield return new(WatchKind.InletUncovers, index);
+        if (line.DrawOff.Line.AirBreak is not null)
+            yield return new(WatchKind.AirBreakUncovers, index);
+        if (line.DrawOff.Line.Inlet.AirDraw == AirDraw.Break)
+            yield return new(WatchKind.AirDrawn, index);
+        yield return new(WatchKind.MarginVanishes, index);
+        if (line.HoldsAtVapour)
+            yield return new(WatchKind.LiftExhausts, index);
+        yield return new(WatchKind.HeadSettles, index);
+        if (line.HasTail)
+            yield return new(WatchKind.BoreUncovers, index);
+        if (line.BrimDepth is not null)
+        {
+            yield return new(WatchKind.OutletCovers, index);
+            yield return new(WatchKind.ReceiverBrims, index);
+        }
+
+        for (int j = 0; j < line.Hydraulics.RegimeFlows.Count; j++)
+            yield return new(WatchKind.RegimePasses, index, j);
+    }
+
+    private static IEnumerable<Watch> OfTank(Job job, int lines, GasLaw gas)
+    {
+        if (lines > 1)
+            yield return new(WatchKind.AllSettle);
+        foreach (double level in job.Vessel.SectionLevels)
+            yield return new(WatchKind.SectionPasses, Value: job.Vessel.Volume(level));
+        if (gas.IsConfined && job.VacuumRating is not null)
+            yield return new(WatchKind.VacuumRatingPasses);
+        if (gas.IsConfined && job.PressureRating is not null)
+            yield return new(WatchKind.PressureRatingPasses);
+        if (job.Inflow is { } inflow)
+        {
+            yield return new(WatchKind.FlowsBalance);
+            yield return new(WatchKind.TankBrims, Value: job.Vessel.Capacity);
+            foreach ((double time, _) in inflow.Points.Where(p => p.Time > 0))
+                yield return new(WatchKind.InflowTurns, Value: time);
+        }
+
+        for (int j = 0; j < job.Timeline.Count; j++)
+            yield return new(WatchKind.ActFalls, 0, j);
+    }
+}
