@@ -86,12 +86,12 @@ public static class Breathing
                     low = pressure;
                 else
                     high = pressure;
-                double next = pressure - excess / slope;
-                if (!(next > low && next < high))
-                    next = (low + high) / 2;
-                if (Math.Abs(next - pressure) <= 1e-15 * air.Pressure)
-                    return next;
-                pressure = next;
+                double step = excess / slope;
+                // A step below the last bits may point out of the bracket; it is an end, not a reason to halve.
+                if (Math.Abs(step) <= 1e-15 * air.Pressure)
+                    break;
+                double next = pressure - step;
+                pressure = next > low && next < high ? next : (low + high) / 2;
             }
             return pressure;
         }

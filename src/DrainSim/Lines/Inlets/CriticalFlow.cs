@@ -80,18 +80,19 @@ public static class CriticalFlow
         return angle;
     }
 
-    // One turn of Newton, halving where that leaves the bracket; true when the angle no longer moves.
+    // One turn of Newton, halving where that leaves the bracket; true at the root.
     private static bool Advance(ref double angle, ref double low, ref double high, double excess, double slope)
     {
         if (excess > 0)
             high = angle;
         else
             low = angle;
-        double next = angle - excess / slope;
-        if (!(next > low && next < high))
-            next = (low + high) / 2;
-        bool isSettled = Math.Abs(next - angle) <= 1e-15 * angle;
-        angle = next;
-        return isSettled;
+        double step = excess / slope;
+        // A step below the last bits may point out of the bracket; it is an end, not a reason to halve.
+        if (Math.Abs(step) <= 1e-15 * angle)
+            return true;
+        double next = angle - step;
+        angle = next > low && next < high ? next : (low + high) / 2;
+        return high - low <= 1e-15 * high;
     }
 }
