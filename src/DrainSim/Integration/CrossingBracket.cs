@@ -1,7 +1,7 @@
 namespace DrainSim.Integration;
 
-/// <summary>Narrows an interval over which a function changes sign to two neighbouring doubles: the ITP method
-/// (interpolate, truncate, project).</summary>
+/// <summary>Narrows an interval over which a function changes sign to two neighbouring doubles, or to 2^−64 of itself
+/// where the root is so near to zero that doubles lie closer: the ITP method (interpolate, truncate, project).</summary>
 /// <remarks>
 /// The caller evaluates the function, so nothing is captured or allocated: ask <see cref="TryNext"/> for a
 /// point, hand its value to <see cref="Narrow"/>, until there is none. It needs at most one evaluation more than
@@ -14,9 +14,11 @@ namespace DrainSim.Integration;
 internal struct CrossingBracket
 {
     private const double TruncationShare = 0.2;
+    private const int MostHalvings = 64;
 
     private readonly double resolution;
     private readonly double truncation;
+    private readonly double leastWidth;
     private readonly bool isRising;
     private double radius;
     private double near;
@@ -36,6 +38,7 @@ internal struct CrossingBracket
         resolution = Math.BitIncrement(largest) - largest;
         double width = far - near;
         truncation = TruncationShare / width;
+        leastWidth = Math.ScaleB(width, -MostHalvings);
         int bisections = (int)Math.Ceiling(Math.Log2(Math.Max(width / resolution, 1)));
         radius = resolution * Math.ScaleB(1, bisections);   // half a bracket of n0 = 1 bisection more
     }
@@ -43,13 +46,13 @@ internal struct CrossingBracket
     /// <summary>The upper end: the function has changed its sign there, or is zero.</summary>
     public double Far { get; private set; }
 
-    /// <summary>The next point to evaluate at; false when the ends are neighbours.</summary>
+    /// <summary>The next point to evaluate at; false when the ends are close enough.</summary>
     public bool TryNext(out double x)
     {
         double width = Far - near;
         double middle = near + width / 2;
         x = middle;
-        if (!(middle > near && middle < Far))
+        if (width <= leastWidth || !(middle > near && middle < Far))
             return false;
         double interpolated = near + width * (nearValue / (nearValue - farValue));
         if (double.IsFinite(interpolated))

@@ -19,7 +19,7 @@ namespace DrainSim.Integration;
 /// <item>A function that is zero at the first instant does not fire there. Its first value other than zero
 /// gives it its side.</item>
 /// <item>An event is placed at the later of the two neighbouring doubles between which the dense output changes
-/// the sign: the state there is on the far side, or at zero.</item>
+/// the sign (2^−64 of a step apart near time zero): the state there is on the far side, or at zero.</item>
 /// <item>Events come in the order of their times, however many lie in one step.</item>
 /// <item>Crossings within 1e-12 of a step, or four units in the last place of the time, are one instant, the latest
 /// of them. There, Record comes before Restart and Restart before Stop, each by index; all are

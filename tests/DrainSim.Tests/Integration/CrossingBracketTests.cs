@@ -24,10 +24,11 @@ public sealed class CrossingBracketTests
     public void The_search_ends_on_two_neighbours_with_no_more_turns_than_bisection_and_one(
         string name, Func<double, double> function, double low, double high)
     {
-        (double root, int turns) = Search(function, low, high);
-        Assert.True(function(root) >= 0, name);
-        Assert.False(function(Math.BitDecrement(root)) >= 0, name);
-        Assert.InRange(turns, 1, Math.Ceiling(Math.Log2((high - low) / (root - Math.BitDecrement(root)))) + 1);
+        (double near, double far, int turns) = Search(function, low, high);
+        Assert.True(function(far) >= 0, name);
+        Assert.False(function(near) >= 0, name);
+        Assert.InRange(far - near, 0, Resolution(far, high - low));
+        Assert.InRange(turns, 1, Math.Ceiling(Math.Log2((high - low) / Resolution(far, high - low))) + 1);
     }
 
     [Fact]
@@ -43,20 +44,29 @@ public sealed class CrossingBracketTests
                 double end = Value(shift + 2);
                 if (end == 0 || double.Sign(end) == double.Sign(Value(shift)))
                     return true;
-                (double root, int turns) = Search(x => double.Sign(end) * Value(x), shift, shift + 2);
-                return double.Sign(end) * Value(root) >= 0
-                    && double.Sign(end) * Value(Math.BitDecrement(root)) < 0 && turns <= 66;
+                (double near, double far, int turns) = Search(x => double.Sign(end) * Value(x), shift, shift + 2);
+                return double.Sign(end) * Value(far) >= 0 && double.Sign(end) * Value(near) < 0
+                    && far - near <= Resolution(Math.Max(Math.Abs(far), Math.Abs(near)), 2) && turns <= 66;
             }, iter: 20_000);
 
-    private static (double Root, int Turns) Search(Func<double, double> function, double low, double high)
+    [Fact]
+    public void A_root_at_time_zero_within_a_bracket_around_it_ends_by_its_width() =>
+        Assert.InRange(Search(x => x > 0 ? 1 : -1, -1, 1).Turns, 60, 66);
+
+    /// <summary>Spacing of doubles at x, or 2^−64 of the first width where that is larger.</summary>
+    private static double Resolution(double x, double width) => Math.Max(x - Math.BitDecrement(x), Math.ScaleB(width, -64));
+
+    private static (double Near, double Far, int Turns) Search(Func<double, double> function, double low, double high)
     {
         CrossingBracket bracket = new(low, function(low), high, function(high), isRising: true);
-        int turns = 0;
+        (double near, int turns) = (low, 0);
         while (bracket.TryNext(out double x))
         {
             turns++;
-            bracket.Narrow(x, function(x));
+            double value = function(x);
+            bracket.Narrow(x, value);
+            near = value >= 0 ? near : x;
         }
-        return (bracket.Far, turns);
+        return (near, bracket.Far, turns);
     }
 }
