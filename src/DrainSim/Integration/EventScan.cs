@@ -14,7 +14,6 @@ internal sealed class EventScan<TSystem> where TSystem : IOdeSystem, IEventSet
     private readonly Sign[] sides;
     private readonly double[] sideTimes;
     private readonly double[] sideValues;
-    private readonly bool[] hasFired;
     private readonly double[] values;
     private readonly double[] probe;
     private readonly double[] state;
@@ -30,7 +29,7 @@ internal sealed class EventScan<TSystem> where TSystem : IOdeSystem, IEventSet
     {
         this.system = system;
         int count = system.EventCount;
-        (sides, hasFired, found) = (new Sign[count], new bool[count], new Crossing[count]);
+        (sides, found) = (new Sign[count], new Crossing[count]);
         (sideTimes, sideValues) = (new double[count], new double[count]);
         (values, probe) = (new double[count], new double[count]);
         (state, slope) = (new double[system.Dimension], new double[system.Dimension]);
@@ -64,7 +63,6 @@ internal sealed class EventScan<TSystem> where TSystem : IOdeSystem, IEventSet
         log.Clear();
         Evaluations = 0;
         Array.Clear(sides);
-        Array.Clear(hasFired);
     }
 
     /// <summary>Takes the sides of all functions at the first instant of a run.</summary>
@@ -101,7 +99,7 @@ internal sealed class EventScan<TSystem> where TSystem : IOdeSystem, IEventSet
         foundCount = 0;
         for (int i = 0; i < sides.Length; i++)
         {
-            if (!hasFired[i] && HasCrossed(i, isStepEnd: false) && system.Rule(i).Fires(DirectionFrom(sides[i])))
+            if (HasCrossed(i, isStepEnd: false) && system.Rule(i).Fires(DirectionFrom(sides[i])))
                 found[foundCount++] = new Crossing(t, i, DirectionFrom(sides[i]), system.Rule(i).Action);
         }
         y.CopyTo(state);
@@ -109,7 +107,6 @@ internal sealed class EventScan<TSystem> where TSystem : IOdeSystem, IEventSet
         if (isCut)
             return true;
         Settle(t, isStepEnd: false);
-        Array.Clear(hasFired);
         return false;
     }
 
@@ -162,10 +159,7 @@ internal sealed class EventScan<TSystem> where TSystem : IOdeSystem, IEventSet
             return false;
         (Instant, instantStart, instantEnd) = (instant, first, next);
         foreach (Crossing crossing in events)
-        {
-            hasFired[crossing.Index] = true;
-            sides[crossing.Index] = Sign.Undecided;
-        }
+            sides[crossing.Index] = Sign.Undecided;     // so that it cannot fire again at this instant
         return true;
     }
 

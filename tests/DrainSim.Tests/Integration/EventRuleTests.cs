@@ -149,6 +149,19 @@ public sealed class EventRuleTests
         Assert.Equal(0, result.StoppedBy);
     }
 
+    [Theory]
+    [InlineData(1e-13, new[] { 1, 0 })]
+    [InlineData(1e-11, new[] { 0 })]
+    public void Rule_8_crossings_within_a_trillionth_of_a_step_are_one_instant(double apart, int[] indices)
+    {
+        Clock clock = new Clock()
+            .When((t, _, _) => t - 1.1, EventAction.Stop)
+            .When((t, _, _) => t - 1.1 - apart, EventAction.Record);
+        IntegrationResult result = clock.Solve(2, firstStep: 2).Result;
+        Assert.Equal(indices, result.Events.Select(e => e.Index));
+        Assert.All(result.Events, e => Assert.Equal(result.EndTime, e.Time));
+    }
+
     [Fact]
     public void Rule_9_recorded_events_change_no_bit_of_the_solution()
     {
@@ -186,6 +199,15 @@ public sealed class EventRuleTests
             .When((_, y, _) => y[0] - 1.2, EventAction.Record);
         clock.Answer = (_, _, _) => (clock.Speed = -1) < 0;
         Assert.Equal([0], clock.Solve(2, firstStep: 2).Result.Events.Select(e => e.Index));
+    }
+
+    [Fact]
+    public void Rule_10_an_event_recorded_shortly_before_a_restart_is_not_listed_again_after_it()
+    {
+        Clock clock = new Clock()
+            .When((_, y, _) => y[0] - 1.05, EventAction.Record)
+            .When((_, y, _) => y[0] - 1.1, EventAction.Restart);
+        Assert.Equal([0, 1], clock.Solve(2, firstStep: 2).Result.Events.Select(e => e.Index));
     }
 
     [Fact]
