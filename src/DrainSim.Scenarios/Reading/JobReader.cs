@@ -34,8 +34,14 @@ internal static class JobReader
             Site = site,
             Vessel = tank.Vessel,
             Level = tank.Level,
-            Line = line,
-            ReceiverSurface = surface,
+            DrawOffs =
+            [
+                new DrawOff
+                {
+                    Line = line,
+                    Receiver = surface is { } elevation ? new FixedSurface { Elevation = elevation } : null,
+                },
+            ],
             Run = run.Settings,
         });
         return job is null ? null : new Scenario
