@@ -121,6 +121,14 @@ internal sealed class LevelPanel(
         EventCode.BecameTurbulent => "turbulent from here",
         EventCode.VapourLimitBegins => "flow held at the limit",
         EventCode.VapourLimitEnds => "flow free again",
+        EventCode.AirMayBeDrawn => "a vortex may draw air",
+        EventCode.BoreUncovered => "bore uncovered",
+        EventCode.OutletCovered => "outlet covered",
+        EventCode.OutletFreed => "outlet free",
+        EventCode.VacuumRatingPassed => "vacuum rating passed",
+        EventCode.PressureRatingPassed => "pressure rating passed",
+        EventCode.HoseRatingPassed => "hose rating passed",
+        EventCode.Act => "act",
         _ => "",
     };
 }

@@ -20,6 +20,21 @@ public static class EventWording
         EventCode.VapourLimitBegins =>
             $"the low point reaches {Verdict.LimitName(job)}; from here the flow is held there",
         EventCode.VapourLimitEnds => $"the low point rises from {Verdict.LimitName(job)}; the flow is free again",
+        EventCode.AirMayBeDrawn => "a vortex may draw air into the inlet from here",
+        EventCode.AirDrawn => "air is drawn into the inlet from here",
+        EventCode.BoreUncovered => "the inlet's bore is uncovered; it goes on partly full",
+        EventCode.OutletCovered => "the receiver covers the outlet",
+        EventCode.OutletFreed => "the receiver falls below the outlet",
+        EventCode.VacuumRatingPassed => "the headspace passes the tank's vacuum rating",
+        EventCode.PressureRatingPassed => "the headspace passes the tank's pressure rating",
+        EventCode.HoseRatingPassed => "the low point passes the hose's vacuum rating",
+        EventCode.Act => job.Timeline[(int)moment.Number - 1].Text,
+        EventCode.AirBreak => "the vent on the line lets air in",
+        EventCode.VacuumHeld => "the vacuum in the headspace holds the liquid up",
+        EventCode.YieldHeld => "the head no longer moves the liquid",
+        EventCode.Balanced => "as much runs in as out",
+        EventCode.ReceiverFull => "the receiver is full to its brim",
+        EventCode.Overflowed => "the tank overflows",
         EventCode.VapourBreak => $"the low point reaches {Verdict.LimitName(job)} and the column parts",
         EventCode.InletUncovered => "air reaches the inlet",
         EventCode.Emptied => "the tank is empty but for a film",
@@ -43,6 +58,20 @@ public static class EventWording
         WarningCode.TransitionFlow =>
             $"For {MeasureFormat.Percent(warning.Number)} of the time the flow is between laminar and turbulent, "
             + "where friction is least sure.",
+        WarningCode.AirMayBeDrawn =>
+            $"A vortex may draw air into the inlet once it is less than {format.Length(warning.Number)} under the surface; "
+            + "the published forms differ widely.",
+        WarningCode.VacuumRatingPassed =>
+            $"The headspace goes to {format.Pressure(warning.Number)} below the atmosphere, past the tank's vacuum rating.",
+        WarningCode.PressureRatingPassed =>
+            $"The headspace goes to {format.Pressure(warning.Number)} above the atmosphere, past the tank's pressure rating.",
+        WarningCode.HoseMayFlatten =>
+            $"The low point goes to {format.Pressure(warning.Number)} below the atmosphere, past the hose's vacuum rating: it may flatten.",
+        WarningCode.GasMayGather =>
+            $"For {MeasureFormat.Percent(warning.Number)} of the time the low point is below a third of an atmosphere: "
+            + "gas from the liquid may gather at the crest (low confidence).",
+        WarningCode.NeverEmpties =>
+            $"The line keeps up with an inflow of at most {format.Flow(warning.Number)} down to the inlet; this one is more.",
         WarningCode.ThinMargin =>
             $"At the worst moment only {format.Pressure(warning.Number)} is left at the low point. "
             + "Warmer liquid, a lower barometer or a rise in the hose would use it up.",
@@ -75,6 +104,12 @@ public static class EventWording
             Outcome.Emptied => $"it empties in {time}",
             Outcome.InletUncovered => $"it goes down to the inlet, at {level}, in {time}",
             Outcome.VapourBreak => $"the column parts at {level} after {time}",
+            Outcome.AirBreak => $"the vent lets air in at {level} after {time}",
+            Outcome.VacuumHeld => $"the vacuum holds it at {level} after {time}",
+            Outcome.YieldHeld => $"it stands still at {level} after {time}",
+            Outcome.Balanced => $"it balances at {level} after {time}",
+            Outcome.ReceiverFull => $"the receiver is full at {level} after {time}",
+            Outcome.Overflowed => $"the tank overflows after {time}",
             Outcome.Levelled => $"it comes to rest at {level} after {time}",
             Outcome.TargetReached => $"it reaches its target, at {level}, in {time}",
             Outcome.TimeLimit => $"it still runs at {level} after {time}",
