@@ -113,7 +113,7 @@ internal sealed class Sheet : IDisposable
     public void Write(Stream stream)
     {
         using SKPixmap pixels = surface.PeekPixels();
-        using SKData? data = pixels.Encode(new SKPngEncoderOptions(SKPngEncoderFilterFlags.Sub, 4));
+        using SKData? data = pixels.Encode(new SKPngEncoderOptions(SKPngEncoderFilterFlags.None, 2));
         (data ?? throw new InvalidOperationException("the picture cannot be encoded")).SaveTo(stream);
     }
 

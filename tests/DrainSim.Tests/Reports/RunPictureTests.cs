@@ -22,7 +22,10 @@ public sealed class RunPictureTests
         ["never"] = new InventedRun { Outcome = Outcome.NeverStarted, NoStart = NoStart.NoDrivingHead, OutletElevation = 9 },
         ["dry"] = new InventedRun
         {
-            Outcome = Outcome.NeverStarted, NoStart = NoStart.InletAboveLevel, StartLevel = 0, EndLevel = 0,
+            Outcome = Outcome.NeverStarted,
+            NoStart = NoStart.InletAboveLevel,
+            StartLevel = 0,
+            EndLevel = 0,
         },
         ["no pressure"] = new InventedRun { LowestPressure = double.NaN },
     };

@@ -48,6 +48,10 @@ public sealed class SampleTimesTests
         });
 
     [Fact]
+    public void A_run_without_events_is_still_reported_at_its_end() =>
+        Assert.Equal(6125, SampleTimes.Of(new InventedRun().Result() with { Events = [] }).Last());
+
+    [Fact]
     public void A_run_that_never_starts_has_one_row() =>
         Assert.Equal([0.0], SampleTimes.Of(new InventedRun { Outcome = Outcome.NeverStarted }.Result()));
 }
