@@ -52,6 +52,8 @@ internal static class CommandLine
     {
         var root = new RootCommand("Says how long a tank takes to empty by gravity, and whether it empties at all.")
         {
+            new RunCommand(),
+            new CheckCommand(),
             new NewCommand(),
             new LiquidsCommand(),
             new FittingsCommand(),

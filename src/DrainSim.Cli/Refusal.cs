@@ -1,4 +1,5 @@
 using System.CommandLine;
+using System.CommandLine.Parsing;
 using DrainSim.Scenarios;
 
 namespace DrainSim.Cli;
@@ -9,17 +10,27 @@ internal static class Refusal
     /// <summary>The first fault of a command line and where to look; null when there is none.</summary>
     public static string? Of(ParseResult parsed)
     {
-        if (parsed.Errors.Count == 0)
-            return null;
         Command command = parsed.CommandResult.Command;
-        if (command is RootCommand && parsed.UnmatchedTokens.Count == 0)
+        string? unmatched = parsed.UnmatchedTokens.Count > 0 ? parsed.UnmatchedTokens[0] : MisreadOption(parsed);
+        if (unmatched is null && parsed.Errors.Count == 0)
+            return null;
+        if (unmatched is null && command is RootCommand)
             return "drainsim: no command is given; mostly it is 'drainsim run SCENARIO'. See 'drainsim --help'.";
-        string fault = parsed.UnmatchedTokens.Count > 0
-            ? Unmatched(parsed.UnmatchedTokens[0], command)
+        string fault = unmatched is not null
+            ? Unmatched(unmatched, command)
             : parsed.Errors[0].Message.TrimEnd('.') + ".";
         string name = command is RootCommand ? "drainsim" : $"drainsim {command.Name}";
         return $"drainsim: {fault} See '{name} --help'.";
     }
+
+    /// <summary>A word with a dash that was taken for an argument; behind a plain '--' it is meant as one.</summary>
+    private static string? MisreadOption(ParseResult parsed) =>
+        parsed.Tokens.Any(token => token.Type == TokenType.DoubleDash)
+            ? null
+            : parsed.CommandResult.Children.OfType<ArgumentResult>()
+                .SelectMany(argument => argument.Tokens)
+                .Select(token => token.Value)
+                .FirstOrDefault(value => value.Length > 1 && value[0] == '-');
 
     private static string Unmatched(string token, Command command)
     {

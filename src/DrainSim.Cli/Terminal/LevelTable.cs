@@ -7,16 +7,16 @@ namespace DrainSim.Cli.Terminal;
 /// <summary>The levels that a crew should find with a dipstick while the job runs.</summary>
 internal static class LevelTable
 {
-    /// <summary>Most rows between the start and the end.</summary>
-    private const int MostRows = 8;
+    /// <summary>Most even steps from the start to the end.</summary>
+    private const int MostSteps = 9;
 
     /// <summary>Steps that a watch shows well, s.</summary>
     private static readonly double[] Steps =
     [
-        1, 2, 5, 10, 15, 20, 30,
-        60, 120, 300, 600, 900, 1200, 1800,
+        1, 2, 3, 5, 10, 15, 20, 30,
+        60, 120, 180, 300, 600, 900, 1200, 1800,
         3600, 2 * 3600, 3 * 3600, 6 * 3600, 12 * 3600,
-        86400, 2 * 86400, 5 * 86400, 10 * 86400, 20 * 86400, 50 * 86400, 100 * 86400,
+        86400, 2 * 86400, 3 * 86400, 5 * 86400, 10 * 86400, 20 * 86400, 30 * 86400, 50 * 86400, 100 * 86400,
     ];
 
     /// <summary>The lines of the table, its heading first; none for a run that never started.</summary>
@@ -51,10 +51,10 @@ internal static class LevelTable
     {
         foreach (double step in Steps)
         {
-            if (end <= (MostRows + 1) * step)
-                return end < Steps[0] ? end / MostRows : step;
+            if (end <= MostSteps * step)
+                return end < Steps[0] ? end / MostSteps : step;
         }
-        double days = Math.Pow(10, Math.Ceiling(Math.Log10(end / 86400 / MostRows)));
+        double days = Math.Pow(10, Math.Ceiling(Math.Log10(end / 86400 / MostSteps)));
         return days * 86400;
     }
 

@@ -8,8 +8,8 @@ namespace DrainSim.Cli.Terminal;
 /// <summary>Several runs in one table.</summary>
 internal static class RunSummary
 {
-    /// <summary>The table, a row for each run, in their order.</summary>
-    public static ColumnTable Of(IEnumerable<RunReport> reports)
+    /// <summary>Writes a row for each run, in their order, and where their files are.</summary>
+    public static void Write(TextWriter output, IReadOnlyList<FinishedRun> runs, string folder)
     {
         var table = new ColumnTable(
             new Column { Title = "scenario" },
@@ -18,7 +18,7 @@ internal static class RunSummary
             new Column { Title = "left", IsNumber = true },
             new Column { Title = "level", IsNumber = true },
             new Column { Title = "least margin", IsNumber = true });
-        foreach (RunReport report in reports)
+        foreach (RunReport report in runs.Select(run => run.Report))
         {
             DrainResult result = report.Result;
             var format = new MeasureFormat(report.Units);
@@ -31,6 +31,11 @@ internal static class RunSummary
                 format.Length(result.FinalLevel),
                 hasRun ? format.Pressure(result.LeastMargin.Value) : "");
         }
-        return table;
+        if (runs.Any(run => run.Files.Count > 0))
+            table.Notes.Add($"Files: {folder}");
+        table.Notes.Add("Levels, advice and cautions of one of them: run it alone.");
+        table.Notes.Add(Cautions.Closing.Text);
+        output.WriteLine();
+        table.WriteText(output);
     }
 }

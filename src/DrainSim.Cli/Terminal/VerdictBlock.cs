@@ -1,4 +1,6 @@
+using System.Globalization;
 using DrainSim.Draining;
+using DrainSim.Lines;
 using DrainSim.Reports;
 using DrainSim.Reports.Measures;
 using DrainSim.Reports.Wording;
@@ -8,14 +10,13 @@ namespace DrainSim.Cli.Terminal;
 /// <summary>What a planner reads after a run: one screen, the verdict first.</summary>
 internal static class VerdictBlock
 {
-    /// <summary>Writes the block.</summary>
-    /// <param name="output">takes it</param>
-    /// <param name="report">the run and how it is told</param>
-    /// <param name="readingWarnings">what was suspicious in the scenario, one line each</param>
-    /// <param name="files">the files written; empty when none were</param>
-    public static void Write(
-        TextWriter output, RunReport report, IReadOnlyList<string> readingWarnings, IReadOnlyList<string> files)
+    /// <summary>A margin that a gauge could not tell from none, Pa.</summary>
+    private const double LeastToldMargin = 1;
+
+    /// <summary>Writes the whole block.</summary>
+    public static void Write(TextWriter output, FinishedRun run)
     {
+        RunReport report = run.Report;
         DrainResult result = report.Result;
         var format = new MeasureFormat(report.Units);
         output.WriteLine(report.Title);
@@ -24,15 +25,31 @@ internal static class VerdictBlock
         foreach ((string label, string text) in Facts(result, format))
             WriteParagraph(output, $"  {label,-14}{text}", hang: 16);
         WriteSection(output, "Levels to expect", LevelTable.Lines(result, format));
-        WriteList(output, "What would let it go on", [.. result.Remedies.Select(remedy => EventWording.Text(remedy, format))]);
-        WriteList(output, "Warnings",
-            [.. readingWarnings, .. result.Warnings.Select(warning => EventWording.Text(warning, format))]);
-        WriteList(output, "Cautions", [.. Cautions.For(result.Job, format).Select(caution => caution.Text)]);
-        if (files.Count > 0)
-        {
-            output.WriteLine();
-            WriteParagraph(output, $"Files: {string.Join(", ", files)}", hang: 7);
-        }
+        WriteList(output, "What would let it go on", result.Remedies.Select(remedy => EventWording.Text(remedy, format)));
+        WriteList(output, "Warnings", Warnings(run));
+        WriteList(output, "Cautions", Cautions.For(result.Job, format).Select(caution => caution.Text));
+        if (run.Files.Count > 0)
+            WriteSection(output, "Files", Paragraph.Lines("  " + string.Join(", ", run.Files), Paragraph.Width, hang: 2));
+    }
+
+    /// <summary>Writes the verdict in one line, with the scenario's name where it is one of several.</summary>
+    public static void WriteLine(TextWriter output, FinishedRun run, bool isAlone, bool withWarnings)
+    {
+        string sentence = Verdict.Sentence(run.Report.Result, new MeasureFormat(run.Report.Units));
+        output.WriteLine(isAlone ? sentence : $"{run.Report.Name}: {sentence}");
+        if (!withWarnings)
+            return;
+        foreach (string line in Warnings(run).SelectMany(text => Paragraph.Lines("  - " + text, Paragraph.Width, hang: 4)))
+            output.WriteLine(line);
+    }
+
+    /// <summary>What was suspicious in the scenario and what makes its result less sure.</summary>
+    private static IEnumerable<string> Warnings(FinishedRun run)
+    {
+        var format = new MeasureFormat(run.Report.Units);
+        return run.Reading.Warnings
+            .Select(warning => string.Create(CultureInfo.InvariantCulture, $"Line {warning.Line}, {warning.Key}: {warning.Sentence}"))
+            .Concat(run.Report.Result.Warnings.Select(warning => EventWording.Text(warning, format)));
     }
 
     private static IEnumerable<(string Label, string Text)> Facts(DrainResult result, MeasureFormat format)
@@ -50,11 +67,22 @@ internal static class VerdictBlock
         {
             yield return ("Largest flow", $"{format.Flow(result.LargestFlow.Value)}{When(result.LargestFlow.Time)}, "
                 + $"{format.Velocity(result.LargestVelocity.Value)} in the narrowest bore");
-            yield return ("Low point", $"at least {format.Pressure(result.LeastMargin.Value)} above its limit, "
-                + $"{format.Pressure(result.LeastLowPointPressure.Value)} absolute{When(result.LeastMargin.Time)}");
+            yield return ("Low point", LowPoint(result, format));
         }
         if (result.Prime is { } prime)
             yield return ("To start", Prime(prime, format));
+    }
+
+    private static string LowPoint(DrainResult result, MeasureFormat format)
+    {
+        Job job = result.Job;
+        LineNode node = new LineHydraulics(job.Line, job.Liquid, job.Site.Gravity).Node(result.LeastMarginNode);
+        string margin = result.LeastMargin.Value < LeastToldMargin
+            ? "at its limit"
+            : $"at least {format.Pressure(result.LeastMargin.Value)} above its limit";
+        double pressure = result.Trace.At(Math.Clamp(result.LeastMargin.Time, 0, result.Trace.End)).LowPointPressure;
+        return $"{margin}: {format.Pressure(pressure)} absolute{When(result.LeastMargin.Time)}, "
+            + $"{format.Length(node.Elevation)} up at {node.Name}";
     }
 
     private static string Prime(PrimeReport prime, MeasureFormat format) =>
@@ -76,7 +104,7 @@ internal static class VerdictBlock
             output.WriteLine(line);
     }
 
-    private static void WriteList(TextWriter output, string heading, IReadOnlyList<string> items) =>
+    private static void WriteList(TextWriter output, string heading, IEnumerable<string> items) =>
         WriteSection(output, heading, items.SelectMany(item => Paragraph.Lines("  - " + item, Paragraph.Width, hang: 4)));
 
     private static void WriteParagraph(TextWriter output, string text, int hang)

@@ -1,0 +1,29 @@
+namespace DrainSim.Cli.Tests;
+
+/// <summary>A folder of its own for one test, taken away afterwards.</summary>
+internal sealed class TestFolder : IDisposable
+{
+    public string Path { get; } = Directory.CreateTempSubdirectory("drainsim-test-").FullName;
+
+    /// <summary>Names of all files below the folder, with forward slashes, sorted.</summary>
+    public IReadOnlyList<string> Files =>
+    [
+        .. Directory.EnumerateFiles(Path, "*", SearchOption.AllDirectories)
+            .Select(file => System.IO.Path.GetRelativePath(Path, file).Replace('\\', '/'))
+            .Order(StringComparer.Ordinal),
+    ];
+
+    public string Full(string name) => System.IO.Path.Combine(Path, name);
+
+    public void Write(string name, string text)
+    {
+        Directory.CreateDirectory(System.IO.Path.GetDirectoryName(Full(name))!);
+        File.WriteAllText(Full(name), text);
+    }
+
+    public string Read(string name) => File.ReadAllText(Full(name));
+
+    public byte[] Bytes(string name) => File.ReadAllBytes(Full(name));
+
+    public void Dispose() => Directory.Delete(Path, recursive: true);
+}
