@@ -65,7 +65,9 @@ internal static class CommandLine
         foreach (Option option in root.Options)
         {
             if (option is HelpOption { Action: HelpAction action } help)
-                help.Action = new HelpWithExamples(action);
+                (help.Description, help.Action) = ("Shows this page.", new HelpWithExamples(action));
+            else if (option is VersionOption)
+                option.Description = "Shows the version.";
         }
         return root;
     }

@@ -11,12 +11,12 @@ namespace DrainSim.Cli.Commands;
 internal sealed class LiquidsCommand : TableCommand
 {
     private const double IcePoint = 273.15;
+    private const double UsualTemperature = IcePoint + 20;
 
-    private readonly Option<double> temperature = new("--temperature", "-t")
+    private readonly Option<double?> temperature = new("--temperature", "-t")
     {
-        Description = "Temperature of the figures, with its unit, such as '40 degC' or '104 degF'.",
+        Description = "Temperature of the figures, with its unit, such as '40 degC' or '104 degF'; 20 degC unless given.",
         HelpName = "temperature",
-        DefaultValueFactory = _ => IcePoint + 20,
         CustomParser = ReadTemperature,
     };
 
@@ -36,7 +36,7 @@ internal sealed class LiquidsCommand : TableCommand
     /// <inheritdoc/>
     protected override ColumnTable Table(ParseResult parsed)
     {
-        double kelvin = parsed.GetValue(temperature);
+        double kelvin = parsed.GetValue(temperature) ?? UsualTemperature;
         var table = new ColumnTable(
             new Column { Title = "liquid", Key = "id" },
             new Column { Title = "what it is", Key = "name", IsWrapped = true },
@@ -103,7 +103,7 @@ internal sealed class LiquidsCommand : TableCommand
     private static string Celsius(double? kelvin) =>
         kelvin is { } value ? Exact(Math.Round(value - IcePoint, 6)) : "";
 
-    private static double ReadTemperature(ArgumentResult result)
+    private static double? ReadTemperature(ArgumentResult result)
     {
         QuantityReading reading = QuantityText.Read(result.Tokens.Single().Value, Quantities.Temperature);
         if (reading.IsRefused)

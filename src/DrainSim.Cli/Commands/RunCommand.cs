@@ -81,10 +81,11 @@ internal sealed class RunCommand : ExplainedCommand
     private FinishedRun Run(ParseResult parsed, ScenarioReading reading, string target, CancellationToken cancellation)
     {
         Scenario scenario = reading.Scenario!;
+        DrainResult result = Simulation.Run(scenario.Job, cancellation);
         var report = new RunReport
         {
             Name = scenario.Name,
-            Result = Simulation.Run(scenario.Job, cancellation),
+            Result = result with { Remedies = RemedySearch.Find(result, cancellation) },
             Units = units.For(parsed, scenario),
             Inputs = [.. scenario.Understood.Select(AsInput)],
         };

@@ -1,6 +1,7 @@
 using System.Globalization;
 using DrainSim.Draining;
 using DrainSim.Reports.Measures;
+using DrainSim.Reports.Wording;
 using DrainSim.Scenarios;
 
 namespace DrainSim.Cli.Terminal;
@@ -51,10 +52,9 @@ internal static class CheckBlock
         yield return ("Tank", $"{format.Volume(now.Volume)} of {format.Volume(job.Vessel.Capacity)} at a level of {format.Length(now.Level)}");
         yield return ("Liquid", $"{job.Liquid.Name}, {format.Temperature(job.Liquid.Temperature)}");
         yield return ("Driving head", format.Length(now.Head));
-        if (first.NoStart is { } reason)
-            yield return ("Flow", $"none: {reason}");
-        else
-            yield return ("Flow", $"{format.Flow(now.Flow)}, {format.Velocity(now.Velocity)}, Re {MeasureFormat.Number(Math.Round(now.Reynolds))}");
+        yield return ("Flow", first.NoStart is null
+            ? $"{format.Flow(now.Flow)}, {format.Velocity(now.Velocity)}, Re {MeasureFormat.Number(Math.Round(now.Reynolds))}"
+            : $"none: {Verdict.Reason(job, first.NoStart, first.Prime, format)}");
         yield return ("Low point", $"{format.Pressure(now.LowPointPressure)} absolute, {format.Pressure(now.LowPointMargin)} above its limit");
         if (first.Prime is not { } prime)
             yield break;

@@ -81,8 +81,9 @@ internal static class VerdictBlock
             ? "at its limit"
             : $"at least {format.Pressure(result.LeastMargin.Value)} above its limit";
         double pressure = result.Trace.At(Math.Clamp(result.LeastMargin.Time, 0, result.Trace.End)).LowPointPressure;
+        string place = node.Item is { } item && job.Line.Path[item].Name is { } name ? $", at {name}" : "";
         return $"{margin}: {format.Pressure(pressure)} absolute{When(result.LeastMargin.Time)}, "
-            + $"{format.Length(node.Elevation)} up at {node.Name}";
+            + $"{format.Length(node.Elevation)} up{place}";
     }
 
     private static string Prime(PrimeReport prime, MeasureFormat format) =>

@@ -12,7 +12,7 @@ public static class RunFiles
     /// </summary>
     /// <param name="folder">where they go; made where it is missing</param>
     /// <param name="report">the run and how it is told</param>
-    /// <param name="cancellation">tested between two files; what was written is then taken away</param>
+    /// <param name="cancellation">tested before every piece written; all of it is then taken away</param>
     /// <returns>their paths</returns>
     /// <exception cref="IOException">the disk refuses</exception>
     /// <exception cref="UnauthorizedAccessException">the folder or a file may not be written</exception>
@@ -24,7 +24,7 @@ public static class RunFiles
         foreach ((string ending, Action<Stream> write) in Contents(report))
         {
             cancellation.ThrowIfCancellationRequested();
-            output.Write(report.Name + ending, write);
+            output.Write(report.Name + ending, stream => write(new StoppableStream(stream, cancellation)));
         }
         cancellation.ThrowIfCancellationRequested();
         return output.Complete();

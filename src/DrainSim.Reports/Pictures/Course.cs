@@ -15,7 +15,7 @@ internal sealed class Course
         double end = trace.End;
         int stride = 1 + trace.Knots.Count / MostKnots;
         IEnumerable<double> times = Enumerable.Range(0, EvenPoints + 1)
-            .Select(i => end * i / EvenPoints)
+            .Select(i => Math.Min(end, end * i / EvenPoints))
             .Concat(trace.Knots.Where((_, i) => i % stride == 0))
             .Concat(result.Events.Select(moment => Math.Clamp(moment.Time, 0, end)));
         Instants = end > 0 ? [.. times.Distinct().Order().Select(trace.At)] : [trace.At(0), trace.At(0)];

@@ -31,7 +31,7 @@ public static class Verdict
             Outcome.Levelled => $"{stops}: at {level} it stands level with {FarEnd(result.Job)}.",
             Outcome.TargetReached => Target(result, format, time),
             Outcome.TimeLimit => $"Not done after {time}, the longest time given: {left} left, at {level}.",
-            Outcome.NeverStarted => $"Never starts: {Reason(result, format)}.",
+            Outcome.NeverStarted => $"Never starts: {Reason(result.Job, result.NoStart, result.Prime, format)}.",
             _ => throw new UnreachableException(result.Outcome.ToString()),
         };
     }
@@ -63,25 +63,28 @@ public static class Verdict
     internal static string FarEnd(Job job) =>
         job.ReceiverSurface > new LineProfile(job.Line).Outlet ? "the receiving surface" : "the outlet";
 
-    /// <summary>Why a line never started, as the rest of a sentence.</summary>
-    private static string Reason(DrainResult result, MeasureFormat format)
+    /// <summary>Why a line does not start, as the rest of a sentence.</summary>
+    /// <param name="job">the job</param>
+    /// <param name="reason">why; null where nothing is known</param>
+    /// <param name="prime">what the line needs before it runs; null for one that is no siphon</param>
+    /// <param name="format">writes the measures</param>
+    public static string Reason(Job job, NoStart? reason, PrimeReport? prime, MeasureFormat format)
     {
-        Job job = result.Job;
         string level = format.Length(job.Level);
-        return result.NoStart switch
+        return reason switch
         {
             NoStart.InletAboveLevel =>
                 $"the inlet, at {format.Length(job.Line.Inlet.Elevation)}, stands above the level of {level}",
             NoStart.NoDrivingHead =>
                 $"{FarEnd(job)}, at {format.Length(FarElevation(job))}, stands no lower than the level of {level}",
-            NoStart.LiftBeyondLimit when result.Prime is { } prime =>
+            NoStart.LiftBeyondLimit when prime is not null =>
                 $"the crest stands {format.Length(prime.StaticLift)} above the level, "
                 + $"and no column higher than {format.Length(prime.LiftLimit)} holds together",
             NoStart.LiftBeyondLimit => "the crest stands higher above the level than a column holds together",
             NoStart.NoPrime => "the liquid's front in the outer leg does not stand below the level",
             NoStart.ValveShut => "a valve on the line is shut",
             null => "the line never carries a flow",
-            _ => throw new UnreachableException(result.NoStart.ToString()),
+            _ => throw new UnreachableException(reason.ToString()),
         };
     }
 
