@@ -15,14 +15,12 @@ internal sealed class SizesCommand() : TableCommand("sizes", "Shows the nominal 
             new Column { Title = "kind", Key = "kind" },
             new Column { Title = "size", Key = "size" },
             new Column { Title = "or", Key = "size_in" },
-            new Column { Title = "schedule", Key = "schedule", IsNumber = true },
-            new Column { Title = "outside, mm", Key = "outside_diameter_mm", IsNumber = true },
+            new Column { Title = "sched.", Key = "schedule", IsNumber = true },
+            new Column { Title = "OD, mm", Key = "outside_diameter_mm", IsNumber = true },
             new Column { Title = "wall, mm", Key = "wall_mm", IsNumber = true },
             new Column { Title = "bore, mm", Key = "bore_mm", IsNumber = true },
             new Column { Title = "standard", Key = "standard", IsWrapped = true },
-            new Column { Title = "source" },
             new Column { Key = "source" });
-        var sources = new SourceNotes();
         foreach (PipeSize row in SizeTable.All)
         {
             table.Add(
@@ -35,11 +33,10 @@ internal sealed class SizesCommand() : TableCommand("sizes", "Shows the nominal 
                 Exact(row.Wall, 1000),
                 Exact(row.Bore, 1000),
                 row.Standard,
-                sources.NumberOf(row.Source),
                 row.Source);
         }
         table.Notes.Add($"A steel pipe without a schedule is taken as schedule {SizeTable.DefaultSchedule}.");
-        table.Notes.AddRange(sources.Lines);
+        table.Notes.Add("Source of every row: drainsim sizes --csv");
         return table;
     }
 }

@@ -20,7 +20,7 @@ internal static class VerdictBlock
         DrainResult result = report.Result;
         var format = new MeasureFormat(report.Units);
         output.WriteLine(report.Title);
-        WriteParagraph(output, Verdict.Sentence(result, format), hang: 0);
+        output.WriteLine(Verdict.Sentence(result, format));
         output.WriteLine();
         foreach ((string label, string text) in Facts(result, format))
             WriteParagraph(output, $"  {label,-14}{text}", hang: 16);
@@ -29,7 +29,7 @@ internal static class VerdictBlock
         WriteList(output, "Warnings", Warnings(run));
         WriteList(output, "Cautions", Cautions.For(result.Job, format).Select(caution => caution.Text));
         if (run.Files.Count > 0)
-            WriteSection(output, "Files", Paragraph.Lines("  " + string.Join(", ", run.Files), Paragraph.Width, hang: 2));
+            WriteSection(output, "Files", Paragraph.Lines("  " + FileList(run), Paragraph.Width, hang: 2));
     }
 
     /// <summary>Writes the verdict in one line, with the scenario's name where it is one of several.</summary>
@@ -93,6 +93,13 @@ internal static class VerdictBlock
 
     private static string When(double time) =>
         time <= 0 ? " at the start" : $" after {MeasureFormat.Duration(time)}";
+
+    /// <summary>The files, with the folder and the name once.</summary>
+    private static string FileList(FinishedRun run)
+    {
+        string start = run.Files[0][..(run.Files[0].LastIndexOf(run.Report.Name, StringComparison.Ordinal) + run.Report.Name.Length)];
+        return run.Files[0] + string.Concat(run.Files.Skip(1).Select(file => ", " + file[start.Length..]));
+    }
 
     private static void WriteSection(TextWriter output, string heading, IEnumerable<string> lines)
     {
