@@ -32,12 +32,20 @@ internal static class CommandLine
         };
         try
         {
-            return await parsed.InvokeAsync(invocation);
+            int code = await parsed.InvokeAsync(invocation);
+            await output.FlushAsync();
+            return code;
         }
         catch (OperationCanceledException)
         {
+            await output.FlushAsync();
             await error.WriteLineAsync("drainsim: interrupted; files already finished are kept.");
             return ExitCode.Interrupted;
+        }
+        catch (IOException fault)
+        {
+            await error.WriteLineAsync($"drainsim: the output cannot be written: {fault.Message}");
+            return ExitCode.NotWritten;
         }
 #pragma warning disable CA1031 // the last resort: people get one line, not a stack trace
         catch (Exception fault)

@@ -10,8 +10,10 @@ internal static class Program
         // UTF-8 whatever the machine's locale, so that the same job gives the same bytes.
         if (OperatingSystem.IsWindows())
             Console.OutputEncoding = Encoding.UTF8;
-        await using TextWriter output = Utf8(Console.OpenStandardOutput());
-        await using TextWriter error = Utf8(Console.OpenStandardError());
+        // Not disposed: a full disk would throw once more; the command line flushes them and tells.
+        StreamWriter output = Utf8(Console.OpenStandardOutput());
+        StreamWriter error = Utf8(Console.OpenStandardError());
+        error.AutoFlush = true;
         return await CommandLine.RunAsync(args, output, error);
     }
 

@@ -86,6 +86,17 @@ public sealed class SurroundingsTests
         Assert.True(written.Length < 5 * names.Length, "all runs were over before the interrupt");
     }
 
+    [Fact]
+    public void A_full_disk_under_the_output_ends_with_3_and_one_line()
+    {
+        Assert.SkipUnless(File.Exists("/dev/full"), "there is no /dev/full here");
+        using var folder = new TestFolder();
+        Finished full = DrainSimProcess.Wait(DrainSimProcess.Start(folder, "sh", DrainSimProcess.AsItIs,
+            "-c", $"'{DrainSimProcess.Executable}' liquids > /dev/full"));
+        Assert.Equal(3, full.ExitCode);
+        Assert.Contains("cannot be written", Assert.Single(full.ErrorLines), StringComparison.Ordinal);
+    }
+
     private static bool CanHideFonts(TestFolder folder)
     {
         if (!OperatingSystem.IsLinux() || !Directory.Exists("/usr/share/fonts"))
