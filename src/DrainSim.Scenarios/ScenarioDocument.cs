@@ -82,7 +82,7 @@ public sealed class ScenarioDocument
             return this;
         if (ParameterPath.Set(root, path, text) is { } changed)
             return new ScenarioDocument(FileName, Folder, source, changed, problems);
-        string help = Nearest.Find(path, Parameters) is { } near ? $"did you mean {Quote.Of(near)}?" : "'drainsim check --show' lists them";
+        string help = Nearest.Find(path, Parameters) is { } near ? $"did you mean {Quote.Of(near)}?" : "'drainsim check' lists them";
         Problem problem = new(0, 0, Quote.Plain(path), "no such parameter", help);
         return new ScenarioDocument(FileName, Folder, source, root, [.. problems, problem]);
     }
