@@ -18,27 +18,17 @@ internal static class CommandLine
     public static async Task<int> RunAsync(string[] args, TextWriter output, TextWriter error)
     {
         ParseResult parsed = Tree().Parse(args, new ParserConfiguration { ResponseFileTokenReplacer = null });
-        if (parsed.Action is not HelpAction && Refusal.Of(parsed) is { } refusal)
+        if (parsed.Action is not HelpWithExamples && Refusal.Of(parsed) is { } refusal)
         {
             await error.WriteLineAsync(refusal);
             return ExitCode.Refused;
         }
-        var invocation = new InvocationConfiguration
-        {
-            Output = output,
-            Error = error,
-            EnableDefaultExceptionHandler = false,
-            ProcessTerminationTimeout = EndsWithin,
-        };
         try
         {
-            int code = await parsed.InvokeAsync(invocation);
-            await output.FlushAsync();
-            return code;
+            return await InvokeAsync(parsed, output, error);
         }
         catch (OperationCanceledException)
         {
-            await output.FlushAsync();
             await error.WriteLineAsync("drainsim: interrupted; files already finished are kept.");
             return ExitCode.Interrupted;
         }
@@ -53,6 +43,24 @@ internal static class CommandLine
         {
             await error.WriteLineAsync($"drainsim: a fault of the program itself: {fault.GetType().Name}: {fault.Message}");
             return ExitCode.Fault;
+        }
+    }
+
+    private static async Task<int> InvokeAsync(ParseResult parsed, TextWriter output, TextWriter error)
+    {
+        try
+        {
+            return await parsed.InvokeAsync(new InvocationConfiguration
+            {
+                Output = output,
+                Error = error,
+                EnableDefaultExceptionHandler = false,
+                ProcessTerminationTimeout = EndsWithin,
+            });
+        }
+        finally
+        {
+            await output.FlushAsync();
         }
     }
 
