@@ -42,8 +42,8 @@ public sealed class SurroundingsTests
         folder.Write("siphon.yaml", Jobs.Siphon);
         DrainSimProcess.Run(folder, "run", "siphon.yaml", "--out", "process");
         Scenario scenario = ScenarioReader.Read(folder.Full("siphon.yaml")).Scenario!;
-        var report = new RunReport { Name = "siphon", Result = Simulation.Run(scenario.Job) };
-        RunFiles.Write(folder.Full("library"), report);
+        var report = new RunReport { Name = "siphon", Result = Simulation.Run(scenario.Job, TestContext.Current.CancellationToken) };
+        RunFiles.Write(folder.Full("library"), report, TestContext.Current.CancellationToken);
         Assert.Equal(folder.Bytes("library/siphon.png"), folder.Bytes("process/siphon.png"));
         Assert.Equal(folder.Bytes("library/siphon.line.png"), folder.Bytes("process/siphon.line.png"));
     }
