@@ -17,14 +17,14 @@ internal static class CommandLine
     /// <returns>an <see cref="ExitCode"/></returns>
     public static async Task<int> RunAsync(string[] args, TextWriter output, TextWriter error)
     {
-        ParseResult parsed = Tree().Parse(args, new ParserConfiguration { ResponseFileTokenReplacer = null });
-        if (parsed.Action is not HelpWithExamples && Refusal.Of(parsed) is { } refusal)
-        {
-            await error.WriteLineAsync(refusal);
-            return ExitCode.Refused;
-        }
         try
         {
+            ParseResult parsed = Tree().Parse(args, new ParserConfiguration { ResponseFileTokenReplacer = null });
+            if (parsed.Action is not HelpWithExamples && Refusal.Of(parsed) is { } refusal)
+            {
+                await error.WriteLineAsync(refusal);
+                return ExitCode.Refused;
+            }
             return await InvokeAsync(parsed, output, error);
         }
         catch (OperationCanceledException)

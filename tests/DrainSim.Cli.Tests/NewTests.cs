@@ -6,7 +6,7 @@ public sealed class NewTests
     [Theory]
     [InlineData("over-the-rim", "inlet_uncovered")]
     [InlineData("bottom-drain", "emptied")]
-    [InlineData("side-outlet", "inlet_uncovered")]
+    [InlineData("side-outlet", "target_reached")]
     [InlineData("pond-siphon", "target_reached")]
     [InlineData("boiling-crest", "vapour_break")]
     [InlineData("strapping-table", "inlet_uncovered")]

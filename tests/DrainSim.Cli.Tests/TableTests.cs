@@ -18,7 +18,7 @@ public sealed class TableTests
         Finished shown = DrainSimProcess.Run(folder, table);
         Assert.Equal(0, shown.ExitCode);
         Assert.Contains(name, shown.Output, StringComparison.Ordinal);
-        Assert.All(shown.OutputLines, line => Assert.InRange(line.TrimEnd().Length, 0, 120));
+        Assert.InRange(shown.OutputLines.Max(line => line.Length), 40, 120);
     }
 
     [Theory]

@@ -14,7 +14,7 @@ internal sealed class UnitsCommand() : TableCommand("units", "Shows the units in
         var table = new ColumnTable(
             new Column { Title = "quantity", Key = "quantity" },
             new Column { Title = "unit", Key = "unit" },
-            new Column { Title = "also written", Key = "other_spellings" },
+            new Column { Title = "also written", Key = "other_spellings", IsWrapped = true },
             new Column { Title = "is", Key = "definition", IsWrapped = true },
             new Column { Key = "offset", IsNumber = true },
             new Column { Title = "in SI", Key = "factor", IsNumber = true },

@@ -29,7 +29,10 @@ internal static class VerdictBlock
         WriteList(output, "Warnings", Warnings(run));
         WriteList(output, "Cautions", Cautions.For(result.Job, format).Select(caution => caution.Text));
         if (run.Files.Count > 0)
-            WriteSection(output, "Files", Paragraph.Lines("  " + FileList(run), Paragraph.Width, hang: 2));
+        {
+            output.WriteLine();
+            output.WriteLine("Files: " + FileList(run));
+        }
     }
 
     /// <summary>Writes the verdict in one line, with the scenario's name where it is one of several.</summary>
@@ -103,13 +106,17 @@ internal static class VerdictBlock
 
     private static void WriteSection(TextWriter output, string heading, IEnumerable<string> lines)
     {
-        string[] all = [.. lines];
-        if (all.Length == 0)
-            return;
-        output.WriteLine();
-        output.WriteLine(heading);
-        foreach (string line in all)
+        bool isFirst = true;
+        foreach (string line in lines)
+        {
+            if (isFirst)
+            {
+                output.WriteLine();
+                output.WriteLine(heading);
+            }
+            isFirst = false;
             output.WriteLine(line);
+        }
     }
 
     private static void WriteList(TextWriter output, string heading, IEnumerable<string> items) =>
