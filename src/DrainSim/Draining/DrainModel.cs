@@ -238,7 +238,7 @@ internal sealed class DrainModel : IOdeSystem, IEventSet
             Begin(now.With(t, watch.Line, mode with { IsLimited = !mode.IsLimited }));
         else if (EndingOf(watch, t, y) is { } ending)
             Begin(now.With(t, watch.Line, mode with { Ending = ending, EndedAt = t }));
-        return now.Modes.Any(m => m.IsAtWork);
+        return now.LinesAtWork > 0;
     }
 
     /// <summary>How the line of a watch ends when it fires; null where it does not end.</summary>

@@ -12,6 +12,8 @@ internal sealed class Epoch
     public Epoch(double from, Plant plant, LineMode[] modes, double inflowBefore)
     {
         (From, Plant, Modes, this.inflowBefore) = (from, plant, modes, inflowBefore);
+        foreach (LineMode mode in modes)
+            LinesAtWork += mode.IsAtWork ? 1 : 0;
     }
 
     /// <summary>When it begins, s.</summary>
@@ -24,7 +26,7 @@ internal sealed class Epoch
     public LineMode[] Modes { get; }
 
     /// <summary>Number of lines at work.</summary>
-    public int LinesAtWork => Modes.Count(mode => mode.IsAtWork);
+    public int LinesAtWork { get; }
 
     /// <summary>Volume that has run in since the start of the run, m³.</summary>
     /// <param name="t">time, s; at least <see cref="From"/></param>

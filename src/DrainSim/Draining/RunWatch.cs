@@ -77,18 +77,14 @@ internal static class RunWatch
             CompiledLine line = model.Epochs[0].Plant.Lines[index];
             foreach (EventCode code in DrawnAir)
             {
-                if (survey.FirstFall(state => Cover(state, code)) is not { } time)
+                if (survey.FirstFall(index, (level, flow) => level - line.Hydraulics.InletElevation - Depth(flow, code)) is not { } time)
                     continue;
-                (Instant instant, double depth) = survey.At(time, state => Depth(state, code));
+                (Instant instant, double depth) = survey.At(time, state => Depth(RunSurvey.FlowOf(state, index), code));
                 yield return new DrainEvent(time, code, instant.Level, instant.Volume, depth, index);
             }
 
-            double Depth(Instant state, EventCode code) =>
-                line.Submergence(RunSurvey.FlowOf(state, index)) is var band && code == EventCode.AirDrawn ? band.Least : band.Most;
-
-            double Cover(Instant state, EventCode code) => model.EpochAt(state.Time).Modes[index].IsAtWork
-                ? state.Level - line.Hydraulics.InletElevation - Depth(state, code)
-                : 1;
+            double Depth(double flow, EventCode code) =>
+                line.Submergence(flow) is var band && code == EventCode.AirDrawn ? band.Least : band.Most;
         }
     }
 
@@ -117,6 +113,8 @@ internal static class RunWatch
         Add(WarningCode.InertiaMatters, check.InertiaRatio, check.InertiaRatio > NoticeableInertia);
         Add(WarningCode.SurfaceVelocityMatters, check.SurfaceVelocityRatio, check.SurfaceVelocityRatio > NoticeableSurfaceVelocity);
         Add(WarningCode.TransitionFlow, check.TransitionShare, check.TransitionShare > NoticeableTransition);
+        DrainEvent air = result.Events.FirstOrDefault(e => e.Code == EventCode.AirMayBeDrawn);
+        Add(WarningCode.AirMayBeDrawn, air.Number, air.Code == EventCode.AirMayBeDrawn && air.Number > 0);
         bool siphons = model.Epochs[0].Plant.Lines.Any(line => line.Hydraulics.RisesAboveInlet);
         Add(WarningCode.ThinMargin, result.LeastMargin.Value,
             siphons && result.StoppedAt > 0 && result.LeastMargin.Value is > 0 and < ThinMargin);

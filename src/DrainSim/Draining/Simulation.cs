@@ -22,12 +22,15 @@ public static class Simulation
         var trajectory = new Trajectory(model.Dimension);
         Span<double> start = stackalloc double[model.Dimension];
         model.StartState(start);
-        var options = new IntegrationOptions { RelativeTolerance = job.Run.Tolerance };
+        var options = new IntegrationOptions { RelativeTolerance = job.Run.Tolerance, EventSamplesPerStep = EventSamples };
         IntegrationResult integration = new Integrator<DrainModel>(model)
             .Run(0, start, job.Run.Until, options, trajectory, cancellation);
         cancellation.ThrowIfCancellationRequested();
         return RunFindings.Of(model, integration, trajectory);
     }
+
+    /// <summary>Parts of a step at whose ends the events are looked at: what a run watches rarely turns back within one.</summary>
+    private const int EventSamples = 2;
 
     /// <summary>The numbers of a job at its first instant, without a run.</summary>
     /// <param name="job">the job</param>

@@ -7,6 +7,7 @@ public sealed class Trace
 {
     private readonly Func<double, Instant> at;
     private readonly Func<double, double> volumeAt;
+    private readonly double[] volumes;
 
     /// <param name="knots">times that bound smooth pieces, rising, the first 0, the last the end of the run, s</param>
     /// <param name="at">the state at a time between them</param>
@@ -16,6 +17,7 @@ public sealed class Trace
         ArgumentNullException.ThrowIfNull(knots);
         ArgumentOutOfRangeException.ThrowIfZero(knots.Count, nameof(knots));
         (Knots, this.at, this.volumeAt) = (knots, at, volumeAt);
+        volumes = [.. knots.Select(volumeAt)];
     }
 
     /// <summary>When the run stopped, s.</summary>
@@ -33,23 +35,16 @@ public sealed class Trace
     /// <param name="volume">volume in the tank, m³</param>
     public double? TimeAtVolume(double volume)
     {
-        if (volumeAt(0) <= volume)
-            return volumeAt(0) == volume ? 0 : null;
-        for (int i = 1; i < Knots.Count; i++)
-        {
-            double last = volumeAt(Knots[i]);
-            if (last == volume)
-                return Knots[i];
-            if (last < volume)
-                return TimeWithin(Knots[i - 1], Knots[i], volume);
-        }
-
-        return null;
+        if (volumes[0] <= volume)
+            return volumes[0] == volume ? 0 : null;
+        int i = Array.FindIndex(volumes, knot => knot <= volume);
+        if (i < 0)
+            return null;
+        return volumes[i] == volume ? Knots[i] : TimeWithin(Knots[i - 1], Knots[i], volume, volumes[i - 1] - volumes[i]);
     }
 
-    private double TimeWithin(double from, double to, double volume)
+    private double TimeWithin(double from, double to, double volume, double scale)
     {
-        double scale = volumeAt(from) - volumeAt(to);
         return Brent.TryFindRoot(t => (volumeAt(t) - volume) / scale, from, to, 1e-14, 100, out double root) ? root : to;
     }
 }
