@@ -24,11 +24,12 @@ public sealed class EventWordingTests
     [Fact]
     public void Every_member_has_a_code_and_a_text()
     {
-        Job job = new InventedRun().Job;
+        Job plain = new InventedRun().Job;
+        Job job = plain with { Timeline = [new Act { Time = 60, After = plain, Text = "the valve is set to 50 %" }] };
         Assert.All(Enum.GetValues<EventCode>(), code =>
         {
             Assert.Matches("^[a-z_]+$", ReportCodes.Of(code));
-            Assert.NotEmpty(EventWording.Text(new DrainEvent(1, code, 1, 1, 0), job));
+            Assert.NotEmpty(EventWording.Text(new DrainEvent(1, code, 1, 1, 1), job));
         });
         Assert.All(Enum.GetValues<WarningCode>(), code =>
         {

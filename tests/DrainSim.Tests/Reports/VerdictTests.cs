@@ -86,7 +86,10 @@ public sealed class VerdictTests
     public void Every_outcome_has_a_code_that_reads_back()
     {
         Assert.Equal(
-            ["emptied", "inlet_uncovered", "vapour_break", "levelled", "target_reached", "time_limit", "never_started"],
+            [
+                "emptied", "inlet_uncovered", "vapour_break", "air_break", "levelled", "vacuum_held", "yield_held", "balanced",
+                "receiver_full", "overflowed", "target_reached", "time_limit", "never_started",
+            ],
             OutcomeCodes.All);
         foreach (Outcome outcome in Enum.GetValues<Outcome>())
         {
