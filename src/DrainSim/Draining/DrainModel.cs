@@ -21,6 +21,7 @@ internal sealed class DrainModel : IOdeSystem, IEventSet
     private readonly List<Epoch> epochs;
     private readonly Plant[] plantsAfter;
     private Epoch now;
+    private double steadyGas;
 
     /// <param name="plant">the plant at the start</param>
     /// <param name="modes">how its lines work at the start</param>
@@ -31,7 +32,8 @@ internal sealed class DrainModel : IOdeSystem, IEventSet
         LineCount = plant.Lines.Length;
         StartVolume = vessel.Volume(Job.Level);
         plantsAfter = [.. Job.Timeline.Select(act => new Plant(act.After))];
-        hasMass = plant.Gas.Breathes || (plantsAfter.Length > 0 && plantsAfter.Append(plant).Any(p => p.Gas.IsConfined));
+        hasMass = plantsAfter.Append(plant).Any(p => p.Gas.HasRate || (plantsAfter.Length > 0 && p.Gas is { IsConfined: true, IsSteady: false }));
+        steadyGas = atmosphere;
         StartMass = plant.Gas.StartMass;
         guesses = new double[LineCount];
         watches = WatchList.Of(plant, TargetVolume);
@@ -65,9 +67,6 @@ internal sealed class DrainModel : IOdeSystem, IEventSet
 
     /// <summary>What the event functions watch, in the order of their indices.</summary>
     public IReadOnlyList<Watch> Watches => watches;
-
-    /// <summary>Whether the gas over the liquid decides how stiff the balance is.</summary>
-    public bool IsStiff => hasMass;
 
     private double? TargetVolume => (run.StopAtLevel, run.StopAtVolume) switch
     {
@@ -105,8 +104,9 @@ internal sealed class DrainModel : IOdeSystem, IEventSet
     }
 
     /// <summary>Pressure on the liquid, Pa absolute.</summary>
-    public double GasPressure(Epoch epoch, double volume, ReadOnlySpan<double> y) =>
-        epoch.Plant.Gas.Pressure(volume, hasMass ? y[LineCount] : StartMass);
+    public double GasPressure(Epoch epoch, double t, double volume, ReadOnlySpan<double> y) => epoch.Plant.Gas.IsSteady
+        ? SteadyPressure(epoch, t, vessel.Level(volume), y)
+        : epoch.Plant.Gas.Pressure(volume, hasMass ? y[LineCount] : StartMass);
 
     /// <summary>Flow of a line out of the tank, solved for, m³/s.</summary>
     public double Flow(Epoch epoch, int line, double surface, double gas, double delivered, bool limited)
@@ -126,7 +126,7 @@ internal sealed class DrainModel : IOdeSystem, IEventSet
     public Instant At(double t, ReadOnlySpan<double> y)
     {
         Epoch epoch = EpochAt(t);
-        double volume = Volume(epoch, t, y), surface = vessel.Level(volume), gas = GasPressure(epoch, volume, y);
+        double volume = Volume(epoch, t, y), surface = vessel.Level(volume), gas = GasPressure(epoch, t, volume, y);
         Span<double> flows = stackalloc double[LineCount];
         for (int i = 0; i < LineCount; i++)
             flows[i] = Flow(epoch, i, surface, gas, y[i], epoch.Modes[i].IsLimited);
@@ -140,7 +140,7 @@ internal sealed class DrainModel : IOdeSystem, IEventSet
     public Instant At(double t, ReadOnlySpan<double> y, ReadOnlySpan<double> flows)
     {
         Epoch epoch = EpochAt(t);
-        double volume = Volume(epoch, t, y), surface = vessel.Level(volume), gas = GasPressure(epoch, volume, y);
+        double volume = Volume(epoch, t, y), surface = vessel.Level(volume), gas = GasPressure(epoch, t, volume, y);
         (double pressure, double margin) = LowPoint(epoch, surface, gas, flows);
         CompiledLine first = epoch.Plant.Lines[0];
         double total = 0;
@@ -166,11 +166,11 @@ internal sealed class DrainModel : IOdeSystem, IEventSet
     /// <inheritdoc/>
     public void Derivative(double t, ReadOnlySpan<double> y, Span<double> dydt)
     {
-        double volume = Volume(now, t, y), surface = vessel.Level(volume), gas = GasPressure(now, volume, y);
+        double volume = Volume(now, t, y), surface = vessel.Level(volume), gas = GasPressure(now, t, volume, y);
         for (int i = 0; i < LineCount; i++)
             dydt[i] = Flow(now, i, surface, gas, y[i], now.Modes[i].IsLimited);
         if (hasMass)
-            dydt[LineCount] = now.Plant.Gas.MassFlow(gas);
+            dydt[LineCount] = now.Plant.Gas.HasRate ? now.Plant.Gas.MassFlow(gas) : 0;
     }
 
     /// <summary>
@@ -180,7 +180,7 @@ internal sealed class DrainModel : IOdeSystem, IEventSet
     /// </summary>
     public void ErrorScale(double t, ReadOnlySpan<double> y, ReadOnlySpan<double> dydt, Span<double> scale)
     {
-        double volume = Volume(now, t, y), surface = vessel.Level(volume), gas = GasPressure(now, volume, y);
+        double volume = Volume(now, t, y), surface = vessel.Level(volume), gas = GasPressure(now, t, volume, y);
         for (int i = 0; i < LineCount; i++)
         {
             CompiledLine line = now.Plant.Lines[i];
@@ -203,7 +203,7 @@ internal sealed class DrainModel : IOdeSystem, IEventSet
         double unclamped = StartVolume + now.InflowVolume(t);
         for (int i = 0; i < LineCount; i++)
             unclamped -= y[i];
-        var moment = new Moment(t, unclamped, surface, GasPressure(now, volume, y));
+        var moment = new Moment(t, unclamped, surface, GasPressure(now, t, volume, y));
         for (int i = 0; i < watches.Length; i++)
             values[i] = Value(watches[i], moment, y, dydt);
     }
@@ -289,6 +289,32 @@ internal sealed class DrainModel : IOdeSystem, IEventSet
         return null;
     }
 
+    /// <summary>
+    /// The pressure at which vents and lines agree, by a secant held in a bracket: more pressure drives more out, and to
+    /// let more in the pressure has to be less, so that there is one root.
+    /// </summary>
+    private double SteadyPressure(Epoch epoch, double t, double surface, ReadOnlySpan<double> y)
+    {
+        double low = 0, high = 2 * atmosphere, p = steadyGas, lastP = double.NaN, lastExcess = 0;
+        for (int turn = 0; turn < 100; turn++)
+        {
+            double outflow = -epoch.Inflow(t);
+            for (int i = 0; i < LineCount; i++)
+                outflow += Flow(epoch, i, surface, p, y[i], epoch.Modes[i].IsLimited);
+            double asked = epoch.Plant.Gas.SteadyPressure(outflow) ?? epoch.Plant.Job.Liquid.VapourPressure;
+            double excess = asked - p;
+            (low, high) = excess > 0 ? (p, high) : (low, p);
+            double next = double.IsNaN(lastP) ? asked : p - excess * (p - lastP) / (excess - lastExcess);
+            if (!(next > low && next < high))
+                next = Math.Abs(excess) <= 1e-12 * atmosphere ? p : (low + high) / 2;
+            if (Math.Abs(next - p) <= 1e-13 * atmosphere)
+                return steadyGas = next;
+            (lastP, lastExcess, p) = (p, excess, next);
+        }
+
+        return steadyGas = p;
+    }
+
     private void Begin(Epoch next)
     {
         epochs.Add(next);
@@ -298,8 +324,9 @@ internal sealed class DrainModel : IOdeSystem, IEventSet
     private Epoch AfterAct(int ordinal, double t, Span<double> y)
     {
         Plant after = plantsAfter[ordinal];
-        if (hasMass && after.Gas.IsConfined && !now.Plant.Gas.IsConfined)
-            y[LineCount] = after.Gas.MassAt(GasPressure(now, Volume(now, t, y), y), Volume(now, t, y));
+        bool massIsKnown = now.Plant.Gas is { IsConfined: true, IsSteady: false };
+        if (hasMass && after.Gas.IsConfined && !massIsKnown)
+            y[LineCount] = after.Gas.MassAt(GasPressure(now, t, Volume(now, t, y), y), Volume(now, t, y));
         return now.With(t, after);
     }
 

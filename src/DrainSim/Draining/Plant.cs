@@ -11,6 +11,8 @@ internal sealed class Plant
         Job = job;
         Lines = [.. job.DrawOffs.Select(drawOff => new CompiledLine(drawOff, job))];
         Gas = new GasLaw(job);
+        double liquid = job.Vessel.Volume(job.Level), atmosphere = job.Site.AtmosphericPressure;
+        Gas.Settle(Lines.Sum(line => line.Flow(new LineConditions(job.Level, atmosphere, 0, false), 0)), liquid);
     }
 
     /// <summary>The job.</summary>

@@ -57,7 +57,10 @@ internal sealed class RunSurvey
         ? Least(i => i.LowPointMargin)
         : Least(i => model.EpochAt(i.Time) is var epoch && (epoch.Modes[line].IsAtWork || history.EndTime == 0)
             ? epoch.Plant.Lines[line].Margin(FlowOf(i, line), i.Level, i.HeadspacePressure ?? model.Job.Site.AtmosphericPressure)
-            : double.PositiveInfinity);
+            : NotAtWork);
+
+    /// <summary>A margin above every real one, Pa, for a line that no longer works.</summary>
+    private const double NotAtWork = 1e12;
 
     /// <summary>Largest flow of one line, m³/s.</summary>
     public Extreme LargestFlow(int line) => Largest(i => FlowOf(i, line));
