@@ -2,6 +2,7 @@ using System.CommandLine;
 using DrainSim.Cli.Terminal;
 using DrainSim.Draining;
 using DrainSim.Reports;
+using DrainSim.Reports.Measures;
 using DrainSim.Reports.Wording;
 using DrainSim.Scenarios;
 
@@ -74,7 +75,7 @@ internal sealed class RunCommand : ExplainedCommand
         if (files.Length > 1 && !parsed.GetValue(quiet))
             RunSummary.Write(parsed.InvocationConfiguration.Output, finished, target);
         return finished.Any(run => run.WriteFault is not null) ? ExitCode.NotWritten
-            : finished.All(run => IsAsExpected(parsed, run)) ? ExitCode.Ran
+            : finished.All(run => IsAsExpected(parsed, run) && KeepsLimits(run)) ? ExitCode.Ran
             : ExitCode.NotAsExpected;
     }
 
@@ -107,9 +108,13 @@ internal sealed class RunCommand : ExplainedCommand
             error.WriteLine($"drainsim run: '{run.Report.Name}' was expected to end as {parsed.GetValue(expected)}, "
                 + $"and it ends as {OutcomeCodes.Code(run.Report.Result.Outcome)}.");
         }
+        foreach (LimitCheck check in run.Report.Result.LimitChecks.Where(check => !check.IsKept))
+            error.WriteLine($"drainsim run: '{run.Report.Name}' breaks a limit: {LimitWording.Text(check, new MeasureFormat(run.Report.Units))}");
         output.Flush();
         error.Flush();
     }
+
+    private static bool KeepsLimits(FinishedRun run) => run.Report.Result.LimitChecks.All(check => check.IsKept);
 
     private bool IsAsExpected(ParseResult parsed, FinishedRun run) =>
         parsed.GetValue(expected) is not { } code || code == OutcomeCodes.Code(run.Report.Result.Outcome);

@@ -24,6 +24,9 @@ internal static class VerdictBlock
         output.WriteLine();
         foreach ((string label, string text) in Facts(result, format))
             WriteParagraph(output, $"  {label,-14}{text}", hang: 16);
+        if (result.Lines.Count > 1)
+            WriteList(output, "Lines", result.Lines.Select((line, i) => LimitWording.Text(line, i, format)));
+        WriteList(output, "Limits", result.LimitChecks.Select(check => LimitWording.Text(check, format)));
         WriteSection(output, "Levels to expect", LevelTable.Lines(result, format));
         WriteList(output, "What would let it go on", result.Remedies.Select(remedy => EventWording.Text(remedy, format)));
         WriteList(output, "Warnings", Warnings(run));
@@ -72,6 +75,12 @@ internal static class VerdictBlock
                 + $"{format.Velocity(result.LargestVelocity.Value)} in the narrowest bore");
             yield return ("Low point", LowPoint(result, format));
         }
+        if (result.LargestVacuum is { } vacuum)
+            yield return ("Headspace", $"{format.Pressure(vacuum.Value)} below the atmosphere at most,{When(vacuum.Time)}");
+        if (result.ReceiverLevel is { } depth)
+            yield return ("Receiver", $"{format.Length(depth)} deep when it stopped");
+        if (result.BalanceLevel is { } balance)
+            yield return ("Balance", $"inflow and outflow are equal at a level of {format.Length(balance)}");
         if (result.Prime is { } prime)
             yield return ("To start", Prime(prime, format));
     }

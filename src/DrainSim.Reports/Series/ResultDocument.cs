@@ -35,6 +35,7 @@ public static class ResultDocument
             WriteFindings(json, report);
             WriteEvents(json, report);
             WriteTimes(json, report.Result);
+            PlantFindings.Write(json, report.Result, report.Format);
             WriteAdvice(json, report);
             WriteChecks(json, report.Result);
             WriteInputs(json, report.Inputs);
@@ -62,6 +63,8 @@ public static class ResultDocument
         Extreme(json, "largest_velocity", "_m_s", result.LargestVelocity);
         Number(json, "receiver_level_m", last.ReceiverLevel);
         Number(json, "headspace_pressure_Pa", last.HeadspacePressure);
+        Number(json, "largest_vacuum_Pa", result.LargestVacuum?.Value);
+        Number(json, "balance_level_m", result.BalanceLevel);
     }
 
     private static void WriteEvents(Utf8JsonWriter json, RunReport report)
