@@ -12,7 +12,6 @@ internal sealed class CompiledLine
     private readonly double receiverBottom, bore;
     private readonly int parallel;
     private readonly PartFullInlet? tail;
-    private readonly CriticalSubmergence submergence;
 
     /// <param name="drawOff">the line and what it discharges into</param>
     /// <param name="job">the job that it belongs to</param>
@@ -39,7 +38,6 @@ internal sealed class CompiledLine
             + (tail is not null ? Math.Max(job.Run.SettledWithin, LeastFilm) : drawsAirAtCrown ? Hydraulics.Node(0).Bore : 0);
         UncoverVolume = job.Vessel.Volume(UncoverLevel);
         RegimeHeads = [.. Hydraulics.RegimeFlows.Select(Hydraulics.HeadLoss)];
-        submergence = new CriticalSubmergence(line.Inlet.Facing);
     }
 
     /// <summary>Volume in the tank at which the inlet takes air, m³.</summary>
@@ -121,10 +119,13 @@ internal sealed class CompiledLine
         ? double.PositiveInfinity
         : parallel * tail.Limit(surface - Hydraulics.InletElevation, gravity, out _);
 
+    private static readonly CriticalSubmergence[] Submergences =
+        [.. Enum.GetValues<InletFacing>().Select(facing => new CriticalSubmergence(facing))];
+
     /// <summary>The submergences at which air may be drawn at a flow.</summary>
     /// <param name="flow">flow of all parallel lines, m³/s</param>
     public SubmergenceBand Submergence(double flow) =>
-        submergence.At(Hydraulics.Velocity(Math.Max(0, flow)), bore, gravity);
+        Submergences[(int)DrawOff.Line.Inlet.Facing].At(Hydraulics.Velocity(Math.Max(0, flow)), bore, gravity);
 
     /// <summary>Level under which air is drawn by the least of the published forms, m.</summary>
     /// <param name="flow">flow of all parallel lines, m³/s</param>

@@ -3,6 +3,10 @@ namespace DrainSim.Draining;
 /// <summary>All that a run found.</summary>
 public sealed record DrainResult
 {
+    private readonly Lazy<IReadOnlyList<DrainEvent>> events = new([]);
+    private readonly Lazy<IReadOnlyList<RunWarning>> warnings = new([]);
+    private readonly Lazy<SteadinessCheck> steadiness = new(new SteadinessCheck(0, 0, 0));
+
     /// <summary>The job that was run.</summary>
     public required Job Job { get; init; }
 
@@ -45,8 +49,8 @@ public sealed record DrainResult
     /// <summary>Largest velocity in the narrowest bore, m/s, and when.</summary>
     public required Extreme LargestVelocity { get; init; }
 
-    /// <summary>The moments worth knowing, in time order.</summary>
-    public required IReadOnlyList<DrainEvent> Events { get; init; }
+    /// <summary>The moments worth knowing, in time order; looked for when first asked for.</summary>
+    public IReadOnlyList<DrainEvent> Events { get => events.Value; init => events = new(value); }
 
     /// <summary>The whole course of the run.</summary>
     public required Trace Trace { get; init; }
@@ -54,11 +58,11 @@ public sealed record DrainResult
     /// <summary>What a siphon needs before it runs; null for a line that never rises above the level.</summary>
     public PrimeReport? Prime { get; init; }
 
-    /// <summary>How fair the quasi-steady picture is.</summary>
-    public required SteadinessCheck Steadiness { get; init; }
+    /// <summary>How fair the quasi-steady picture is; judged when first asked for.</summary>
+    public SteadinessCheck Steadiness { get => steadiness.Value; init => steadiness = new(value); }
 
-    /// <summary>What makes the result less sure.</summary>
-    public required IReadOnlyList<RunWarning> Warnings { get; init; }
+    /// <summary>What makes the result less sure; looked for when first asked for.</summary>
+    public IReadOnlyList<RunWarning> Warnings { get => warnings.Value; init => warnings = new(value); }
 
     /// <summary>What was found for each line, in the order of the job.</summary>
     public required IReadOnlyList<LineResult> Lines { get; init; }
@@ -80,6 +84,15 @@ public sealed record DrainResult
 
     /// <summary>What would let it go on; empty where nothing is needed or nothing helps.</summary>
     public IReadOnlyList<Remedy> Remedies { get; init; } = [];
+
+    /// <summary>Looks for the events.</summary>
+    internal Func<IReadOnlyList<DrainEvent>> EventSource { init => events = new(value); }
+
+    /// <summary>Judges the steadiness.</summary>
+    internal Func<SteadinessCheck> SteadinessSource { init => steadiness = new(value); }
+
+    /// <summary>Looks for the warnings.</summary>
+    internal Func<IReadOnlyList<RunWarning>> WarningSource { init => warnings = new(value); }
 
     /// <summary>What the run cost.</summary>
     public required Counters Counters { get; init; }

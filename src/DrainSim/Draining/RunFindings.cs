@@ -29,7 +29,6 @@ internal static class RunFindings
         Trace trace = history.ToTrace();
         LineResult[] lines = [.. Enumerable.Range(0, model.LineCount).Select(i => LineReport.Of(model, history, survey, i))];
         LineResult worst = lines.MinBy(line => line.LeastMargin.Value)!;
-        passed.AddRange(RunWatch.Submergences(model, survey));
         var result = new DrainResult
         {
             Job = model.Job,
@@ -46,11 +45,10 @@ internal static class RunFindings
             LeastMarginNode = worst.LeastMarginNode,
             LargestFlow = lines.Length == 1 ? lines[0].LargestFlow : survey.Largest(i => i.Flow),
             LargestVelocity = lines.MaxBy(line => line.LargestVelocity.Value)!.LargestVelocity,
-            Events = AllEvents(model, outcome, trace, passed, last),
+            EventSource = () => AllEvents(model, outcome, trace, [.. passed, .. RunWatch.Submergences(model, survey)], last),
             Trace = trace,
             Prime = lines[0].Prime,
-            Steadiness = survey.Steadiness(passed),
-            Warnings = [],
+            SteadinessSource = () => survey.Steadiness(passed),
             Lines = lines,
             LargestVacuum = last.HeadspacePressure is null
                 ? null
@@ -61,7 +59,11 @@ internal static class RunFindings
             Counters = new Counters(cost.Steps, cost.RejectedSteps, cost.DerivativeEvaluations,
                 model.FlowSolutions, cost.EventEvaluations),
         };
-        return result with { Warnings = RunWatch.Warnings(result, model, survey), LimitChecks = LimitCheckList.Of(result, survey) };
+        return result with
+        {
+            WarningSource = () => RunWatch.Warnings(result, model, survey),
+            LimitChecks = LimitCheckList.Of(result, survey),
+        };
     }
 
     private static Outcome OutcomeOf(DrainModel model, IntegrationResult integration)

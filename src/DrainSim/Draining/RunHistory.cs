@@ -69,7 +69,7 @@ internal sealed class RunHistory
     public double Level(double t) => model.Job.Vessel.Level(Volume(t));
 
     /// <summary>The run as its reader sees it.</summary>
-    public Trace ToTrace() => new(Knots, At, Volume);
+    public Trace ToTrace() => new(Knots, At, Volume, Array.ConvertAll(Instants, instant => instant.Volume));
 
     private static List<double> KnotsOf(Trajectory trajectory, double end)
     {

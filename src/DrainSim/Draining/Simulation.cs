@@ -19,7 +19,7 @@ public static class Simulation
         if (AtRest(plant, modes) is { } ending)
             return RunFindings.OfNoRun(model, ending);
 
-        var trajectory = new Trajectory(model.Dimension);
+        var trajectory = new Trajectory(model.Dimension, FirstSteps);
         Span<double> start = stackalloc double[model.Dimension];
         model.StartState(start);
         var options = new IntegrationOptions { RelativeTolerance = job.Run.Tolerance, EventSamplesPerStep = EventSamples };
@@ -28,6 +28,9 @@ public static class Simulation
         cancellation.ThrowIfCancellationRequested();
         return RunFindings.Of(model, integration, trajectory);
     }
+
+    /// <summary>Steps for which a trajectory has room at first: most runs need no more.</summary>
+    private const int FirstSteps = 16;
 
     /// <summary>Parts of a step at whose ends the events are looked at: what a run watches rarely turns back within one.</summary>
     private const int EventSamples = 2;

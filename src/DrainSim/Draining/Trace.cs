@@ -12,12 +12,14 @@ public sealed class Trace
     /// <param name="knots">times that bound smooth pieces, rising, the first 0, the last the end of the run, s</param>
     /// <param name="at">the state at a time between them</param>
     /// <param name="volumeAt">the volume in the tank, m³, at a time between them; cheaper than the whole state</param>
-    public Trace(IReadOnlyList<double> knots, Func<double, Instant> at, Func<double, double> volumeAt)
+    /// <param name="volumes">the volumes at the knots, m³; null to have them asked for</param>
+    public Trace(
+        IReadOnlyList<double> knots, Func<double, Instant> at, Func<double, double> volumeAt, double[]? volumes = null)
     {
         ArgumentNullException.ThrowIfNull(knots);
         ArgumentOutOfRangeException.ThrowIfZero(knots.Count, nameof(knots));
         (Knots, this.at, this.volumeAt) = (knots, at, volumeAt);
-        volumes = [.. knots.Select(volumeAt)];
+        this.volumes = volumes ?? [.. knots.Select(volumeAt)];
     }
 
     /// <summary>When the run stopped, s.</summary>

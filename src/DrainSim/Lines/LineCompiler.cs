@@ -46,8 +46,8 @@ internal sealed class LineCompiler
     /// <summary>Whether a valve is shut.</summary>
     public bool IsShut { get; private set; }
 
-    /// <summary>The bores of straight runs and of the outlet, rising, m.</summary>
-    public IEnumerable<double> RegimeBores => new SortedSet<double>(runBores) { bore };
+    /// <summary>The bores of straight runs and of the outlet, m.</summary>
+    public IEnumerable<double> RegimeBores => [.. runBores, bore];
 
     /// <summary>The losses as arrays.</summary>
     public LineLosses Losses() => new()
@@ -55,15 +55,31 @@ internal sealed class LineCompiler
         Walls = [.. walls],
         Steps = [.. steps],
         TotalPipe = [.. totalPipe],
-        Kinks = RegimeFlows(nodes.Select(node => node.Bore).ToHashSet()),
+        Kinks = RegimeFlows(nodes.Select(node => node.Bore)),
     };
 
     /// <summary>Flows of one line at which a bore passes a regime limit, rising, m³/s.</summary>
-    public double[] RegimeFlows(IEnumerable<double> bores) => bores
-        .SelectMany(d => new[] { FrictionFactor.LaminarLimit / PerFlow(d), FrictionFactor.TurbulentLimit / PerFlow(d) })
-        .Distinct()
-        .Order()
-        .ToArray();
+    public double[] RegimeFlows(IEnumerable<double> bores)
+    {
+        var flows = new List<double>(4); // a line has a bore or two: a list is cheaper than a set
+        foreach (double d in bores)
+        {
+            double laminar = FrictionFactor.LaminarLimit / PerFlow(d);
+            if (flows.Contains(laminar))
+                continue;
+            flows.Add(laminar);
+            flows.Add(FrictionFactor.TurbulentLimit / PerFlow(d));
+        }
+
+        flows.Sort();
+        for (int i = flows.Count - 1; i > 0; i--)
+        {
+            if (flows[i] == flows[i - 1])
+                flows.RemoveAt(i);
+        }
+
+        return [.. flows];
+    }
 
     private double PerFlow(double d) => 4 / (Math.PI * d * kinematicViscosity);
 
