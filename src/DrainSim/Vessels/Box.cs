@@ -25,5 +25,5 @@ public sealed record Box : Vessel
     public override double Area(double level) => Length * Width;
 
     /// <inheritdoc/>
-    public override double Level(double volume) => Math.Clamp(volume / (Length * Width), 0, WallHeight);
+    public override double Level(double volume) => WallHeight * Math.Clamp(volume / Capacity, 0, 1);
 }

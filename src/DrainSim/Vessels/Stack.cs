@@ -44,6 +44,8 @@ public sealed record Stack : Vessel
     /// <inheritdoc/>
     public override double Volume(double level)
     {
+        if (level >= Height)
+            return Capacity;
         int i = IndexAt(bottoms, level);
         return volumesBelow[i] + Sections[i].Volume(level - bottoms[i]);
     }
@@ -51,6 +53,8 @@ public sealed record Stack : Vessel
     /// <inheritdoc/>
     public override double Area(double level)
     {
+        if (level >= Height)
+            return Sections[^1].Area(double.PositiveInfinity);
         int i = IndexAt(bottoms, level);
         return Sections[i].Area(level - bottoms[i]);
     }
@@ -58,6 +62,8 @@ public sealed record Stack : Vessel
     /// <inheritdoc/>
     public override double Level(double volume)
     {
+        if (volume >= Capacity)
+            return Height;
         int i = IndexAt(volumesBelow, volume);
         return bottoms[i] + Sections[i].Level(volume - volumesBelow[i]);
     }
@@ -68,7 +74,7 @@ public sealed record Stack : Vessel
     /// <inheritdoc/>
     public override int GetHashCode() => HashCode.Combine(Sections.Count, Sections[0]);
 
-    // The section that holds a level or a volume: the upper one at a joint, the last one above the brim.
+    // The section that holds a level or a volume: the upper one at a joint.
     private static int IndexAt(double[] starts, double value)
     {
         int i = starts.Length - 2;

@@ -1,5 +1,6 @@
 using CsCheck;
 using DrainSim.Vessels;
+using MathNet.Numerics.Integration;
 
 namespace DrainSim.Tests.Vessels;
 
@@ -19,6 +20,16 @@ public sealed class StrappingTableTests
             double below = table.Area(row.Level - hair), above = table.Area(row.Level + hair);
             return Math.Abs(above / below - 1) < 1e-8;
         }), iter: 500);
+
+    [Fact]
+    public void Between_two_rows_the_volume_grows_by_the_integral_of_the_area() =>
+        Gen.Select(VesselGen.StrappingTable, Gen.Double[0, 1]).Sample((table, share) =>
+            table.Rows.Zip(table.Rows.Skip(1)).All(rows =>
+            {
+                double from = rows.First.Level, to = from + share * (rows.Second.Level - from);
+                double grown = GaussLegendreRule.Integrate(table.Area, from, to, 4);
+                return Math.Abs(table.Volume(to) - rows.First.Volume - grown) <= 1e-14 * table.Capacity;
+            }), iter: 500);
 
     [Fact]
     public void The_area_is_greater_than_0_everywhere() =>
