@@ -14,8 +14,9 @@ public sealed class ResultDocumentTests
             "drained_volume_m3", "left_volume_m3", "final_level_m",
             "least_low_point_pressure_Pa", "least_low_point_pressure_at_s", "least_margin_Pa", "least_margin_at_s",
             "least_margin_node", "largest_flow_m3_s", "largest_flow_at_s", "largest_velocity_m_s",
-            "largest_velocity_at_s", "receiver_level_m", "headspace_pressure_Pa", "events", "times_to",
-            "first_instant", "warnings", "remedies", "cautions", "prime", "fall_back", "steadiness", "counters",
+            "largest_velocity_at_s", "receiver_level_m", "headspace_pressure_Pa", "largest_vacuum_Pa", "balance_level_m",
+            "events", "times_to",
+            "first_instant", "limits", "lines", "warnings", "remedies", "cautions", "prime", "fall_back", "steadiness", "counters",
             "inputs",
         ],
         Document(new InventedRun()).EnumerateObject().Select(key => key.Name));
