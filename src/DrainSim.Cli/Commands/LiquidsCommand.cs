@@ -1,6 +1,6 @@
 using System.CommandLine;
-using DrainSim.Cli.Terminal;
 using System.CommandLine.Parsing;
+using DrainSim.Cli.Terminal;
 using DrainSim.Liquids;
 using DrainSim.Reports.Measures;
 using DrainSim.Scenarios.Units;

@@ -1,6 +1,6 @@
 using System.CommandLine;
-using DrainSim.Cli.Terminal;
 using System.Globalization;
+using DrainSim.Cli.Terminal;
 
 namespace DrainSim.Cli.Commands;
 

@@ -1,6 +1,6 @@
 using System.CommandLine;
-using DrainSim.Cli.Terminal;
 using System.Globalization;
+using DrainSim.Cli.Terminal;
 using DrainSim.Scenarios.Units;
 
 namespace DrainSim.Cli.Commands;
