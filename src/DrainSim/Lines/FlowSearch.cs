@@ -16,8 +16,8 @@ namespace DrainSim.Lines;
 /// </remarks>
 internal static class FlowSearch
 {
-    /// <summary>Root of the last bit of a double.</summary>
-    private const double LastBitRoot = 1.5e-8;
+    /// <summary>Root of some last bits of a double; a 24th of its square, the cubic's error, is less than one.</summary>
+    private const double LastBitRoot = 5e-8;
 
     /// <summary>Widest pair of points, in ln(used), whose cubic is trusted.</summary>
     private const double WidestPair = 0.5;

@@ -2,12 +2,14 @@ namespace DrainSim.Lines;
 
 /// <summary>The friction law of <see cref="FrictionFactor"/> for one wall, with what it needs worked out once.</summary>
 /// <remarks><code>
-/// x = 1/√f:  F(x) = x + c·ln(a + b·x) = 0,  a = k/3.7,  b = 2.51/Re,  c = 2/ln 10
+/// x = 1/√f:  F(x) = x + c·ln(w) = 0,  w = a + b·x,  a = k/3.7,  b = 2.51/Re,  c = 2/ln 10
 /// start (Haaland):  x = −1.8·log10( (k/3.7)^1.11 + 6.9/Re )
-/// twice (Halley):   x ← x − 2·F·F'/(2·F'² − F·F''),  F' = 1 + p,  F'' = −p²/c,  p = c·b/(a + b·x)
-/// slope:            d ln f/d ln Re = −2·p/(1 + p)
+/// first (Halley):   x ← x − 2·F·F'/(2·F'² − F·F''),  F' = 1 + c·b/w,  F'' = −c·b²/w², both multiplied by w²
+/// then (Newton):    x ← x − F/F'
+/// slope:            d ln f/d ln Re = −2·c·b/(w + c·b)
 /// </code>
-/// The start is within 1 % of x, and each turn cubes the error: the second ends at the last bits.
+/// The start is within 1 % of x; the first turn cubes the error and the second squares what is left, to the last
+/// bits. The second logarithm is the first one and a short series, and divisions are few: this is the inner loop.
 /// Source of the start: S. E. Haaland, J. Fluids Eng. 105 (1983) 89–90, doi:10.1115/1.3240948.
 /// </remarks>
 internal readonly struct PipeWall
@@ -62,21 +64,31 @@ internal readonly struct PipeWall
     /// <summary>The Colebrook–White factor, 1, and its slope d ln f/d ln Re.</summary>
     public double Turbulent(double re, out double slope)
     {
-        double b = 2.51 / re;
-        double x = HaalandScale * Math.Log(haaland + 6.9 / re);
-        x = Halley(x, b);
-        x = Halley(x, b);
-        double p = C * b / (a + b * x);
-        slope = -2 * p / (1 + p);
+        double inverse = 1 / re;
+        double b = 2.51 * inverse;
+        double cb = C * b;
+        double start = HaalandScale * Math.Log(haaland + 6.9 * inverse);
+        double w = a + b * start;
+        double log = Math.Log(w);
+        double residual = start + C * log;
+        double first = w + cb;
+        double move = 2 * residual * first * w / (2 * first * first + residual * cb * b);
+        double x = start - move;
+        log += LogOnePlus(-move * (b / w));
+        w = a + b * x;
+        double r = 1 / (w + cb);
+        x -= (x + C * log) * w * r;
+        slope = -2 * cb * r;
         return 1 / (x * x);
     }
 
-    private double Halley(double x, double b)
+    /// <summary>ln(1 + d), by its series where d is as small as the start's error makes it.</summary>
+    private static double LogOnePlus(double d)
     {
-        double inside = a + b * x;
-        double p = C * b / inside;
-        double residual = x + C * Math.Log(inside);
-        double first = 1 + p;
-        return x - 2 * residual * first / (2 * first * first + residual * p * p / C);
+        if (Math.Abs(d) > 0.01)
+            return Math.Log(1 + d);
+        double square = d * d;
+        double tail = 1.0 / 3 - d * 0.25 + square * (1.0 / 5 - d * (1.0 / 6) + square * (1.0 / 7));
+        return d - 0.5 * square + square * d * tail;
     }
 }
