@@ -104,7 +104,8 @@ internal sealed class LevelPanel(
 
     private void WriteTenths()
     {
-        foreach (DrainEvent moment in result.Events.Where(moment => moment.Code == EventCode.TenthGone))
+        foreach (DrainEvent moment in result.Events.Where(
+            moment => moment.Code == EventCode.TenthGone && moment.Time < axis.End))
         {
             SKPoint at = panel.At(axis.At(moment.Time), unit.From(moment.Level));
             sheet.Ring(at, 5, Palette.Liquid);

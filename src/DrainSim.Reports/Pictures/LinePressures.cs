@@ -8,12 +8,14 @@ internal sealed class LinePressures
 {
     private readonly LineHydraulics line;
     private readonly Job job;
+    private readonly int index;
 
-    /// <summary>Compiles the line and takes both moments from a run.</summary>
+    /// <summary>Compiles the line with the least margin and takes both moments from a run.</summary>
     public LinePressures(DrainResult result)
     {
         job = result.Job;
-        line = new LineHydraulics(job.Line, job.Liquid, job.Site.Gravity);
+        index = WorstLine(result);
+        line = new LineHydraulics(job.DrawOffs[index].Line, job.Liquid, job.Site.Gravity);
         Start = result.Trace.At(0);
         Worst = result.Trace.At(Math.Clamp(result.LeastMargin.Time, 0, result.Trace.End));
         Distances = Along(node => node.Distance);
@@ -40,7 +42,7 @@ internal sealed class LinePressures
     public double[] Pressures(Instant now)
     {
         double[] pressures = new double[line.NodeCount];
-        line.Pressures(now.Flow, now.Level, now.HeadspacePressure ?? job.Site.AtmosphericPressure, pressures);
+        line.Pressures(Math.Max(0, now.LineFlows?[index] ?? now.Flow), now.Level, now.HeadspacePressure ?? job.Site.AtmosphericPressure, pressures);
         return pressures;
     }
 
@@ -52,6 +54,16 @@ internal sealed class LinePressures
     {
         double weight = job.Liquid.Density * job.Site.Gravity;
         return [.. pressures.Zip(Elevations, (p, z) => z + (p - job.Site.AtmosphericPressure) / weight)];
+    }
+
+    private static int WorstLine(DrainResult result)
+    {
+        int worst = 0;
+        for (int line = 1; line < result.Lines.Count; line++)
+        {
+            worst = result.Lines[line].LeastMargin.Value < result.Lines[worst].LeastMargin.Value ? line : worst;
+        }
+        return worst;
     }
 
     private double[] Along(Func<LineNode, double> value) =>

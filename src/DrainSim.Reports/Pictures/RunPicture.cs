@@ -64,7 +64,8 @@ public static class RunPicture
         Extreme largest = report.Result.LargestFlow;
         double peak = course.Instants.Max(now => now.Flow);
         Unit unit = report.Format.FlowUnit(peak);
-        Panel panel = axis.Panel(frame, (0, peak > 0 ? 1.32 * unit.From(peak) : 1), peak > 0 ? 4 : 0);
+        double back = Math.Min(0, 1.1 * unit.From(course.Instants.Min(now => now.Flow)));
+        Panel panel = axis.Panel(frame, (back, peak > 0 ? 1.32 * unit.From(peak) : 1), peak > 0 ? 4 : 0);
         double[] xs = axis.Times(course);
         double[] ys = course.Values(now => now.Flow, unit.Size);
         panel.Curve(xs, ys, Palette.Flow);

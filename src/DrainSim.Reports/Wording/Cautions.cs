@@ -1,4 +1,5 @@
 using DrainSim.Draining;
+using DrainSim.Gas;
 using DrainSim.Liquids;
 using DrainSim.Reports.Measures;
 using DrainSim.Vessels;
@@ -26,7 +27,7 @@ public static class Cautions
             cautions.Add(new("never_by_mouth",
                 "Never start a siphon by mouth. Fill the line first, or use a priming pump or bulb."));
         }
-        if (IsPond(job.Vessel))
+        if (job.Vessel is Basin)
         {
             cautions.Add(new("earth_dam_drawdown",
                 "A fast drawdown can bring down an earth bank or dam. Keep the rate that its engineer "
@@ -36,6 +37,12 @@ public static class Cautions
         {
             cautions.Add(new("confined_space",
                 "A tank or sump is a confined space: nobody goes in without a permit, a gas test and a watch outside."));
+        }
+        if (job.Headspace is ConfinedHeadspace)
+        {
+            cautions.Add(new("vacuum_collapse",
+                "A tank that cannot breathe is crushed by a small vacuum. See that its vent is open and large enough "
+                + "before the valve is."));
         }
         if (!hazards.HasFlag(LiquidHazards.Polluting))
         {
@@ -83,6 +90,4 @@ public static class Cautions
                 + "somebody at the outlet all the time."));
         }
     }
-
-    private static bool IsPond(Vessel vessel) => vessel.GetType().Name == "Basin";
 }

@@ -1,7 +1,9 @@
 using DrainSim.Draining;
+using DrainSim.Gas;
 using DrainSim.Liquids;
 using DrainSim.Reports.Measures;
 using DrainSim.Reports.Wording;
+using DrainSim.Vessels;
 
 namespace DrainSim.Tests.Reports;
 
@@ -28,6 +30,24 @@ public sealed class CautionsTests
     }
 
     [Fact]
+    public void An_earth_bank_is_drawn_down_with_care_and_a_tank_is_a_confined_space()
+    {
+        Job tank = new InventedRun().Job;
+        Job pond = tank with { Vessel = new Basin { BottomLength = 20, BottomWidth = 10, SideSlope = 2, Depth = 3 } };
+        Assert.Contains("earth_dam_drawdown", Codes(pond));
+        Assert.DoesNotContain("confined_space", Codes(pond));
+        Assert.Contains("confined_space", Codes(tank));
+    }
+
+    [Fact]
+    public void A_tank_that_cannot_breathe_freely_may_collapse()
+    {
+        Job tank = new InventedRun().Job;
+        Assert.Contains("vacuum_collapse", Codes(tank with { Headspace = new ClosedHeadspace() }));
+        Assert.DoesNotContain("vacuum_collapse", Codes(tank));
+    }
+
+    [Fact]
     public void Every_list_ends_with_what_the_program_may_not_do() =>
         Assert.Equal("authorises_nothing", Codes(new InventedRun { Hazards = LiquidHazards.Toxic })[^1]);
 
@@ -41,6 +61,8 @@ public sealed class CautionsTests
         Assert.Contains("ignition", text, StringComparison.Ordinal);
     }
 
-    private static string[] Codes(InventedRun run) =>
-        [.. Cautions.For(run.Job, new MeasureFormat(UnitSystem.Metric)).Select(caution => caution.Code)];
+    private static string[] Codes(InventedRun run) => Codes(run.Job);
+
+    private static string[] Codes(Job job) =>
+        [.. Cautions.For(job, new MeasureFormat(UnitSystem.Metric)).Select(caution => caution.Code)];
 }
