@@ -5,13 +5,16 @@ namespace DrainSim.Reports.Measures;
 /// <summary>The ticks of an axis at round numbers, labelled alike on every machine.</summary>
 internal sealed class AxisTicks
 {
+    /// <summary>Share of the axis at its upper end that bears no tick, so that no label meets what stands beyond.</summary>
+    private const double HeadRoom = 0.02;
+
     private static readonly double[] TimeSteps = [1, 2, 5, 10, 15, 20, 30, 60, 120];
     private static readonly double[] HourSteps = [0.25, 0.5, 1, 2, 3, 6, 12, 24];
 
     private AxisTicks(double least, double most, double step)
     {
         int first = (int)Math.Ceiling(least / step - 1e-9);
-        int last = (int)Math.Floor(most / step + 1e-9);
+        int last = (int)Math.Floor((most - HeadRoom * (most - least)) / step + 1e-9);
         int decimals = Math.Max(0, (int)Math.Ceiling(-Math.Log10(step) - 1e-9));
         if (Math.Abs(step - 0.25) < 1e-9)
         {

@@ -50,8 +50,8 @@ public sealed class MeasureFormat(UnitSystem system)
     /// <summary>The unit in which a length of this size reads well.</summary>
     /// <param name="metres">m; the largest of them for an axis</param>
     public Unit LengthUnit(double metres) => IsUs
-        ? Math.Abs(metres) < 0.9995 * 0.3048 ? Unit.Inch : Unit.Foot
-        : Math.Abs(metres) < 0.09995 ? Unit.Millimetre : Unit.Metre;
+        ? metres != 0 && Math.Abs(metres) < 0.9995 * 0.3048 ? Unit.Inch : Unit.Foot
+        : metres != 0 && Math.Abs(metres) < 0.09995 ? Unit.Millimetre : Unit.Metre;
 
     /// <summary>The unit in which a volume of this size reads well.</summary>
     /// <param name="cubicMetres">m³</param>

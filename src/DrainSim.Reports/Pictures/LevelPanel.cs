@@ -11,6 +11,10 @@ internal sealed class LevelPanel(
 {
     private readonly DrainResult result = report.Result;
 
+    /// <summary>The tenths before the end, which has its own label.</summary>
+    private IEnumerable<DrainEvent> Tenths =>
+        result.Events.Where(moment => moment.Code == EventCode.TenthGone && moment.Time < axis.End);
+
     /// <summary>The range of levels to show, m: the outlet is in it when it is near enough.</summary>
     public static (double Least, double Most) Range(DrainResult result, LineProfile profile)
     {
@@ -27,9 +31,13 @@ internal sealed class LevelPanel(
     {
         axis.MarkEnd(sheet, panel, notes);
         WriteReferences(profile);
+        foreach (DrainEvent moment in Tenths)
+        {
+            sheet.Ring(At(moment), 5, Palette.Liquid);
+        }
         WriteEnd();
         WriteEvents();
-        WriteTenths();
+        NameTenths();
     }
 
     private static IEnumerable<double> Marks(Job job, LineProfile profile)
@@ -67,7 +75,7 @@ internal sealed class LevelPanel(
         {
             string text = string.Join("   ", outside);
             float x = panel.Frame.Right - Sheet.Measure(text, look);
-            sheet.Text(text, x, panel.Frame.Top - 14, look);
+            sheet.Text(text, x, panel.Frame.Top - 20, look);
         }
     }
 
@@ -80,11 +88,12 @@ internal sealed class LevelPanel(
         string second = axis.End <= 0 ? $"level {level}"
             : result.Outcome == Outcome.Emptied ? MeasureFormat.Duration(axis.End)
             : $"{MeasureFormat.Duration(axis.End)}, {level}";
-        notes.Add(at, new TextLook(24, Palette.Liquid), 400, true, Verdict.Headline(result.Outcome), second);
+        notes.AddNeeded(at, new TextLook(24, Palette.Liquid), 400, Verdict.Headline(result.Outcome), second);
     }
 
     private void WriteEvents()
     {
+        SKPoint end = panel.At(axis.At(axis.End), unit.From(result.FinalLevel));
         double before = double.NegativeInfinity;
         string last = "";
         foreach (DrainEvent moment in result.Events)
@@ -95,24 +104,25 @@ internal sealed class LevelPanel(
                 continue;
             }
             (before, last) = (moment.Time, text);
-            SKPoint at = panel.At(axis.At(moment.Time), unit.From(moment.Level));
-            sheet.Dot(at, 6, Palette.Ink);
-            notes.KeepClearOf(at, 7);
-            notes.Add(at, PageText.Note(Palette.Ink), 400, false, text, MeasureFormat.Duration(moment.Time));
+            SKPoint at = At(moment);
+            if (SKPoint.Distance(at, end) > 14 && notes.Add(at, PageText.Note(Palette.Ink), 400, false, text, MeasureFormat.Duration(moment.Time)))
+            {
+                sheet.Dot(at, 6, Palette.Ink);
+                notes.KeepClearOf(at, 7);
+            }
         }
     }
 
-    private void WriteTenths()
+    private void NameTenths()
     {
-        foreach (DrainEvent moment in result.Events.Where(
-            moment => moment.Code == EventCode.TenthGone && moment.Time < axis.End))
+        foreach (DrainEvent moment in Tenths)
         {
-            SKPoint at = panel.At(axis.At(moment.Time), unit.From(moment.Level));
-            sheet.Ring(at, 5, Palette.Liquid);
             string text = MeasureFormat.Percent(moment.Number / 10) + " out";
-            notes.Add(at, new TextLook(18, Palette.Muted), 12, false, text);
+            notes.Add(At(moment), new TextLook(18, Palette.Muted), 12, false, text);
         }
     }
+
+    private SKPoint At(DrainEvent moment) => panel.At(axis.At(moment.Time), unit.From(moment.Level));
 
     /// <summary>The event in a few words; empty for the tenths, and for the end, which has its own label.</summary>
     private static string Short(EventCode code) => code switch

@@ -30,7 +30,7 @@ public static class LinePicture
         var along = new LinePressures(report.Result);
         float top = PageText.Head(sheet, report, Subtitle(report, along));
         PageText.Foot(sheet, report.Result.Job, report.Format);
-        float room = Height - 74 - top;
+        float room = Height - 102 - top;
         DrawElevation(sheet, report, along, new SKRect(Left, top + 44, Right, top + 0.58f * room - 44));
         var lower = new SKRect(Left, top + 0.58f * room + 44, Right, top + room - 44);
         DrawPressure(sheet, report, along, lower);

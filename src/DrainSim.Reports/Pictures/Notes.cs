@@ -38,11 +38,20 @@ internal sealed class Notes
     /// <param name="isHeaded">whether the first line is bold</param>
     /// <param name="lines">what it says</param>
     /// <returns>whether there was room</returns>
-    public bool Add(SKPoint anchor, TextLook look, float reach, bool isHeaded, params string[] lines)
+    public bool Add(SKPoint anchor, TextLook look, float reach, bool isHeaded, params string[] lines) =>
+        Add(anchor, look, reach, isHeaded, isNeeded: false, lines);
+
+    /// <summary>Writes a headed note that must not be left out: over a curve if there is no other room.</summary>
+    public void AddNeeded(SKPoint anchor, TextLook look, float reach, params string[] lines) =>
+        Add(anchor, look, reach, isHeaded: true, isNeeded: true, lines);
+
+    private bool Add(SKPoint anchor, TextLook look, float reach, bool isHeaded, bool isNeeded, string[] lines)
     {
         TextLook head = look with { IsBold = isHeaded };
         float width = lines.Select((line, i) => Sheet.Measure(line, i == 0 ? head : look)).Max();
-        if (placer.Find(anchor, new SKSize(width, lines.Length * look.LineHeight), reach) is not { } place)
+        var size = new SKSize(width, lines.Length * look.LineHeight);
+        SKRect? found = placer.Find(anchor, size, reach) ?? (isNeeded ? placer.FindOnCurve(anchor, size, reach) : null);
+        if (found is not { } place)
         {
             return false;
         }
@@ -108,7 +117,7 @@ internal sealed class Notes
     private bool WriteBeside(float y, string name, TextLook look, bool above)
     {
         float width = Sheet.Measure(name, look);
-        float top = above ? y - look.LineHeight - 2 : y + 4;
+        float top = above ? y - look.LineHeight - 7 : y + 9;
         for (float share = 0; share <= 1; share += 0.125f)
         {
             float x = panel.Frame.Left + 12 + share * (panel.Frame.Width - width - 24);

@@ -67,7 +67,7 @@ internal static class PageText
 
     /// <summary>Writes the heading of a row above its frame.</summary>
     public static void RowTitle(Sheet sheet, SKRect frame, string text) =>
-        sheet.Text(text, Edge, frame.Top - 14, HeadingLook);
+        sheet.Text(text, Edge, frame.Top - 20, HeadingLook);
 
     /// <summary>Writes the name of the horizontal axis below the last row, at the right.</summary>
     public static void AxisTitle(Sheet sheet, SKRect frame, string text)

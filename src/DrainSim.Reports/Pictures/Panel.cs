@@ -55,12 +55,10 @@ internal sealed class Panel
         curve.LinePattern = isDashed ? LinePattern.Dashed : LinePattern.Solid;
     }
 
-    /// <summary>Tints the ground between a curve and the lower edge.</summary>
+    /// <summary>Tints the ground between a curve and 0.</summary>
     public void Tint(double[] xs, double[] ys, SKColor color)
     {
-        double[] floor = new double[xs.Length];
-        Array.Fill(floor, bottom);
-        ScottPlot.Plottables.FillY fill = Plot.Add.FillY(xs, floor, ys);
+        ScottPlot.Plottables.FillY fill = Plot.Add.FillY(xs, new double[xs.Length], ys);
         fill.FillColor = Palette.Of(color);
         fill.LineWidth = 0;
         fill.MarkerSize = 0;

@@ -31,7 +31,7 @@ public static class RunPicture
         PageText.Foot(sheet, report.Result.Job, report.Format);
         var course = new Course(report.Result);
         var axis = new TimeAxis(course.End);
-        float room = Height - 74 - top;
+        float room = Height - 102 - top;
         DrawLevel(sheet, report, course, axis, Row(top, 0.47f * room));
         DrawFlow(sheet, report, course, axis, Row(top + 0.47f * room, 0.23f * room));
         DrawPressure(sheet, report, course, axis, Row(top + 0.70f * room, 0.30f * room));
