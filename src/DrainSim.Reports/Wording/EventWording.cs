@@ -21,7 +21,7 @@ public static class EventWording
             $"the low point reaches {Verdict.LimitName(job)}; from here the flow is held there",
         EventCode.VapourLimitEnds => $"the low point rises from {Verdict.LimitName(job)}; the flow is free again",
         EventCode.AirMayBeDrawn => "a vortex may draw air into the inlet from here",
-        EventCode.AirDrawn => "air is drawn into the inlet from here",
+        EventCode.AirDrawn => "air is likely drawn into the inlet from here",
         EventCode.BoreUncovered => "the inlet's bore is uncovered; it goes on partly full",
         EventCode.OutletCovered => "the receiver covers the outlet",
         EventCode.OutletFreed => "the receiver falls below the outlet",

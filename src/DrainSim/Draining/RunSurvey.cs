@@ -103,6 +103,19 @@ internal sealed class RunSurvey
         return (instant, quantity(instant));
     }
 
+    /// <summary>Share of the run with the low point below a pressure, to the nearest hundredth, 1.</summary>
+    /// <param name="pressure">pressure, Pa absolute</param>
+    public double ShareBelow(double pressure)
+    {
+        const int Parts = 100;
+        if (history.EndTime == 0 || history.Instants.All(instant => instant.LowPointPressure > pressure))
+            return 0;
+        int below = 0;
+        for (int i = 0; i < Parts; i++)
+            below += history.Read((i + 0.5) / Parts * history.EndTime).LowPointPressure < pressure ? 1 : 0;
+        return (double)below / Parts;
+    }
+
     /// <summary>How fair the quasi-steady picture is.</summary>
     /// <param name="passed">the changes of regime, in time order</param>
     public SteadinessCheck Steadiness(IReadOnlyList<DrainEvent> passed)

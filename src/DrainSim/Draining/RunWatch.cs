@@ -17,6 +17,15 @@ internal static class RunWatch
     /// <summary>Share of the run in the transition above which the result is less sure, 1; common practice, no source.</summary>
     private const double NoticeableTransition = 0.1;
 
+    /// <summary>Margin below which the limit was reached, which the outcome says, Pa; far below what a gauge tells.</summary>
+    private const double Touching = 1;
+
+    /// <summary>Share of the atmosphere below which dissolved gas comes out of a liquid, 1; common practice, no source.</summary>
+    private const double GasComesOut = 1.0 / 3;
+
+    /// <summary>Time below that pressure after which gas may have gathered, s; common practice, no source.</summary>
+    private const double GasGathers = 600;
+
     /// <summary>Margin at the low point of a siphon below which it is thin, Pa; common practice, no source.</summary>
     private const double ThinMargin = 5000;
 
@@ -117,7 +126,7 @@ internal static class RunWatch
         Add(WarningCode.AirMayBeDrawn, air.Number, air.Code == EventCode.AirMayBeDrawn && air.Number > 0);
         bool siphons = model.Epochs[0].Plant.Lines.Any(line => line.Hydraulics.RisesAboveInlet);
         Add(WarningCode.ThinMargin, result.LeastMargin.Value,
-            siphons && result.StoppedAt > 0 && result.LeastMargin.Value is > 0 and < ThinMargin);
+            siphons && result.StoppedAt > 0 && result.LeastMargin.Value is > Touching and < ThinMargin);
         double vacuum = result.LargestVacuum?.Value ?? 0;
         Add(WarningCode.VacuumRatingPassed, vacuum, vacuum > job.VacuumRating);
         double over = result.LargestVacuum is null ? 0 : survey.Largest(i => i.HeadspacePressure!.Value - job.Site.AtmosphericPressure).Value;
@@ -128,6 +137,8 @@ internal static class RunWatch
             Add(WarningCode.HoseMayFlatten, suction, suction > line.DrawOff.Line.VacuumRating);
         }
 
+        double share = survey.ShareBelow(GasComesOut * job.Site.AtmosphericPressure);
+        Add(WarningCode.GasMayGather, share, share * result.StoppedAt > GasGathers);
         if (job.Inflow is not null && result.Outcome is Outcome.Balanced or Outcome.Overflowed)
             Add(WarningCode.NeverEmpties, InflowThatEmpties(model), true);
         return [.. warnings];
