@@ -1,5 +1,3 @@
-using CsvHelper;
-
 namespace DrainSim.Cli.Tests;
 
 /// <summary>The built-in tables as text and as CSV.</summary>

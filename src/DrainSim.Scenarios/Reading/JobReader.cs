@@ -1,6 +1,6 @@
 using DrainSim.Draining;
-using DrainSim.Liquids;
 using DrainSim.Lines;
+using DrainSim.Liquids;
 using DrainSim.Scenarios.Units;
 using DrainSim.Scenarios.Yaml;
 

@@ -1,6 +1,6 @@
 using DrainSim.Gas;
-using DrainSim.Liquids;
 using DrainSim.Lines;
+using DrainSim.Liquids;
 using DrainSim.Vessels;
 
 namespace DrainSim.Draining;

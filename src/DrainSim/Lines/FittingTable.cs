@@ -21,7 +21,10 @@ public static class FittingTable
             .Where(row => row.Table is "fitting" or "both")
             .Select(row => new FittingKind
             {
-                Id = row.Id, Description = row.Description, Loss = row.Loss, Source = row.Source,
+                Id = row.Id,
+                Description = row.Description,
+                Loss = row.Loss,
+                Source = row.Source,
             });
         return new(kinds.ToList(), kind => kind.Id, AliasTable.Of("fitting"));
     }

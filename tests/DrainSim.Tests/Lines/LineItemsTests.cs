@@ -101,7 +101,10 @@ public sealed class LineItemsTests
     {
         LineHydraulics line = new Line
         {
-            Bore = Bore, Roughness = 0, Inlet = new() { Elevation = 0, EdgeLoss = 0 }, Path = [item],
+            Bore = Bore,
+            Roughness = 0,
+            Inlet = new() { Elevation = 0, EdgeLoss = 0 },
+            Path = [item],
         }.Compile(Oil);
         double flow = reynolds / line.Reynolds(1);
         double velocity = line.Velocity(flow);

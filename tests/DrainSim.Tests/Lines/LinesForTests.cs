@@ -1,6 +1,6 @@
 using CsCheck;
-using DrainSim.Liquids;
 using DrainSim.Lines;
+using DrainSim.Liquids;
 
 namespace DrainSim.Tests.Lines;
 
@@ -31,7 +31,10 @@ internal static class LinesForTests
     public static readonly Gen<Liquid> AnyLiquid =
         Gen.Select(Gen.Double[600, 1900], Gen.Double[-9, 1]).Select((density, logViscosity) => new Liquid
         {
-            Name = "any", Density = density, Viscosity = Math.Exp(logViscosity), VapourPressure = 0,
+            Name = "any",
+            Density = density,
+            Viscosity = Math.Exp(logViscosity),
+            VapourPressure = 0,
         });
 
     private static readonly Gen<double> Bore = Gen.Double[-5, -0.7].Select(Math.Exp);

@@ -1,8 +1,8 @@
 using System.Globalization;
 using DrainSim.Draining;
 using DrainSim.Gas;
-using DrainSim.Liquids;
 using DrainSim.Lines;
+using DrainSim.Liquids;
 using DrainSim.Scenarios;
 using DrainSim.Vessels;
 
