@@ -1,4 +1,8 @@
 using System.Diagnostics;
+using DrainSim.Draining;
+using DrainSim.Reports;
+using DrainSim.Reports.Files;
+using DrainSim.Scenarios;
 
 namespace DrainSim.Cli.Tests;
 

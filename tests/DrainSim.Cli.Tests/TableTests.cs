@@ -1,3 +1,5 @@
+using CsvHelper;
+
 namespace DrainSim.Cli.Tests;
 
 /// <summary>The built-in tables as text and as CSV.</summary>
