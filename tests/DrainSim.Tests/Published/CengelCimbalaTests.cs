@@ -1,4 +1,6 @@
+using DrainSim.Draining;
 using DrainSim.Lines;
+using DrainSim.Tests.Draining;
 
 namespace DrainSim.Tests.Published;
 
@@ -38,5 +40,29 @@ public sealed class CengelCimbalaTests
         LineHydraulics pipe = RoughLines.Compile(
             new Line { Bore = 0.03, Roughness = 0, Inlet = new() { Elevation = 0, EdgeLoss = 0 }, Path = [] }, density: 1000);
         Assert.Equal(5.42e-3, pipe.Flow(3, 0), 5.42e-3 * 0.002);
+    }
+
+    /// <remarks>15.4 h is from memory; the pool is 8 m wide.</remarks>
+    [Fact]
+    public void The_pool_is_empty_no_sooner_than_printed() => BookDrains.AssertTime(15.45 * 3600, 2e-3,
+        BookDrains.Of(Jobs.Cylinder(8, 3), 3, Jobs.Orifice(0.03, 1)));
+
+    /// <remarks>53.1 s is from memory. The level is constant in the book: our tank is as wide as a field.</remarks>
+    [Fact]
+    public void Four_litres_of_petrol_are_over_in_the_printed_time()
+    {
+        Line hose = new()
+        {
+            Bore = 0.005,
+            Roughness = 0,
+            Inlet = new() { Elevation = 0.5, EdgeLoss = 0 },
+            Path = [RoughLines.Rise(2.25), RoughLines.Rise(-2.75)],
+        };
+        Job job = BookDrains.Of(Jobs.Prism(1000, 1), 0.75, hose);
+        BookDrains.AssertTime(53.1, 2e-3, job with
+        {
+            Liquid = BookDrains.Thin with { Density = 750, VapourPressure = 0 },
+            Run = new RunSettings { StopAtVolume = 750 - 0.004 },
+        });
     }
 }
