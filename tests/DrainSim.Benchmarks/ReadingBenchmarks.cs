@@ -7,7 +7,7 @@ namespace DrainSim.Benchmarks;
 [MemoryDiagnoser]
 public class ReadingBenchmarks
 {
-    private const string Text = """
+    private readonly string text = """
         title: Rinse tank over the rim
         liquid: {name: water, temperature: 18 degC}
         tank: {shape: vertical_cylinder, diameter: 2.4 m, height: 3.0 m, level: 2.6 m}
@@ -25,5 +25,5 @@ public class ReadingBenchmarks
 
     /// <summary>The whole text, tables looked up.</summary>
     [Benchmark]
-    public ScenarioReading Scenario() => ScenarioReader.ReadText(Text, "rinse.yaml", ".");
+    public ScenarioReading Scenario() => ScenarioReader.ReadText(text, "rinse.yaml", ".");
 }

@@ -108,11 +108,12 @@ internal sealed class DrainModel : IOdeSystem, IEventSet
         ? SteadyPressure(epoch, t, vessel.Level(volume), y)
         : epoch.Plant.Gas.Pressure(volume, hasMass ? y[LineCount] : StartMass);
 
-    /// <summary>Flow of a line out of the tank, solved for, m³/s.</summary>
-    public double Flow(Epoch epoch, int line, double surface, double gas, double delivered, bool limited)
+    /// <summary>Flow of a line out of the tank, solved for, m³/s; 0 for a line that no longer works.</summary>
+    public double Flow(Epoch epoch, int line, double surface, double gas, double delivered, bool limited) =>
+        epoch.Modes[line].IsAtWork ? Solve(epoch, line, surface, gas, delivered, limited) : 0;
+
+    private double Solve(Epoch epoch, int line, double surface, double gas, double delivered, bool limited)
     {
-        if (!epoch.Modes[line].IsAtWork)
-            return 0;
         FlowSolutions++;
         double flow = epoch.Plant.Lines[line].Flow(new LineConditions(surface, gas, delivered, limited), guesses[line]);
         if (flow != 0)
@@ -129,7 +130,14 @@ internal sealed class DrainModel : IOdeSystem, IEventSet
         double volume = Volume(epoch, t, y), surface = vessel.Level(volume), gas = GasPressure(epoch, t, volume, y);
         Span<double> flows = stackalloc double[LineCount];
         for (int i = 0; i < LineCount; i++)
-            flows[i] = Flow(epoch, i, surface, gas, y[i], epoch.Modes[i].IsLimited);
+        {
+            // a column that parts at the first instant shows the flow that parts it
+            bool parts = epoch.Modes[i] is { Ending: Outcome.VapourBreak } mode && mode.EndedAt == t;
+            flows[i] = parts
+                ? Solve(epoch, i, surface, gas, y[i], limited: false)
+                : Flow(epoch, i, surface, gas, y[i], epoch.Modes[i].IsLimited);
+        }
+
         return At(t, y, flows);
     }
 

@@ -43,14 +43,17 @@ public sealed class FabusolaTaperedTankTests
         Assert.InRange(Math.Sqrt(square), 0, 12); // 10 s found with the series
     }
 
-    /// <remarks>5 % of time: twice what the noise of a level is worth at the end of the first third.</remarks>
+    /// <remarks>
+    /// 5 % of time, as the collection of cases asks. The first reading is as noisy as any other, so the moment at which the
+    /// series begins is fitted with the coefficient.
+    /// </remarks>
     [Fact]
     public void The_first_third_foretells_the_rest_within_5_percent_of_the_time()
     {
         int third = Levels.Length / 3;
-        double inverse = Fit.LineThroughOrigin(IdealTimes.Value[..third], Times[..third]);
+        (double begins, double inverse) = Fit.Line(IdealTimes.Value[..third], Times[..third]);
         for (int i = third; i < Levels.Length; i++)
-            Assert.Equal(Times[i], inverse * IdealTimes.Value[i], 0.05 * Times[i]);
+            Assert.Equal(Times[i], begins + inverse * IdealTimes.Value[i], 0.05 * Times[i]);
     }
 
     private static StrappingTable Tank()
