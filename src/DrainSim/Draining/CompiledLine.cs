@@ -12,6 +12,7 @@ internal sealed class CompiledLine
     private readonly double receiverBottom, bore;
     private readonly int parallel;
     private readonly PartFullInlet? tail;
+    private readonly bool hasOneBore;
 
     /// <param name="drawOff">the line and what it discharges into</param>
     /// <param name="job">the job that it belongs to</param>
@@ -24,6 +25,7 @@ internal sealed class CompiledLine
         SpecificWeight = job.Liquid.Density * gravity;
         Threshold = Math.Max(job.Liquid.VapourPressure, line.LeastPressure ?? 0);
         (bore, parallel) = (line.Bore, line.Parallel);
+        hasOneBore = line.Path.All(item => item.Bore is null || item.Bore == line.Bore);
         fixedSurface = (drawOff.Receiver as FixedSurface)?.Elevation ?? double.NegativeInfinity;
         if (drawOff.Receiver is ReceivingTank tank)
         {
@@ -137,6 +139,21 @@ internal sealed class CompiledLine
     /// <param name="gas">pressure of the gas over it, Pa absolute</param>
     public double Margin(double flow, double surface, double gas) =>
         Hydraulics.LowPointPressure(Math.Max(0, flow), surface, gas, out _) - Threshold;
+
+    /// <summary>
+    /// A pressure that the margin at the low point is not below in free flow, Pa: the crest's at rest less all of the driving
+    /// head. Negative infinity for a line of several bores, in which a wider bore gives pressure back.
+    /// </summary>
+    /// <param name="surface">level in the tank, m</param>
+    /// <param name="gas">pressure of the gas over it, Pa absolute</param>
+    /// <param name="delivered">volume that the line has delivered, m³</param>
+    public double MarginBound(double surface, double gas, double delivered)
+    {
+        if (!hasOneBore)
+            return double.NegativeInfinity;
+        double used = Math.Max(0, Head(surface, gas, delivered));
+        return gas + SpecificWeight * (surface - Hydraulics.CrestElevation - used) - Threshold;
+    }
 
     /// <summary>The limit of a regime, as a Reynolds number, that one of the bores passes at a flow, 1.</summary>
     /// <param name="flow">one of the line's regime flows, m³/s</param>

@@ -231,7 +231,8 @@ internal sealed class DrainModel : IOdeSystem, IEventSet
             WatchKind.HeadSettles when !EndsAtRest(watch.Line) => EventAction.Ignore,
             _ => EventAction.Restart,
         };
-        bool bothWays = watch.Kind == WatchKind.MarginVanishes && now.Plant.Lines[watch.Line].HoldsAtVapour;
+        bool bothWays = watch.Kind == WatchKind.MarginVanishes && now.Plant.Lines[watch.Line].HoldsAtVapour
+            || watch.Kind == WatchKind.HeadSettles && run.SettledWithin == 0;
         return new EventRule(bothWays ? EventDirection.Either : Direction(watch.Kind), action);
     }
 
@@ -370,7 +371,7 @@ internal sealed class DrainModel : IOdeSystem, IEventSet
             WatchKind.AirDrawn => at.Surface - line.SubmergedAbove(flow),
             WatchKind.MarginVanishes => FreeMargin(watch.Line, at, delivered, flow) / atmosphere,
             WatchKind.LiftExhausts => line.Margin(0, at.Surface, at.Gas) / line.SpecificWeight - run.SettledWithin,
-            WatchKind.HeadSettles => Math.Abs(line.Head(at.Surface, at.Gas, delivered)) - run.SettledWithin,
+            WatchKind.HeadSettles => Unsettled(line.Head(at.Surface, at.Gas, delivered)),
             WatchKind.AllSettle => LargestHead(at, y) - run.SettledWithin,
             WatchKind.BoreUncovers => BoreCover(line.InletLimit(at.Surface), flow),
             WatchKind.OutletCovers => line.ReceiverSurface(delivered) - line.Hydraulics.OutletElevation,
@@ -385,9 +386,18 @@ internal sealed class DrainModel : IOdeSystem, IEventSet
         };
     }
 
-    /// <summary>The margin in free flow, Pa; the flow of the dense output serves where it is free.</summary>
+    /// <summary>The head above the settled head, m; the head itself, which changes its sign, where none is settled, which 0 says.</summary>
+    private double Unsettled(double head) => run.SettledWithin == 0 ? head : Math.Abs(head) - run.SettledWithin;
+
+    /// <summary>
+    /// The margin in free flow, Pa; the flow of the dense output serves where it is free. Where the margin cannot vanish
+    /// its lower bound stands for it: of the same sign, and without a friction factor.
+    /// </summary>
     private double FreeMargin(int line, in Moment at, double delivered, double flow)
     {
+        double bound = now.Plant.Lines[line].MarginBound(at.Surface, at.Gas, delivered);
+        if (bound > 0)
+            return bound;
         double free = now.Modes[line].IsLimited ? Flow(now, line, at.Surface, at.Gas, delivered, limited: false) : flow;
         return now.Plant.Lines[line].Margin(free, at.Surface, at.Gas);
     }
