@@ -231,9 +231,13 @@ internal sealed class DrainModel : IOdeSystem, IEventSet
             WatchKind.HeadSettles when !EndsAtRest(watch.Line) => EventAction.Ignore,
             _ => EventAction.Restart,
         };
-        bool bothWays = watch.Kind == WatchKind.MarginVanishes && now.Plant.Lines[watch.Line].HoldsAtVapour
-            || watch.Kind == WatchKind.HeadSettles && run.SettledWithin == 0;
-        return new EventRule(bothWays ? EventDirection.Either : Direction(watch.Kind), action);
+        EventDirection direction = watch.Kind switch
+        {
+            WatchKind.MarginVanishes when now.Modes[watch.Line].IsLimited => EventDirection.Rising,
+            WatchKind.HeadSettles when run.SettledWithin == 0 => EventDirection.Either,
+            _ => Direction(watch.Kind),
+        };
+        return new EventRule(direction, action);
     }
 
     /// <inheritdoc/>

@@ -1,0 +1,65 @@
+using DrainSim.Draining;
+using DrainSim.Lines;
+
+namespace DrainSim.Tests.Draining;
+
+public sealed class RemedyTests
+{
+    [Fact]
+    public void A_stalled_line_is_told_the_least_drop_of_its_outlet()
+    {
+        Job job = Stalled();
+        Remedy remedy = Assert.Single(Find(job));
+        Assert.Equal(RemedyKind.LowerOutlet, remedy.Kind);
+        // level with the inlet but for the settled head: anything less stalls above it
+        Assert.Equal(0.6 - 0.12 + job.Run.SettledWithin, remedy.Change, 2e-3);
+        Assert.Equal(Outcome.InletUncovered, remedy.ProvedOutcome);
+        Assert.Equal(Outcome.Levelled, Jobs.Run(Lowered(job, remedy.Change - 3e-3)).Outcome);
+        Assert.Equal(Outcome.InletUncovered, Jobs.Run(Lowered(job, remedy.Change)).Outcome);
+    }
+
+    [Fact]
+    public void A_parted_column_is_told_a_lower_crest_and_a_throttle()
+    {
+        Job job = Jobs.Siphon() with { Liquid = Jobs.Water with { VapourPressure = 68e3 } };
+        IReadOnlyList<Remedy> remedies = Find(job);
+        Assert.Equal([RemedyKind.LowerCrest, RemedyKind.ThrottleOutlet], remedies.Select(remedy => remedy.Kind));
+        double loss = remedies[1].Change;
+        Assert.Equal(Outcome.VapourBreak, Jobs.Run(Throttled(job, 0.97 * loss)).Outcome);
+        Assert.Equal(Outcome.InletUncovered, Jobs.Run(Throttled(job, loss)).Outcome);
+    }
+
+    [Fact]
+    public void A_line_that_never_started_is_told_what_would_start_it()
+    {
+        Job job = Stalled() with { Level = 0.5 };
+        Assert.Equal(NoStart.NoDrivingHead, Jobs.Run(job).NoStart);
+        Remedy remedy = Assert.Single(Find(job));
+        Assert.NotEqual(Outcome.NeverStarted, remedy.ProvedOutcome);
+    }
+
+    [Fact]
+    public void A_job_that_is_done_needs_no_remedy() => Assert.Empty(Find(Jobs.Siphon()));
+
+    private static IReadOnlyList<Remedy> Find(Job job) =>
+        RemedySearch.Find(Jobs.Run(job), TestContext.Current.CancellationToken);
+
+    private static Job Stalled()
+    {
+        Line line = Jobs.SiphonLine();
+        StraightRun outer = (StraightRun)line.Path[2] with { Rise = 0.6 - 2.75 };
+        return Jobs.Siphon() with { DrawOffs = Jobs.Only(line with { Path = [.. line.Path.Take(2), outer] }) };
+    }
+
+    private static Job Lowered(Job job, double drop)
+    {
+        var outer = (StraightRun)job.Line.Path[2];
+        outer = outer with { Rise = outer.Rise - drop, Length = outer.Length + drop };
+        return job with { DrawOffs = Jobs.Only(job.Line with { Path = [.. job.Line.Path.Take(2), outer] }) };
+    }
+
+    private static Job Throttled(Job job, double loss) => job with
+    {
+        DrawOffs = Jobs.Only(job.Line with { Path = [.. job.Line.Path, new PlainLoss { Coefficient = loss }] }),
+    };
+}
