@@ -1,4 +1,3 @@
-using System.Diagnostics;
 using DrainSim.Integration;
 using DrainSim.Vessels;
 
@@ -8,9 +7,9 @@ namespace DrainSim.Draining;
 /// <remarks>
 /// State: y[i] is the volume that line i has taken out of the tank, m³, so that its slope is the line's flow, the volume in
 /// the tank is V = V₀ + ∫inflow − Σy[i] and that in a receiver Vr₀ + y[i]: the balance closes by construction. Where gas
-/// comes and goes its mass, kg, is the last component.
+/// comes and goes its mass, kg, is the last component. What is watched on the way stands in the other part of the class.
 /// </remarks>
-internal sealed class DrainModel : IOdeSystem, IEventSet
+internal sealed partial class DrainModel : IOdeSystem
 {
     private readonly Vessel vessel;
     private readonly RunSettings run;
@@ -61,12 +60,6 @@ internal sealed class DrainModel : IOdeSystem, IEventSet
 
     /// <inheritdoc/>
     public int Dimension => LineCount + (hasMass ? 1 : 0);
-
-    /// <inheritdoc/>
-    public int EventCount => watches.Length;
-
-    /// <summary>What the event functions watch, in the order of their indices.</summary>
-    public IReadOnlyList<Watch> Watches => watches;
 
     private double? TargetVolume => (run.StopAtLevel, run.StopAtVolume) switch
     {
@@ -204,77 +197,6 @@ internal sealed class DrainModel : IOdeSystem, IEventSet
     /// <inheritdoc/>
     public double LargestStep(double t, ReadOnlySpan<double> y, ReadOnlySpan<double> dydt) => double.PositiveInfinity;
 
-    /// <inheritdoc/>
-    public void EventValues(double t, ReadOnlySpan<double> y, ReadOnlySpan<double> dydt, Span<double> values)
-    {
-        double volume = Volume(now, t, y), surface = vessel.Level(volume);
-        double unclamped = StartVolume + now.InflowVolume(t);
-        for (int i = 0; i < LineCount; i++)
-            unclamped -= y[i];
-        var moment = new Moment(t, unclamped, surface, GasPressure(now, t, volume, y));
-        for (int i = 0; i < watches.Length; i++)
-            values[i] = Value(watches[i], moment, y, dydt);
-    }
-
-    /// <inheritdoc/>
-    public EventRule Rule(int index)
-    {
-        Watch watch = watches[index];
-        EventAction action = watch.Kind switch
-        {
-            WatchKind.TargetReached or WatchKind.TankBrims or WatchKind.AllSettle or WatchKind.FlowsBalance => EventAction.Stop,
-            WatchKind.VacuumRatingPasses or WatchKind.PressureRatingPasses => EventAction.Record,
-            WatchKind.SectionPasses or WatchKind.ActFalls or WatchKind.InflowTurns => EventAction.Restart,
-            _ when !now.Modes[watch.Line].IsAtWork => EventAction.Ignore,
-            WatchKind.BoreUncovers => EventAction.Record,
-            WatchKind.LiftExhausts when !now.Modes[watch.Line].IsLimited => EventAction.Ignore,
-            WatchKind.HeadSettles when !EndsAtRest(watch.Line) => EventAction.Ignore,
-            _ => EventAction.Restart,
-        };
-        EventDirection direction = watch.Kind switch
-        {
-            WatchKind.MarginVanishes when now.Modes[watch.Line].IsLimited => EventDirection.Rising,
-            WatchKind.HeadSettles when run.SettledWithin == 0 => EventDirection.Either,
-            _ => Direction(watch.Kind),
-        };
-        return new EventRule(direction, action);
-    }
-
-    /// <inheritdoc/>
-    public bool OnRestart(int index, double t, Span<double> y)
-    {
-        Watch watch = watches[index];
-        LineMode mode = now.Modes[watch.Line];
-        if (watch.Kind == WatchKind.ActFalls)
-            Begin(AfterAct(watch.Ordinal, t, y));
-        else if (watch.Kind == WatchKind.MarginVanishes && now.Plant.Lines[watch.Line].HoldsAtVapour)
-            Begin(now.With(t, watch.Line, mode with { IsLimited = !mode.IsLimited }));
-        else if (EndingOf(watch, t, y) is { } ending)
-            Begin(now.With(t, watch.Line, mode with { Ending = ending, EndedAt = t }));
-        return now.LinesAtWork > 0;
-    }
-
-    /// <summary>How the line of a watch ends when it fires; null where it does not end.</summary>
-    public Outcome? EndingOf(Watch watch, double t, ReadOnlySpan<double> y) => watch.Kind switch
-    {
-        WatchKind.InletUncovers => HoldsHeel(watch.Line) ? Outcome.InletUncovered : Outcome.Emptied,
-        WatchKind.AirDrawn => Outcome.InletUncovered,
-        WatchKind.AirBreakUncovers => Outcome.AirBreak,
-        WatchKind.MarginVanishes or WatchKind.LiftExhausts => Outcome.VapourBreak,
-        WatchKind.HeadSettles => RestOf(watch.Line, t, y),
-        WatchKind.ReceiverBrims => Outcome.ReceiverFull,
-        _ => null,
-    };
-
-    private static EventDirection Direction(WatchKind kind) => kind switch
-    {
-        WatchKind.RegimePasses or WatchKind.SectionPasses or WatchKind.OutletCovers
-            or WatchKind.BoreUncovers => EventDirection.Either,
-        WatchKind.ReceiverBrims or WatchKind.VacuumRatingPasses or WatchKind.PressureRatingPasses or WatchKind.TankBrims
-            or WatchKind.InflowTurns => EventDirection.Rising,
-        _ => EventDirection.Falling,
-    };
-
     /// <summary>The line with the least margin: its low point's pressure and margin, Pa.</summary>
     private (double Pressure, double Margin) LowPoint(Epoch epoch, double surface, double gas, ReadOnlySpan<double> flows)
     {
@@ -327,128 +249,4 @@ internal sealed class DrainModel : IOdeSystem, IEventSet
 
         return steadyGas = p;
     }
-
-    private void Begin(Epoch next)
-    {
-        epochs.Add(next);
-        now = next;
-    }
-
-    private Epoch AfterAct(int ordinal, double t, Span<double> y)
-    {
-        Plant after = plantsAfter[ordinal];
-        bool massIsKnown = now.Plant.Gas is { IsConfined: true, IsSteady: false };
-        if (hasMass && after.Gas.IsConfined && !massIsKnown)
-            y[LineCount] = after.Gas.MassAt(GasPressure(now, t, Volume(now, t, y), y), Volume(now, t, y));
-        return now.With(t, after);
-    }
-
-    private bool HoldsHeel(int line) =>
-        now.Plant.Lines[line].Hydraulics.InletElevation > Math.Max(run.SettledWithin, 0);
-
-    /// <summary>A line ends at rest when it hangs in the air, or when nothing else can move the surfaces again.</summary>
-    private bool EndsAtRest(int line)
-    {
-        CompiledLine compiled = now.Plant.Lines[line];
-        bool isAlone = now.LinesAtWork == 1 && now.Plant.Job.Inflow is null;
-        return isAlone || (compiled.DrawOff.Receiver is null && compiled.Hydraulics.RisesAboveInlet);
-    }
-
-    private Outcome RestOf(int line, double t, ReadOnlySpan<double> y)
-    {
-        double volume = Volume(now, t, y), surface = vessel.Level(volume);
-        double liquidHead = surface - now.Plant.Lines[line].OutletLevel(y[line]);
-        if (now.Plant.Gas.IsConfined && liquidHead > 2 * run.SettledWithin)
-            return Outcome.VacuumHeld;
-        return !HoldsHeel(line) && surface <= 2 * run.SettledWithin ? Outcome.Emptied : Outcome.Levelled;
-    }
-
-    private double Value(Watch watch, in Moment at, ReadOnlySpan<double> y, ReadOnlySpan<double> dydt)
-    {
-        CompiledLine line = now.Plant.Lines[watch.Line];
-        double delivered = y[watch.Line], flow = dydt[watch.Line];
-        return watch.Kind switch
-        {
-            WatchKind.TargetReached or WatchKind.SectionPasses or WatchKind.TankBrims => (at.Volume - watch.Value) / vessel.Capacity,
-            WatchKind.InletUncovers => (at.Volume - line.UncoverVolume) / vessel.Capacity,
-            WatchKind.AirBreakUncovers => at.Surface - line.DrawOff.Line.AirBreak!.Value,
-            WatchKind.AirDrawn => at.Surface - line.SubmergedAbove(flow),
-            WatchKind.MarginVanishes => FreeMargin(watch.Line, at, delivered, flow) / atmosphere,
-            WatchKind.LiftExhausts => line.Margin(0, at.Surface, at.Gas) / line.SpecificWeight - run.SettledWithin,
-            WatchKind.HeadSettles => Unsettled(line.Head(at.Surface, at.Gas, delivered)),
-            WatchKind.AllSettle => LargestHead(at, y) - run.SettledWithin,
-            WatchKind.BoreUncovers => BoreCover(line.InletLimit(at.Surface), flow),
-            WatchKind.OutletCovers => line.ReceiverSurface(delivered) - line.Hydraulics.OutletElevation,
-            WatchKind.ReceiverBrims => line.ReceiverDepth(delivered)!.Value - line.BrimDepth!.Value,
-            WatchKind.RegimePasses => RegimeDistance(line, watch, at, delivered),
-            WatchKind.VacuumRatingPasses => (atmosphere - at.Gas - Job.VacuumRating!.Value) / atmosphere,
-            WatchKind.PressureRatingPasses => (at.Gas - atmosphere - Job.PressureRating!.Value) / atmosphere,
-            WatchKind.FlowsBalance => Imbalance(at.Time, dydt),
-            WatchKind.ActFalls => Job.Timeline[watch.Ordinal] is { Time: { } time } ? time - at.Time : at.Surface - Job.Timeline[watch.Ordinal].Level!.Value,
-            WatchKind.InflowTurns => at.Time - watch.Value,
-            _ => throw new UnreachableException($"no event function watches {watch.Kind}"),
-        };
-    }
-
-    /// <summary>The head above the settled head, m; the head itself, which changes its sign, where none is settled, which 0 says.</summary>
-    private double Unsettled(double head) => run.SettledWithin == 0 ? head : Math.Abs(head) - run.SettledWithin;
-
-    /// <summary>
-    /// The margin in free flow, Pa; the flow of the dense output serves where it is free. Where the margin cannot vanish
-    /// its lower bound stands for it: of the same sign, and without a friction factor.
-    /// </summary>
-    private double FreeMargin(int line, in Moment at, double delivered, double flow)
-    {
-        double bound = now.Plant.Lines[line].MarginBound(at.Surface, at.Gas, delivered);
-        if (bound > 0)
-            return bound;
-        double free = now.Modes[line].IsLimited ? Flow(now, line, at.Surface, at.Gas, delivered, limited: false) : flow;
-        return now.Plant.Lines[line].Margin(free, at.Surface, at.Gas);
-    }
-
-    /// <summary>Positive while the inlet could let in more than the line carries; 1 where it is well covered.</summary>
-    private static double BoreCover(double limit, double flow) =>
-        double.IsInfinity(limit) ? 1 : limit <= 0 ? -1 : CoverAtEquality - flow / limit;
-
-    private double RegimeDistance(CompiledLine line, Watch watch, in Moment at, double delivered)
-    {
-        double flow = line.Hydraulics.RegimeFlows[watch.Ordinal];
-        if (line.Hydraulics.IsShut)
-            return -1;
-        return now.Modes[watch.Line].IsLimited
-            ? line.Margin(flow, at.Surface, at.Gas) / atmosphere
-            : Math.Abs(line.Head(at.Surface, at.Gas, delivered)) - line.RegimeHeads[watch.Ordinal];
-    }
-
-    private double LargestHead(in Moment at, ReadOnlySpan<double> y)
-    {
-        double largest = 0;
-        for (int i = 0; i < LineCount; i++)
-        {
-            if (now.Modes[i].IsAtWork)
-                largest = Math.Max(largest, Math.Abs(now.Plant.Lines[i].Head(at.Surface, at.Gas, y[i])));
-        }
-
-        return largest;
-    }
-
-    /// <summary>Relative difference of inflow and outflow above that which counts as none; 1 before the inflow's last turn.</summary>
-    private double Imbalance(double t, ReadOnlySpan<double> dydt)
-    {
-        double inflow = now.Inflow(t), outflow = 0;
-        if (now.Plant.Job.Inflow is not { } table || inflow <= 0 || t < table.Points[^1].Time)
-            return 1;
-        for (int i = 0; i < LineCount; i++)
-            outflow += dydt[i];
-        return Math.Abs(inflow - outflow) / inflow - BalancedWithin;
-    }
-
-    /// <summary>Flow over inlet limit where the line alone would carry just the limit, 1; see <see cref="Lines.Inlets.FlowBlend"/>.</summary>
-    private const double CoverAtEquality = 1 - Lines.Inlets.FlowBlend.HalfWidth / 4;
-
-    /// <summary>Share of the inflow by which the outflow may differ and still count as balanced, 1.</summary>
-    private const double BalancedWithin = 1e-3;
-
-    /// <summary>What the event functions look at.</summary>
-    private readonly record struct Moment(double Time, double Volume, double Surface, double Gas);
 }
