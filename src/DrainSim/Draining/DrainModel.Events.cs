@@ -30,9 +30,10 @@ internal sealed partial class DrainModel : IEventSet
         Watch watch = watches[index];
         EventAction action = watch.Kind switch
         {
-            WatchKind.TargetReached or WatchKind.TankBrims or WatchKind.AllSettle or WatchKind.FlowsBalance => EventAction.Stop,
+            WatchKind.TargetReached or WatchKind.TankBrims or WatchKind.FlowsBalance => EventAction.Stop,
             WatchKind.VacuumRatingPasses or WatchKind.PressureRatingPasses => EventAction.Record,
             WatchKind.SectionPasses or WatchKind.ActFalls or WatchKind.InflowTurns => EventAction.Restart,
+            WatchKind.AllSettle => now.LinesAtWork > 1 || now.Plant.Job.Inflow is not null ? EventAction.Restart : EventAction.Ignore,
             _ when !now.Modes[watch.Line].IsAtWork => EventAction.Ignore,
             WatchKind.BoreUncovers => EventAction.Record,
             WatchKind.LiftExhausts when !now.Modes[watch.Line].IsLimited => EventAction.Ignore,
@@ -55,6 +56,8 @@ internal sealed partial class DrainModel : IEventSet
         LineMode mode = now.Modes[watch.Line];
         if (watch.Kind == WatchKind.ActFalls)
             Begin(AfterAct(watch.Ordinal, t, y));
+        else if (watch.Kind == WatchKind.AllSettle)
+            EndAllAtRest(t, y);
         else if (watch.Kind == WatchKind.MarginVanishes && now.Plant.Lines[watch.Line].HoldsAtVapour)
             Begin(now.With(t, watch.Line, mode with { IsLimited = !mode.IsLimited }));
         else if (EndingOf(watch, t, y) is { } ending)
@@ -71,6 +74,7 @@ internal sealed partial class DrainModel : IEventSet
         WatchKind.MarginVanishes or WatchKind.LiftExhausts => Outcome.VapourBreak,
         WatchKind.HeadSettles => RestOf(watch.Line, t, y),
         WatchKind.ReceiverBrims => Outcome.ReceiverFull,
+        WatchKind.OutletCovers when RunsBack(watch.Line, t, y) => Outcome.Levelled, // the receiver sank to the outlet
         _ => null,
     };
 
@@ -109,6 +113,21 @@ internal sealed partial class DrainModel : IEventSet
         return isAlone || (compiled.DrawOff.Receiver is null && compiled.Hydraulics.RisesAboveInlet);
     }
 
+    private void EndAllAtRest(double t, ReadOnlySpan<double> y)
+    {
+        for (int i = 0; i < LineCount; i++)
+        {
+            if (now.Modes[i].IsAtWork)
+                Begin(now.With(t, i, now.Modes[i] with { Ending = RestOf(i, t, y), EndedAt = t }));
+        }
+    }
+
+    private bool RunsBack(int line, double t, ReadOnlySpan<double> y)
+    {
+        double volume = Volume(now, t, y);
+        return now.Plant.Lines[line].Head(vessel.Level(volume), GasPressure(now, t, volume, y), y[line]) < 0;
+    }
+
     private Outcome RestOf(int line, double t, ReadOnlySpan<double> y)
     {
         double volume = Volume(now, t, y), surface = vessel.Level(volume);
@@ -130,8 +149,8 @@ internal sealed partial class DrainModel : IEventSet
             WatchKind.AirDrawn => at.Surface - line.SubmergedAbove(flow),
             WatchKind.MarginVanishes => FreeMargin(watch.Line, at, delivered, flow) / atmosphere,
             WatchKind.LiftExhausts => line.Margin(0, at.Surface, at.Gas) / line.SpecificWeight - run.SettledWithin,
-            WatchKind.HeadSettles => Unsettled(line.Head(at.Surface, at.Gas, delivered)),
-            WatchKind.AllSettle => LargestHead(at, y) - run.SettledWithin,
+            WatchKind.HeadSettles => Unsettled(RestHead(line, at, delivered)),
+            WatchKind.AllSettle => IsFed(at.Time) ? 1 : LargestHead(at, y) - run.SettledWithin,
             WatchKind.BoreUncovers => BoreCover(line.InletLimit(at.Surface), flow),
             WatchKind.OutletCovers => line.ReceiverSurface(delivered) - line.Hydraulics.OutletElevation,
             WatchKind.ReceiverBrims => line.ReceiverDepth(delivered)!.Value - line.BrimDepth!.Value,
@@ -144,6 +163,23 @@ internal sealed partial class DrainModel : IEventSet
             _ => throw new UnreachableException($"no event function watches {watch.Kind}"),
         };
     }
+
+    /// <summary>
+    /// The head that has to be used up before a line rests, m. Under a vent that lets air in at any vacuum the vacuum wears
+    /// off: there the liquid's own head has to be used up too, however small the driving head is meanwhile.
+    /// </summary>
+    private double RestHead(CompiledLine line, in Moment at, double delivered)
+    {
+        double head = line.Head(at.Surface, at.Gas, delivered);
+        if (!now.Plant.Gas.LosesVacuum)
+            return head;
+        double liquid = at.Surface - line.OutletLevel(delivered);
+        return Math.Abs(liquid) > Math.Abs(head) ? liquid : head;
+    }
+
+    /// <summary>Whether something still runs in, now or later.</summary>
+    private bool IsFed(double t) =>
+        now.Plant.Job.Inflow is { Points: [.., var last] } && (t < last.Time || last.Flow > 0);
 
     /// <summary>The head above the settled head, m; the head itself, which changes its sign, where none is settled, which 0 says.</summary>
     private double Unsettled(double head) => run.SettledWithin == 0 ? head : Math.Abs(head) - run.SettledWithin;
@@ -181,7 +217,7 @@ internal sealed partial class DrainModel : IEventSet
         for (int i = 0; i < LineCount; i++)
         {
             if (now.Modes[i].IsAtWork)
-                largest = Math.Max(largest, Math.Abs(now.Plant.Lines[i].Head(at.Surface, at.Gas, y[i])));
+                largest = Math.Max(largest, Math.Abs(RestHead(now.Plant.Lines[i], at, y[i])));
         }
 
         return largest;

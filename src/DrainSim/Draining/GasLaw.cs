@@ -48,6 +48,9 @@ internal sealed class GasLaw
     /// <summary>Whether the gas has a pressure of its own that the fall of the level changes.</summary>
     public bool IsConfined => space is not null;
 
+    /// <summary>Whether air comes in at any vacuum, so that in the end there is none: an open vent does it, a valve does not.</summary>
+    public bool LosesVacuum => vents is not null && vents.MassFlow(outside.Pressure * (1 - 1e-6), outside, out _) > 0;
+
     /// <summary>Pressure on the liquid, Pa absolute.</summary>
     /// <param name="liquid">volume of liquid in the tank, m³</param>
     /// <param name="mass">mass of gas over it, kg</param>

@@ -76,7 +76,6 @@ internal static class RunFindings
             WatchKind.TargetReached => Outcome.TargetReached,
             WatchKind.TankBrims => Outcome.Overflowed,
             WatchKind.FlowsBalance => Outcome.Balanced,
-            WatchKind.AllSettle => Outcome.Levelled,
             _ => last.Ending ?? Outcome.TimeLimit,
         };
     }

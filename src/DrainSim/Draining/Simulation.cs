@@ -66,6 +66,8 @@ public static class Simulation
         {
             if (StartCheck.Refusal(plant.Job, line, gas) is not null)
                 return new LineMode(false, Outcome.NeverStarted);
+            if (line.DrawOff.Line.AirBreak >= level)
+                return new LineMode(false, Outcome.AirBreak);
             double flow = line.Flow(new LineConditions(level, gas, 0, false), guess: 0);
             if (line.Margin(flow, level, gas) > 0)
                 return new LineMode(false);
@@ -83,6 +85,6 @@ public static class Simulation
             return Outcome.Emptied;
         if (job.Level <= job.Run.StopAtLevel || plant.Vessel.Volume(job.Level) <= job.Run.StopAtVolume)
             return Outcome.TargetReached;
-        return modes.Any(m => m.IsAtWork) ? null : modes.All(m => m.Ending == Outcome.NeverStarted) ? Outcome.NeverStarted : Outcome.VapourBreak;
+        return modes.Any(m => m.IsAtWork) ? null : modes.FirstOrDefault(m => m.Ending != Outcome.NeverStarted).Ending ?? Outcome.NeverStarted;
     }
 }

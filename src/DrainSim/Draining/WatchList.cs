@@ -45,7 +45,7 @@ internal static class WatchList
 
     private static IEnumerable<Watch> OfTank(Job job, int lines, GasLaw gas)
     {
-        if (lines > 1)
+        if (lines > 1 || job.Inflow is not null)
             yield return new(WatchKind.AllSettle);
         foreach (double level in job.Vessel.SectionLevels)
             yield return new(WatchKind.SectionPasses, Value: job.Vessel.Volume(level));

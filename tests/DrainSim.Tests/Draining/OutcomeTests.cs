@@ -139,6 +139,16 @@ public sealed class OutcomeTests
         Assert.Equal(0.9, result.FinalLevel, 1e-9);
     }
 
+    [Theory]
+    [InlineData(2.2)]
+    [InlineData(2.5)]
+    public void A_hole_that_stands_in_the_air_already_breaks_the_line_at_once(double hole)
+    {
+        DrainResult result = Jobs.Run(With(Jobs.SiphonLine() with { AirBreak = hole }));
+        Assert.Equal((Outcome.AirBreak, 0.0, 0.0), (result.Outcome, result.StoppedAt, result.DrainedVolume));
+        Assert.NotNull(result.FallBack);
+    }
+
     [Fact]
     public void A_settled_head_of_nothing_is_found_too()
     {
