@@ -73,6 +73,27 @@ internal static class Jobs
     public static IReadOnlyList<DrawOff> Only(Line line, double? surface = null) =>
         [new DrawOff { Line = line, Receiver = surface is { } z ? new FixedSurface { Elevation = z } : null }];
 
+    /// <summary>A prism that an orifice in its floor empties into the open air.</summary>
+    /// <param name="area">area of the prism, m²</param>
+    /// <param name="height">its height, m</param>
+    /// <param name="level">level at the start, m</param>
+    /// <param name="bore">bore of the orifice, m</param>
+    /// <param name="dischargeCoefficient">Cd, 1</param>
+    public static Job OrificeDrain(
+        double area = 2, double height = 4, double level = 3, double bore = 0.05, double dischargeCoefficient = 0.6) => new()
+        {
+            Liquid = Inviscid,
+            Vessel = Prism(area, height),
+            Level = level,
+            DrawOffs = Only(Orifice(bore, dischargeCoefficient)),
+        };
+
+    /// <summary>The factor K = Cd·a·√2g of an orifice, so that its flow is K·√h, m^2.5/s.</summary>
+    /// <param name="bore">bore of the orifice, m</param>
+    /// <param name="dischargeCoefficient">Cd, 1</param>
+    public static double OrificeFactor(double bore = 0.05, double dischargeCoefficient = 0.6) =>
+        dischargeCoefficient * Math.PI / 4 * bore * bore * Math.Sqrt(2 * Site.StandardGravity);
+
     /// <summary>A standing cylinder with flat ends.</summary>
     /// <param name="diameter">diameter, m</param>
     /// <param name="height">height, m</param>
