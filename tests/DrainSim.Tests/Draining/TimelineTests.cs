@@ -65,6 +65,20 @@ public sealed class TimelineTests
         Assert.Equal(Jobs.Run(Wide with { Run = new RunSettings { Until = 300 } }).FinalLevel, result.FinalLevel, 1e-7);
     }
 
+    [Fact]
+    public void What_ran_in_before_an_act_stays_in_the_balance()
+    {
+        const double before = 2e-4, after = 5e-4;
+        Job more = Throttled with { Inflow = Inflow.Constant(after) };
+        DrainResult result = Jobs.Run(Wide with
+        {
+            Inflow = Inflow.Constant(before),
+            Run = new RunSettings { Until = 900 },
+            Timeline = [new Act { Time = 300, After = more, Text = "throttled, and more runs in" }],
+        });
+        Assert.Equal(result.InitialVolume + 300 * before + 600 * after, result.DrainedVolume + result.LeftVolume, 1e-9);
+    }
+
     private static Line WithValve(double opening)
     {
         Line line = Jobs.SiphonLine();
