@@ -21,6 +21,9 @@ public static class RemedySearch
     /// <summary>Largest loss coefficient that is tried as a throttle, 1.</summary>
     private const double LargestLoss = 1e6;
 
+    /// <summary>Share of the contents that a changed job must drain to count as going on, 1.</summary>
+    private const double WorthTheWork = 0.001;
+
     /// <summary>The changes that would let a job go on, each proved by a run; empty where none is needed or none helps.</summary>
     /// <param name="result">the run that stopped</param>
     /// <param name="cancellation">ends the search early with an <see cref="OperationCanceledException"/></param>
@@ -50,15 +53,23 @@ public static class RemedySearch
     private static Remedy? Solve(DrainResult result, RemedyKind kind, CancellationToken cancellation)
     {
         bool isThrottle = kind == RemedyKind.ThrottleOutlet;
-        double most = isThrottle ? LargestLoss : LargestDrop;
-        double good = isThrottle ? 1 : 2 * ElevationWidth, bad = 0;
+        double most = kind switch
+        {
+            RemedyKind.ThrottleOutlet => LargestLoss,
+            RemedyKind.LowerCrest => CrestRoom(result.Job),
+            RemedyKind.LowerInlet => result.Job.Line.Inlet.Elevation,
+            _ => LargestDrop,
+        };
+        double good = Math.Min(isThrottle ? 1 : 2 * ElevationWidth, most), bad = 0;
+        if (most <= 0)
+            return null;
         DrainResult? proof;
         while ((proof = Prove(result, kind, good, cancellation)) is null)
         {
-            bad = good;
-            good *= 2;
-            if (good > most)
+            if (good >= most)
                 return null;
+            bad = good;
+            good = Math.Min(2 * good, most);
         }
 
         while (isThrottle ? good > LossRatio * Math.Max(bad, 1e-3) : good - bad > ElevationWidth)
@@ -80,7 +91,8 @@ public static class RemedySearch
         if (Changed(result.Job, kind, change) is not { } job)
             return null;
         DrainResult tried = Simulation.Run(job, cancellation);
-        bool goesOn = tried.Outcome is not (Outcome.Levelled or Outcome.VapourBreak or Outcome.NeverStarted);
+        bool goesOn = tried.Outcome is not (Outcome.Levelled or Outcome.VapourBreak or Outcome.NeverStarted)
+            && tried.DrainedVolume > WorthTheWork * tried.InitialVolume;
         return goesOn ? tried : null;
     }
 
@@ -90,7 +102,7 @@ public static class RemedySearch
         {
             RemedyKind.LowerOutlet => LineChanges.WithLowerOutlet(job.Line, change),
             RemedyKind.LowerCrest => LineChanges.WithLowerCrest(job.Line, change),
-            RemedyKind.LowerInlet when change <= job.Line.Inlet.Elevation => LineChanges.WithLowerInlet(job.Line, change),
+            RemedyKind.LowerInlet => LineChanges.WithLowerInlet(job.Line, change),
             RemedyKind.ThrottleOutlet => LineChanges.WithThrottle(job.Line, change),
             _ => null,
         };
@@ -100,6 +112,14 @@ public static class RemedySearch
         if (kind == RemedyKind.LowerOutlet)
             first = first with { Receiver = Lowered(first.Receiver, change) };
         return job with { DrawOffs = [first, .. job.DrawOffs.Skip(1)] };
+    }
+
+    /// <summary>How far the crest can come down, m: to the rim where the line hangs over it, else to the inlet.</summary>
+    private static double CrestRoom(Job job)
+    {
+        var hydraulics = new LineHydraulics(job.Line, job.Liquid, job.Site.Gravity);
+        double rim = job.Vessel.Height, crest = hydraulics.CrestElevation;
+        return crest - (crest >= rim ? rim : hydraulics.InletElevation);
     }
 
     private static Receiver? Lowered(Receiver? receiver, double drop) => receiver switch

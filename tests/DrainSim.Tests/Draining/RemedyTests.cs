@@ -21,7 +21,7 @@ public sealed class RemedyTests
     [Fact]
     public void A_parted_column_is_told_a_lower_crest_and_a_throttle()
     {
-        Job job = Jobs.Siphon() with { Liquid = Jobs.Water with { VapourPressure = 68e3 } };
+        Job job = Jobs.Siphon() with { Liquid = Jobs.Water with { VapourPressure = 67e3 } };
         IReadOnlyList<Remedy> remedies = Find(job);
         Assert.Equal([RemedyKind.LowerCrest, RemedyKind.ThrottleOutlet], remedies.Select(remedy => remedy.Kind));
         double loss = remedies[1].Change;
@@ -36,6 +36,23 @@ public sealed class RemedyTests
         Assert.Equal(NoStart.NoDrivingHead, Jobs.Run(job).NoStart);
         Remedy remedy = Assert.Single(Find(job));
         Assert.NotEqual(Outcome.NeverStarted, remedy.ProvedOutcome);
+    }
+
+    [Fact]
+    public void No_crest_is_offered_below_the_rim_that_the_hose_hangs_over()
+    {
+        Job job = Jobs.Siphon() with { Liquid = Jobs.Water with { VapourPressure = 72e3 } };
+        Assert.Equal(Outcome.VapourBreak, Jobs.Run(job).Outcome);
+        Assert.DoesNotContain(Find(job), remedy => remedy.Kind == RemedyKind.LowerCrest && remedy.Value < job.Vessel.Height);
+    }
+
+    [Fact]
+    public void A_lower_inlet_is_offered_only_when_it_drains_something()
+    {
+        Job job = Jobs.Siphon() with { Level = 0.08 };
+        Remedy remedy = Assert.Single(Find(job));
+        Assert.Equal(RemedyKind.LowerInlet, remedy.Kind);
+        Assert.True(remedy.Value < 0.0801 && remedy.ProvedTime > 0);
     }
 
     [Fact]
