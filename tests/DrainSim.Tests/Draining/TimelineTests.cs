@@ -40,7 +40,7 @@ public sealed class TimelineTests
     [Fact]
     public void Of_two_acts_at_one_time_the_later_in_the_list_stays()
     {
-        Act throttle = new() { Time = 500, After = Throttled, Text = "throttled" }, open = new() { Time = 500, After = Wide, Text = "opened" };
+        Act throttle = new() { Time = 500, After = Throttled, Text = "throttled" }, open = new() { Time = 500, Before = Throttled, After = Wide, Text = "opened" };
         Assert.Equal(Jobs.Run(Wide).StoppedAt, Jobs.Run(Wide with { Timeline = [throttle, open] }).StoppedAt, 1e-3);
         DrainResult closed = Jobs.Run(Wide with { Timeline = [open, throttle] });
         DrainResult alone = Jobs.Run(Wide with { Timeline = [throttle] });
