@@ -19,7 +19,7 @@ internal sealed partial class DrainModel : IEventSet
         double unclamped = StartVolume + now.InflowVolume(t);
         for (int i = 0; i < LineCount; i++)
             unclamped -= y[i];
-        var moment = new Moment(t, unclamped, surface, GasPressure(now, t, volume, y));
+        var moment = new Moment(t, unclamped, surface, GasPressure(now, volume, y));
         for (int i = 0; i < watches.Length; i++)
             values[i] = Value(watches[i], moment, y, dydt);
     }
@@ -96,9 +96,8 @@ internal sealed partial class DrainModel : IEventSet
     private Epoch AfterAct(int ordinal, double t, Span<double> y)
     {
         Plant after = plantsAfter[ordinal];
-        bool massIsKnown = now.Plant.Gas is { IsConfined: true, IsSteady: false };
-        if (hasMass && after.Gas.IsConfined && !massIsKnown)
-            y[LineCount] = after.Gas.MassAt(GasPressure(now, t, Volume(now, t, y), y), Volume(now, t, y));
+        if (hasMass && after.Gas.IsConfined && !now.Plant.Gas.IsConfined)
+            y[LineCount] = after.Gas.MassAt(GasPressure(now, Volume(now, t, y), y), Volume(now, t, y));
         return now.With(t, after);
     }
 
@@ -125,7 +124,7 @@ internal sealed partial class DrainModel : IEventSet
     private bool RunsBack(int line, double t, ReadOnlySpan<double> y)
     {
         double volume = Volume(now, t, y);
-        return now.Plant.Lines[line].Head(vessel.Level(volume), GasPressure(now, t, volume, y), y[line]) < 0;
+        return now.Plant.Lines[line].Head(vessel.Level(volume), GasPressure(now, volume, y), y[line]) < 0;
     }
 
     private Outcome RestOf(int line, double t, ReadOnlySpan<double> y)
