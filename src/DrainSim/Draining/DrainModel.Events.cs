@@ -96,8 +96,8 @@ internal sealed partial class DrainModel : IEventSet
     private Epoch AfterAct(int ordinal, double t, Span<double> y)
     {
         Plant after = plantsAfter[ordinal];
-        if (hasMass && after.Gas.IsConfined && !now.Plant.Gas.IsConfined)
-            y[LineCount] = after.Gas.MassAt(GasPressure(now, Volume(now, t, y), y), Volume(now, t, y));
+        if (hasPressure && after.Gas.IsConfined)
+            y[LineCount] = GasPressure(now, Volume(now, t, y), y);
         return now.With(t, after);
     }
 

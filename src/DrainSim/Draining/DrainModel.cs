@@ -7,7 +7,8 @@ namespace DrainSim.Draining;
 /// <remarks>
 /// State: y[i] is the volume that line i has taken out of the tank, m³, so that its slope is the line's flow, the volume in
 /// the tank is V = V₀ + ∫inflow − Σy[i] and that in a receiver Vr₀ + y[i]: the balance closes by construction. Where gas
-/// comes and goes its mass, kg, is the last component. What is watched on the way and the slopes for implicit steps
+/// comes and goes its pressure, Pa, is the last component: not its mass, of which the pressure that drives the vent would be a
+/// difference of near equals, kept by a balance of stiff terms at every trial state. What is watched on the way and the slopes for implicit steps
 /// stand in the other parts of the class.
 /// </remarks>
 internal sealed partial class DrainModel : IOdeSystem
@@ -15,7 +16,7 @@ internal sealed partial class DrainModel : IOdeSystem
     private readonly Vessel vessel;
     private readonly RunSettings run;
     private readonly double atmosphere;
-    private readonly bool hasMass;
+    private readonly bool hasPressure;
     private readonly Watch[] watches;
     private readonly double[] guesses;
     private readonly List<Epoch> epochs;
@@ -31,7 +32,7 @@ internal sealed partial class DrainModel : IOdeSystem
         LineCount = plant.Lines.Length;
         StartVolume = vessel.Volume(Job.Level);
         plantsAfter = [.. Job.Timeline.Select(act => new Plant(act.After))];
-        hasMass = plantsAfter.Append(plant).Any(p => p.Gas.HasRate || (plantsAfter.Length > 0 && p.Gas.IsConfined));
+        hasPressure = plantsAfter.Append(plant).Any(p => p.Gas.Breathes || (plantsAfter.Length > 0 && p.Gas.IsConfined));
         StartMass = plant.Gas.StartMass;
         guesses = new double[LineCount];
         watches = WatchList.Of(plant, TargetVolume);
@@ -58,7 +59,7 @@ internal sealed partial class DrainModel : IOdeSystem
     public IReadOnlyList<Epoch> Epochs => epochs;
 
     /// <inheritdoc/>
-    public int Dimension => LineCount + (hasMass ? 1 : 0);
+    public int Dimension => LineCount + (hasPressure ? 1 : 0);
 
     private double? TargetVolume => (run.StopAtLevel, run.StopAtVolume) switch
     {
@@ -72,8 +73,8 @@ internal sealed partial class DrainModel : IOdeSystem
     public void StartState(Span<double> y)
     {
         y.Clear();
-        if (hasMass)
-            y[LineCount] = StartMass;
+        if (hasPressure)
+            y[LineCount] = now.Plant.Gas.Pressure(StartVolume, StartMass);
     }
 
     /// <summary>The stretch that a time belongs to; at a restart the one before it.</summary>
@@ -97,7 +98,7 @@ internal sealed partial class DrainModel : IOdeSystem
 
     /// <summary>Pressure on the liquid, Pa absolute.</summary>
     public double GasPressure(Epoch epoch, double volume, ReadOnlySpan<double> y) =>
-        epoch.Plant.Gas.Pressure(volume, hasMass ? y[LineCount] : StartMass);
+        hasPressure && epoch.Plant.Gas.IsConfined ? y[LineCount] : epoch.Plant.Gas.Pressure(volume, StartMass);
 
     /// <summary>Flow of a line out of the tank, solved for, m³/s; 0 for a line that no longer works.</summary>
     public double Flow(Epoch epoch, int line, double surface, double gas, double delivered, bool limited) =>
@@ -166,10 +167,11 @@ internal sealed partial class DrainModel : IOdeSystem
     public void Derivative(double t, ReadOnlySpan<double> y, Span<double> dydt)
     {
         double volume = Volume(now, t, y), surface = vessel.Level(volume), gas = GasPressure(now, volume, y);
+        double growth = -now.Inflow(t);
         for (int i = 0; i < LineCount; i++)
-            dydt[i] = Flow(now, i, surface, gas, y[i], now.Modes[i].IsLimited);
-        if (hasMass)
-            dydt[LineCount] = now.Plant.Gas.MassFlow(gas, out _);
+            growth += dydt[i] = Flow(now, i, surface, gas, y[i], now.Modes[i].IsLimited);
+        if (hasPressure)
+            dydt[LineCount] = now.Plant.Gas.IsConfined ? now.Plant.Gas.Rate(gas, volume, growth).Rate : 0;
     }
 
     /// <summary>
@@ -188,8 +190,8 @@ internal sealed partial class DrainModel : IOdeSystem
             scale[i] = Math.Max(1e-12 * vessel.Capacity, Math.Abs(dydt[i]) * t + Math.Min(toRest, toAir));
         }
 
-        if (hasMass)
-            scale[LineCount] = Math.Max(y[LineCount], 1e-9 * StartMass);
+        if (hasPressure)
+            scale[LineCount] = atmosphere;
     }
 
     /// <inheritdoc/>

@@ -29,8 +29,8 @@ internal sealed class GasLaw
         StartMass = space.Mass(pressure, GasVolume(job.Vessel.Volume(job.Level)));
     }
 
-    /// <summary>Whether gas comes and goes, so that its mass has a rate of its own.</summary>
-    public bool HasRate => vents is not null;
+    /// <summary>Whether gas comes and goes.</summary>
+    public bool Breathes => vents is not null;
 
     /// <summary>Mass of gas at the start, kg; 0 where its mass does not matter.</summary>
     public double StartMass { get; }
@@ -47,34 +47,16 @@ internal sealed class GasLaw
     public double Pressure(double liquid, double mass) =>
         space is null ? held : space.Pressure(Math.Max(mass, double.Epsilon), GasVolume(liquid));
 
-    /// <summary>Pressure on the liquid, Pa absolute, and its slopes.</summary>
+    /// <summary>How fast the pressure of a confined gas changes; its slope by volume is that by the gas.</summary>
+    /// <param name="pressure">pressure on the liquid, Pa absolute</param>
     /// <param name="liquid">volume of liquid in the tank, m³</param>
-    /// <param name="mass">mass of gas over it, kg</param>
-    /// <param name="byLiquid">∂p/∂V of the liquid, Pa/m³</param>
-    /// <param name="byMass">∂p/∂m, Pa/kg</param>
-    public double Pressure(double liquid, double mass, out double byLiquid, out double byMass)
+    /// <param name="growth">flow of liquid out less what runs in, m³/s</param>
+    public PressureRate Rate(double pressure, double liquid, double growth)
     {
-        (byLiquid, byMass) = (0, 0);
-        if (space is null)
-            return held;
+        double slope = 0, massFlow = vents?.MassFlow(pressure, outside, out slope) ?? 0;
         double volume = GasVolume(liquid);
-        double pressure = space.Pressure(Math.Max(mass, double.Epsilon), volume, out byMass, out double byVolume);
-        byLiquid = volume > LeastGas * capacity ? -byVolume : 0;
-        return pressure;
-    }
-
-    /// <summary>Mass of gas over a volume of liquid at a pressure, kg.</summary>
-    /// <param name="pressure">pressure on the liquid, Pa absolute</param>
-    /// <param name="liquid">volume of liquid in the tank, m³</param>
-    public double MassAt(double pressure, double liquid) => space?.Mass(pressure, GasVolume(liquid)) ?? 0;
-
-    /// <summary>Mass flow of gas into the headspace, kg/s.</summary>
-    /// <param name="pressure">pressure on the liquid, Pa absolute</param>
-    /// <param name="slope">dW/dp, kg/(s·Pa)</param>
-    public double MassFlow(double pressure, out double slope)
-    {
-        slope = 0;
-        return vents?.MassFlow(pressure, outside, out slope) ?? 0;
+        PressureRate rate = space!.Rate(pressure, volume, massFlow, slope, growth);
+        return volume > LeastGas * capacity ? rate : rate with { ByVolume = 0 };
     }
 
     private double GasVolume(double liquid) => Math.Max(LeastGas * capacity, capacity - liquid);
