@@ -2,6 +2,10 @@ namespace DrainSim.Integration;
 
 /// <summary>Steps with a Rosenbrock method: implicit, one Jacobian a step, no iteration.</summary>
 /// <typeparam name="TSystem">the system stepped</typeparam>
+/// <remarks>
+/// The error is that of the step's end. A part of the solution that is quick and driven by time alone is far better there than
+/// asked for, so that steps grow until its dense output is thousands of tolerances off; where it follows other parts they keep the steps short.
+/// </remarks>
 internal sealed class Rosenbrock<TSystem> : Stepper<TSystem> where TSystem : IOdeSystem
 {
     private readonly int n;
