@@ -5,7 +5,7 @@ using DrainSim.Vessels;
 namespace DrainSim.Draining;
 
 /// <summary>A line and its receiver, ready to be asked for flows and pressures at any state; immutable.</summary>
-internal sealed class CompiledLine
+internal sealed partial class CompiledLine
 {
     private readonly double receiverStart, atmosphere, gravity, fixedSurface;
     private readonly Vessel? receiver;

@@ -20,7 +20,7 @@ internal sealed partial class DrainModel : IEventSet
         double unclamped = StartVolume + now.InflowVolume(t);
         for (int i = 0; i < LineCount; i++)
             unclamped -= y[i];
-        var moment = new Moment(t, unclamped, surface, GasPressure(now, t, volume, y));
+        var moment = new Moment(t, unclamped, surface, GasPressure(now, volume, y));
         for (int i = 0; i < watches.Length; i++)
             values[i] = Value(watches[i], moment, y, dydt);
     }
@@ -130,9 +130,8 @@ internal sealed partial class DrainModel : IEventSet
     private Epoch AfterAct(int ordinal, double t, Span<double> y)
     {
         Plant after = new(Job.Timeline[ordinal].ChangeOf(now.Plant.Job, Job));
-        bool massIsKnown = now.Plant.Gas is { IsConfined: true, IsSteady: false };
-        if (hasMass && after.Gas.IsConfined && !massIsKnown)
-            y[LineCount] = after.Gas.MassAt(GasPressure(now, t, Volume(now, t, y), y), Volume(now, t, y));
+        if (hasPressure && after.Gas.IsConfined)
+            y[LineCount] = GasPressure(now, Volume(now, t, y), y);
         return now.With(t, after);
     }
 
@@ -159,7 +158,7 @@ internal sealed partial class DrainModel : IEventSet
     private bool RunsBack(int line, double t, ReadOnlySpan<double> y)
     {
         double volume = Volume(now, t, y);
-        return now.Plant.Lines[line].Head(vessel.Level(volume), GasPressure(now, t, volume, y), y[line]) < 0;
+        return now.Plant.Lines[line].Head(vessel.Level(volume), GasPressure(now, volume, y), y[line]) < 0;
     }
 
     private Outcome RestOf(int line, double t, ReadOnlySpan<double> y)
