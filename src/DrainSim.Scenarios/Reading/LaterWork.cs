@@ -5,7 +5,6 @@ internal static class LaterWork
 {
     private static readonly Dictionary<string, string> Keys = new()
     {
-        ["liquid.rheology"] = "Give the viscosity of a Newtonian liquid",
         ["tank.headspace"] = "The tank is open to the air",
         ["tank.inflow"] = "Nothing flows in",
         ["tank.vacuum_rating"] = "The tank is open to the air",

@@ -42,9 +42,9 @@ public static class RemedySearch
 
     private static RemedyKind[] Candidates(DrainResult result) => (result.Outcome, result.NoStart) switch
     {
-        (Outcome.Levelled, _) => [RemedyKind.LowerOutlet],
+        (Outcome.Levelled or Outcome.YieldHeld, _) => [RemedyKind.LowerOutlet],
         (Outcome.VapourBreak, _) => [RemedyKind.LowerCrest, RemedyKind.ThrottleOutlet],
-        (Outcome.NeverStarted, NoStart.NoDrivingHead) => [RemedyKind.LowerOutlet],
+        (Outcome.NeverStarted, NoStart.NoDrivingHead or NoStart.YieldHolds) => [RemedyKind.LowerOutlet],
         (Outcome.NeverStarted, NoStart.LiftBeyondLimit) => [RemedyKind.LowerCrest],
         (Outcome.NeverStarted, NoStart.InletAboveLevel) => [RemedyKind.LowerInlet],
         _ => [],
@@ -91,7 +91,7 @@ public static class RemedySearch
         if (Changed(result.Job, kind, change) is not { } job)
             return null;
         DrainResult tried = Simulation.Run(job, cancellation);
-        bool goesOn = tried.Outcome is not (Outcome.Levelled or Outcome.VapourBreak or Outcome.NeverStarted)
+        bool goesOn = tried.Outcome is not (Outcome.Levelled or Outcome.YieldHeld or Outcome.VapourBreak or Outcome.NeverStarted)
             && tried.DrainedVolume > WorthTheWork * tried.InitialVolume;
         return goesOn ? tried : null;
     }
