@@ -105,7 +105,7 @@ internal sealed class StressLosses
         if (!(wanted > LeastHead))
             return 0;
         double low = 0, high = Math.Sqrt(wanted / (Steps[node].SquareToHere + Steps[node].Jet)) * (1 + 1e-9);
-        double q = guess > 0 && guess < high ? guess : high;
+        double q = guess > 0 && guess < high ? guess : high, moved = double.NaN;
         for (int turn = 0; turn < MostTurns; turn++)
         {
             double excess = Excess(node, q, out double rise);
@@ -121,7 +121,10 @@ internal sealed class StressLosses
                 return next;
             if (high - low <= 4e-16 * high)
                 return q;
-            if (!isInside || next == q)
+            // Across a kink two points may throw each other back and forth: a step that has not halved is replaced too.
+            bool isKept = isInside && next != q && !(Math.Abs(step) > 0.5 * Math.Abs(moved));
+            moved = isKept ? step : double.NaN;
+            if (!isKept)
                 next = low > 0 ? Math.Sqrt(low) * Math.Sqrt(high) : 1e-3 * high;
             q = next;
         }
