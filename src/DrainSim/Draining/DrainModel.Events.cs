@@ -33,7 +33,7 @@ internal sealed partial class DrainModel : IEventSet
         {
             WatchKind.TargetReached or WatchKind.TankBrims or WatchKind.FlowsBalance => EventAction.Stop,
             WatchKind.VacuumRatingPasses or WatchKind.PressureRatingPasses => EventAction.Record,
-            WatchKind.SectionPasses or WatchKind.ActFalls or WatchKind.InflowTurns => EventAction.Restart,
+            WatchKind.SectionPasses or WatchKind.ActFalls or WatchKind.InflowTurns or WatchKind.ValveMoves => EventAction.Restart,
             WatchKind.AllSettle => now.LinesAtWork > 1 || now.Plant.Job.Inflow is not null ? EventAction.Restart : EventAction.Ignore,
             _ when !now.Modes[watch.Line].IsAtWork => EventAction.Ignore,
             WatchKind.BoreUncovers => EventAction.Record,
@@ -47,7 +47,7 @@ internal sealed partial class DrainModel : IEventSet
             WatchKind.HeadSettles when run.SettledWithin == 0 => EventDirection.Either,
             _ => Direction(watch.Kind),
         };
-        return new EventRule(direction, action);
+        return new EventRule(direction, action, HasKink(watch.Kind));
     }
 
     /// <inheritdoc/>
@@ -112,10 +112,14 @@ internal sealed partial class DrainModel : IEventSet
         _ => null,
     };
 
+    /// <summary>Whether the balance is another beyond the event whatever is done there; where a mode changes it goes on as it was.</summary>
+    private static bool HasKink(WatchKind kind) => kind is WatchKind.TankBrims or WatchKind.OutletCovers or WatchKind.ReceiverBrims
+        or WatchKind.SectionPasses or WatchKind.RegimePasses or WatchKind.InflowTurns or WatchKind.ValveMoves;
+
     private static EventDirection Direction(WatchKind kind) => kind switch
     {
         WatchKind.RegimePasses or WatchKind.SectionPasses or WatchKind.OutletCovers
-            or WatchKind.BoreUncovers => EventDirection.Either,
+            or WatchKind.BoreUncovers or WatchKind.ValveMoves => EventDirection.Either,
         WatchKind.ReceiverBrims or WatchKind.VacuumRatingPasses or WatchKind.PressureRatingPasses or WatchKind.TankBrims
             or WatchKind.InflowTurns => EventDirection.Rising,
         _ => EventDirection.Falling,
@@ -192,6 +196,7 @@ internal sealed partial class DrainModel : IEventSet
             WatchKind.RegimePasses => RegimeDistance(line, watch, at, delivered),
             WatchKind.VacuumRatingPasses => (atmosphere - at.Gas - Job.VacuumRating!.Value) / atmosphere,
             WatchKind.PressureRatingPasses => (at.Gas - atmosphere - Job.PressureRating!.Value) / atmosphere,
+            WatchKind.ValveMoves => (at.Gas - watch.Value) / atmosphere,
             WatchKind.FlowsBalance => Imbalance(at.Time, dydt),
             WatchKind.ActFalls => Job.Timeline[watch.Ordinal] is { Time: { } time } ? time - at.Time : at.Surface - Job.Timeline[watch.Ordinal].Level!.Value,
             WatchKind.InflowTurns => at.Time - watch.Value,

@@ -48,6 +48,9 @@ internal enum WatchKind
     /// <summary>The overpressure in the headspace about its rating.</summary>
     PressureRatingPasses,
 
+    /// <summary>The pressure in the headspace about one at which a valve begins to open or is fully open.</summary>
+    ValveMoves,
+
     /// <summary>The difference of inflow and outflow.</summary>
     FlowsBalance,
 

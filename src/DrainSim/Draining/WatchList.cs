@@ -1,3 +1,4 @@
+using DrainSim.Gas;
 using DrainSim.Lines;
 
 namespace DrainSim.Draining;
@@ -55,6 +56,8 @@ internal static class WatchList
             yield return new(WatchKind.VacuumRatingPasses);
         if (isConfined && job.PressureRating is not null)
             yield return new(WatchKind.PressureRatingPasses);
+        foreach (double pressure in job.Timeline.Select(act => act.After).Append(job).SelectMany(ValvePressures).Distinct())
+            yield return new(WatchKind.ValveMoves, Value: pressure);
         Inflow[] inflows = [.. job.Timeline.Select(act => act.After).Prepend(job).Select(plant => plant.Inflow).OfType<Inflow>()];
         if (inflows.Length > 0)
         {
@@ -68,6 +71,18 @@ internal static class WatchList
         {
             if (!job.Timeline[j].IsDueAtStart(job.Level))
                 yield return new(WatchKind.ActFalls, 0, j);
+        }
+    }
+
+    /// <summary>Pressures at which a valve begins to open or is fully open, Pa absolute: there the law of the headspace has a kink.</summary>
+    private static IEnumerable<double> ValvePressures(Job job)
+    {
+        double atmosphere = job.Site.AtmosphericPressure;
+        foreach (PressureValve valve in (job.Headspace as VentedHeadspace)?.Openings.OfType<PressureValve>() ?? [])
+        {
+            double sign = valve is ReliefValve ? 1 : -1;
+            yield return atmosphere + sign * valve.SetPressure;
+            yield return atmosphere + sign * valve.FullOpenPressure;
         }
     }
 }
