@@ -35,6 +35,8 @@ internal sealed partial class DrainModel : IEventSet
             WatchKind.SectionPasses or WatchKind.ActFalls or WatchKind.InflowTurns => EventAction.Restart,
             WatchKind.AllSettle => now.LinesAtWork > 1 || now.Plant.Job.Inflow is not null ? EventAction.Restart : EventAction.Ignore,
             _ when !now.Modes[watch.Line].IsAtWork => EventAction.Ignore,
+            WatchKind.FrontArrives or WatchKind.FrontStops => now.Modes[watch.Line].IsFilling ? EventAction.Restart : EventAction.Ignore,
+            WatchKind.RegimePasses or WatchKind.HeadSettles or WatchKind.BoreUncovers when now.Modes[watch.Line].IsFilling => EventAction.Ignore,
             WatchKind.BoreUncovers => EventAction.Record,
             WatchKind.LiftExhausts when !now.Modes[watch.Line].IsLimited => EventAction.Ignore,
             WatchKind.HeadSettles when !EndsAtRest(watch.Line) => EventAction.Ignore,
@@ -58,7 +60,9 @@ internal sealed partial class DrainModel : IEventSet
             Begin(AfterAct(watch.Ordinal, t, y));
         else if (watch.Kind == WatchKind.AllSettle)
             EndAllAtRest(t, y);
-        else if (watch.Kind == WatchKind.MarginVanishes && now.Plant.Lines[watch.Line].HoldsAtVapour)
+        else if (watch.Kind == WatchKind.FrontArrives)
+            Advance(watch.Line, t, y);
+        else if (watch.Kind == WatchKind.MarginVanishes && now.Plant.Lines[watch.Line].HoldsAtVapour && !mode.IsFilling)
             Begin(now.With(t, watch.Line, mode with { IsLimited = !mode.IsLimited }));
         else if (EndingOf(watch, t, y) is { } ending)
             Begin(now.With(t, watch.Line, mode with { Ending = ending, EndedAt = t }));
@@ -72,6 +76,7 @@ internal sealed partial class DrainModel : IEventSet
         WatchKind.AirDrawn => Outcome.InletUncovered,
         WatchKind.AirBreakUncovers => Outcome.AirBreak,
         WatchKind.MarginVanishes or WatchKind.LiftExhausts => Outcome.VapourBreak,
+        WatchKind.FrontStops => Outcome.NeverStarted,
         WatchKind.HeadSettles => RestOf(watch.Line, t, y),
         WatchKind.ReceiverBrims => Outcome.ReceiverFull,
         WatchKind.OutletCovers when RunsBack(watch.Line, t, y) => Outcome.Levelled, // the receiver sank to the outlet
@@ -83,9 +88,19 @@ internal sealed partial class DrainModel : IEventSet
         WatchKind.RegimePasses or WatchKind.SectionPasses or WatchKind.OutletCovers
             or WatchKind.BoreUncovers => EventDirection.Either,
         WatchKind.ReceiverBrims or WatchKind.VacuumRatingPasses or WatchKind.PressureRatingPasses or WatchKind.TankBrims
-            or WatchKind.InflowTurns => EventDirection.Rising,
+            or WatchKind.InflowTurns or WatchKind.FrontArrives => EventDirection.Rising,
         _ => EventDirection.Falling,
     };
+
+    /// <summary>The front goes on into the next segment; behind the last the line runs full, its flow that of its head.</summary>
+    private void Advance(int line, double t, Span<double> y)
+    {
+        LineMode mode = now.Modes[line];
+        bool isLast = mode.Segment == now.Plant.Lines[line].Filling!.SegmentCount - 1;
+        if (isLast)
+            y[flowAt[line]] = 0;
+        Begin(now.With(t, line, mode with { Segment = isLast ? -1 : mode.Segment + 1 }));
+    }
 
     private void Begin(Epoch next)
     {
@@ -149,7 +164,13 @@ internal sealed partial class DrainModel : IEventSet
             WatchKind.InletUncovers => (at.Volume - line.UncoverVolume) / vessel.Capacity,
             WatchKind.AirBreakUncovers => at.Surface - line.DrawOff.Line.AirBreak!.Value,
             WatchKind.AirDrawn => at.Surface - line.SubmergedAbove(flow),
+            WatchKind.MarginVanishes when now.Modes[watch.Line] is { IsFilling: true, IsAtWork: true } mode =>
+                line.FillingMargin(mode.Segment, at.Surface, at.Gas, flow, dydt[flowAt[watch.Line]]) / atmosphere,
             WatchKind.MarginVanishes => FreeMargin(watch.Line, at, delivered, flow) / atmosphere,
+            WatchKind.FrontArrives => now.Modes[watch.Line] is { IsFilling: true, Segment: var segment }
+                ? line.Filling!.Beyond(segment, delivered)
+                : 1,
+            WatchKind.FrontStops => now.Modes[watch.Line].IsFilling ? flow / flowScales[watch.Line] : 1,
             WatchKind.LiftExhausts => line.Margin(0, at.Surface, at.Gas) / line.SpecificWeight - run.SettledWithin,
             WatchKind.HeadSettles => Unsettled(RestHead(line, at, delivered), line.Hydraulics.YieldHead),
             WatchKind.AllSettle => IsFed(at.Time) ? 1 : LargestHead(at, y) - run.SettledWithin,
@@ -221,6 +242,8 @@ internal sealed partial class DrainModel : IEventSet
         double largest = 0;
         for (int i = 0; i < LineCount; i++)
         {
+            if (now.Modes[i] is { IsFilling: true, IsAtWork: true })
+                return 1 + run.SettledWithin; // a column on its way does not rest
             if (now.Modes[i].IsAtWork)
                 largest = Math.Max(largest, Math.Abs(RestHead(now.Plant.Lines[i], at, y[i])) - now.Plant.Lines[i].Hydraulics.YieldHead);
         }

@@ -7,7 +7,8 @@ namespace DrainSim.Draining;
 /// <remarks>
 /// State: y[i] is the volume that line i has taken out of the tank, m³, so that its slope is the line's flow, the volume in
 /// the tank is V = V₀ + ∫inflow − Σy[i] and that in a receiver Vr₀ + y[i]: the balance closes by construction. Where gas
-/// comes and goes its mass, kg, is the last component. What is watched on the way stands in the other part of the class.
+/// comes and goes its mass, kg, follows, and then the flow, m³/s, of each line whose front has yet to reach the outlet, because
+/// there the inertia of the column counts. What is watched on the way stands in the other part of the class.
 /// </remarks>
 internal sealed partial class DrainModel : IOdeSystem
 {
@@ -17,6 +18,8 @@ internal sealed partial class DrainModel : IOdeSystem
     private readonly bool hasMass;
     private readonly Watch[] watches;
     private readonly double[] guesses;
+    private readonly int[] flowAt; // component that holds the flow of a line that fills; 0 where none does
+    private readonly double[] flowScales;
     private readonly List<Epoch> epochs;
     private readonly Plant[] plantsAfter;
     private Epoch now;
@@ -35,6 +38,15 @@ internal sealed partial class DrainModel : IOdeSystem
         steadyGas = atmosphere;
         StartMass = plant.Gas.StartMass;
         guesses = new double[LineCount];
+        (flowAt, flowScales) = (new int[LineCount], new double[LineCount]);
+        int dimension = LineCount + (hasMass ? 1 : 0);
+        for (int i = 0; i < LineCount; i++)
+        {
+            if (modes[i] is { IsFilling: true, IsAtWork: true })
+                (flowAt[i], flowScales[i]) = (dimension++, StartFlow(plant, i));
+        }
+
+        Dimension = dimension;
         watches = WatchList.Of(plant, TargetVolume);
         now = new Epoch(0, plant, modes, 0);
         epochs = [now];
@@ -59,7 +71,7 @@ internal sealed partial class DrainModel : IOdeSystem
     public IReadOnlyList<Epoch> Epochs => epochs;
 
     /// <inheritdoc/>
-    public int Dimension => LineCount + (hasMass ? 1 : 0);
+    public int Dimension { get; }
 
     private double? TargetVolume => (run.StopAtLevel, run.StopAtVolume) switch
     {
@@ -105,6 +117,19 @@ internal sealed partial class DrainModel : IOdeSystem
     public double Flow(Epoch epoch, int line, double surface, double gas, double delivered, bool limited) =>
         epoch.Modes[line].IsAtWork ? Solve(epoch, line, surface, gas, delivered, limited) : 0;
 
+    /// <summary>Flow of a line out of the tank, m³/s: a component of the state while the line fills, else solved for.</summary>
+    private double Flow(Epoch epoch, int line, double surface, double gas, ReadOnlySpan<double> y) =>
+        epoch.Modes[line] is { IsFilling: true, IsAtWork: true } ? y[flowAt[line]] : Flow(epoch, line, surface, gas, y[line], epoch.Modes[line].IsLimited);
+
+    /// <summary>Flow of a full line at the first instant, m³/s: what the error in a flow is measured against.</summary>
+    private static double StartFlow(Plant plant, int line)
+    {
+        double gas = plant.Gas.Pressure(plant.Vessel.Volume(plant.Job.Level), plant.Gas.StartMass);
+        return Math.Max(LeastFlowScale, plant.Lines[line].Flow(new LineConditions(plant.Job.Level, gas, 0, false), 0));
+    }
+
+    private const double LeastFlowScale = 1e-15;
+
     private double Solve(Epoch epoch, int line, double surface, double gas, double delivered, bool limited)
     {
         FlowSolutions++;
@@ -128,7 +153,7 @@ internal sealed partial class DrainModel : IOdeSystem
             bool parts = epoch.Modes[i] is { Ending: Outcome.VapourBreak } mode && mode.EndedAt == t;
             flows[i] = parts
                 ? Solve(epoch, i, surface, gas, y[i], limited: false)
-                : Flow(epoch, i, surface, gas, y[i], epoch.Modes[i].IsLimited);
+                : Flow(epoch, i, surface, gas, y);
         }
 
         return At(t, y, flows);
@@ -142,7 +167,7 @@ internal sealed partial class DrainModel : IOdeSystem
     {
         Epoch epoch = EpochAt(t);
         double volume = Volume(epoch, t, y), surface = vessel.Level(volume), gas = GasPressure(epoch, t, volume, y);
-        (double pressure, double margin) = LowPoint(epoch, surface, gas, flows);
+        (double pressure, double margin) = LowPoint(epoch, surface, gas, y, flows);
         CompiledLine first = epoch.Plant.Lines[0];
         double total = 0;
         foreach (double flow in flows[..LineCount])
@@ -169,10 +194,20 @@ internal sealed partial class DrainModel : IOdeSystem
     {
         double volume = Volume(now, t, y), surface = vessel.Level(volume), gas = GasPressure(now, t, volume, y);
         for (int i = 0; i < LineCount; i++)
-            dydt[i] = Flow(now, i, surface, gas, y[i], now.Modes[i].IsLimited);
+            dydt[i] = Flow(now, i, surface, gas, y);
         if (hasMass)
             dydt[LineCount] = now.Plant.Gas.HasRate ? now.Plant.Gas.MassFlow(gas) : 0;
+        for (int i = 0; i < LineCount; i++)
+        {
+            if (flowAt[i] > 0)
+                dydt[flowAt[i]] = Acceleration(now, i, surface, gas, y);
+        }
     }
+
+    private double Acceleration(Epoch epoch, int line, double surface, double gas, ReadOnlySpan<double> y) =>
+        epoch.Modes[line] is { IsFilling: true, IsAtWork: true } mode
+            ? epoch.Plant.Lines[line].Acceleration(mode.Segment, surface, gas, y[line], y[flowAt[line]])
+            : 0;
 
     /// <summary>
     /// The tolerance is meant for the clock: an error in a delivered volume is measured against what the flow moves in
@@ -188,6 +223,11 @@ internal sealed partial class DrainModel : IOdeSystem
             double toRest = vessel.Area(surface) * Math.Max(0, line.MovingHead(surface, gas, y[i]));
             double toAir = Math.Max(0, volume - line.UncoverVolume);
             scale[i] = Math.Max(1e-12 * vessel.Capacity, Math.Abs(dydt[i]) * t + Math.Min(toRest, toAir));
+            if (flowAt[i] == 0)
+                continue;
+            scale[flowAt[i]] = flowScales[i];
+            if (now.Modes[i].IsFilling)
+                scale[i] = Math.Min(scale[i], line.Filling!.Volume);
         }
 
         if (hasMass)
@@ -198,14 +238,17 @@ internal sealed partial class DrainModel : IOdeSystem
     public double LargestStep(double t, ReadOnlySpan<double> y, ReadOnlySpan<double> dydt) => double.PositiveInfinity;
 
     /// <summary>The line with the least margin: its low point's pressure and margin, Pa.</summary>
-    private (double Pressure, double Margin) LowPoint(Epoch epoch, double surface, double gas, ReadOnlySpan<double> flows)
+    private (double Pressure, double Margin) LowPoint(
+        Epoch epoch, double surface, double gas, ReadOnlySpan<double> y, ReadOnlySpan<double> flows)
     {
         (double Pressure, double Margin) least = (double.PositiveInfinity, double.PositiveInfinity);
         bool anyAtWork = epoch.LinesAtWork > 0;
         for (int i = 0; i < LineCount; i++)
         {
             CompiledLine line = epoch.Plant.Lines[i];
-            double margin = line.Margin(flows[i], surface, gas);
+            double margin = epoch.Modes[i] is { IsFilling: true, IsAtWork: true } mode
+                ? line.FillingMargin(mode.Segment, surface, gas, flows[i], Acceleration(epoch, i, surface, gas, y))
+                : line.Margin(flows[i], surface, gas);
             if (margin < least.Margin && (epoch.Modes[i].IsAtWork || !anyAtWork))
                 least = (margin + line.Threshold, margin);
         }
@@ -235,7 +278,7 @@ internal sealed partial class DrainModel : IOdeSystem
         {
             double outflow = -epoch.Inflow(t);
             for (int i = 0; i < LineCount; i++)
-                outflow += Flow(epoch, i, surface, p, y[i], epoch.Modes[i].IsLimited);
+                outflow += Flow(epoch, i, surface, p, y);
             double asked = epoch.Plant.Gas.SteadyPressure(outflow) ?? epoch.Plant.Job.Liquid.VapourPressure;
             double excess = asked - p;
             (low, high) = excess > 0 ? (p, high) : (low, p);
