@@ -32,6 +32,12 @@ internal static class WatchList
         yield return new(WatchKind.MarginVanishes, index);
         if (line.HoldsAtVapour)
             yield return new(WatchKind.LiftExhausts, index);
+        if (line.Filling is not null)
+        {
+            yield return new(WatchKind.FrontArrives, index);
+            yield return new(WatchKind.FrontStops, index);
+        }
+
         yield return new(WatchKind.HeadSettles, index);
         if (line.HasTail)
             yield return new(WatchKind.BoreUncovers, index);
