@@ -20,8 +20,9 @@ internal static class JobReader
         Site site = file.Block("site") is { } siteBlock ? SiteReader.Read(siteBlock) : SiteReader.Usual(findings);
         FilledTank? tank = Needed(file, "tank", "Give its shape, dimensions and level")
             is { } tankBlock ? TankReader.Read(tankBlock, folder) : null;
+        double? front = null;
         Line? line = Needed(file, "line", "Give its bore, inlet and path")
-            is { } lineBlock ? LineReader.Read(lineBlock, tank) : null;
+            is { } lineBlock ? LineReader.Read(lineBlock, tank, out front) : null;
         double? surface = file.Block("receiver") is { } receiver ? Surface(receiver) : null;
         RunBlock run = RunReader.Read(file.Block("run"), tank, findings);
         file.Finish();
@@ -39,6 +40,7 @@ internal static class JobReader
                 new DrawOff
                 {
                     Line = line,
+                    Front = front,
                     Receiver = surface is { } elevation ? new FixedSurface { Elevation = elevation } : null,
                 },
             ],

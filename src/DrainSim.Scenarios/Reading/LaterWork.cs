@@ -11,7 +11,6 @@ internal static class LaterWork
         ["tank.pressure_rating"] = "The tank is open to the air",
         ["line.inlet.floor_clearance"] = "Give the loss of the inlet as 'loss'",
         ["line.inlet.air_draw"] = "The inlet counts as covered until the level falls to its edge",
-        ["line.start"] = "The line counts as primed",
         ["line.air_break"] = "The line has no vent",
         ["line.vacuum_rating"] = "Give the pressure that the hose needs inside as 'least_pressure'",
         ["lines"] = "Give one 'line'; identical ones side by side by 'parallel'",
