@@ -86,6 +86,8 @@ internal static class VerdictBlock
             yield return ("Receiver", $"{format.Length(depth)} deep when it stopped");
         if (result.BalanceLevel is { } balance)
             yield return ("Balance", $"inflow and outflow are equal at a level of {format.Length(balance)}");
+        if (result.Lines is [{ RanFullAt: { } full }, ..])
+            yield return ("Line full", $"{MeasureFormat.Duration(full)} after the start");
         if (result.Prime is { } prime)
             yield return ("To start", Prime(prime, format));
     }

@@ -5,7 +5,6 @@ internal static class LaterWork
 {
     private static readonly Dictionary<string, string> Keys = new()
     {
-        ["line.start"] = "The line counts as primed",
         ["sweep"] = "Run the cases one by one",
         ["size"] = "Run the cases one by one",
         ["uncertainty"] = "Run the cases one by one",

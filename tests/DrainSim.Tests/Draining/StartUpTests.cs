@@ -1,7 +1,6 @@
 using DrainSim.Draining;
 using DrainSim.Lines;
 using DrainSim.Liquids;
-using DrainSim.Vessels;
 using MathNet.Numerics;
 
 namespace DrainSim.Tests.Draining;
