@@ -16,7 +16,7 @@ internal sealed class LevelTrack
     {
         end = result.Trace.End;
         for (int i = 0; i <= Parts; i++)
-            levels[i] = (float)result.Trace.At(Math.Min(end, end * i / Parts)).Level;
+            levels[i] = (float)result.Job.Vessel.Level(result.Trace.VolumeAt(Math.Min(end, end * i / Parts)));
     }
 
     /// <summary>The level at a time, m; the last one after the end.</summary>

@@ -1,3 +1,5 @@
+using MathNet.Numerics;
+using MathNet.Numerics.Distributions;
 using MathNet.Numerics.LinearAlgebra;
 using MathNet.Numerics.Statistics;
 
@@ -5,22 +7,22 @@ namespace DrainSim.Studies.Uncertainty;
 
 /// <summary>How much of the spread of a result each parameter explains.</summary>
 /// <remarks>
-/// Values are replaced by their ranks and the result's ranks are regressed on the parameters'. The explained part R² is
-/// shared out by averaging, over all orders in which the parameters can enter, what each adds (R. H. Lindeman, P. F.
-/// Merenda, R. Z. Gold 1980; U. Grömping, J. Stat. Softw. 17 (2006) 1): the shares add up to R² also for parameters
-/// that go together. For independent ones they are the squared standardised rank regression coefficients (A.
-/// Saltelli et al., Sensitivity Analysis, 2000). They tell of rising and falling effects alone; what a bend or an interplay does
-/// is in the rest, 1 − R².
+/// Values are replaced by their normal scores Φ⁻¹((rank − ½)/n), as of B. L. van der Waerden (1952), and the result's are regressed on the
+/// parameters'. The explained part R² is shared out by averaging, over all orders in which the parameters can enter, what
+/// each adds (R. H. Lindeman, P. F. Merenda, R. Z. Gold 1980; U. Grömping, J. Stat. Softw. 17 (2006) 1): the shares add up to
+/// R² also for parameters that go together. For independent ones they are the squared standardised regression coefficients (A.
+/// Saltelli et al., Sensitivity Analysis, 2000). They tell of rising and falling effects alone; what a bend or an
+/// interplay does is in the rest, 1 − R².
 /// </remarks>
 public sealed record SpreadShares
 {
     /// <summary>Spread beneath which a result counts as constant, relative to its size: the accuracy of a run.</summary>
     private const double Constant = 1e-7;
 
-    /// <summary>Share of the spread of the ranks for each parameter, in their order, 1.</summary>
+    /// <summary>Share of the spread of the scores for each parameter, in their order, 1.</summary>
     public required IReadOnlyList<double> Shares { get; init; }
 
-    /// <summary>What all of them explain together: R² of the rank regression, 1.</summary>
+    /// <summary>What all of them explain together: R² of the regression, 1.</summary>
     public required double Explained { get; init; }
 
     /// <summary>Shares the spread of a result out; null where it does not vary.</summary>
@@ -32,7 +34,7 @@ public sealed record SpreadShares
         double size = ranked.Max(Math.Abs);
         if (ranked.Max() - ranked.Min() <= Constant * size)
             return null;
-        Matrix<double> r = Correlation.SpearmanMatrix([.. parameters, ranked]);
+        Matrix<double> r = Correlation.PearsonMatrix(parameters.Append(ranked).Select(Scores));
         int count = parameters.Count;
         double[] explained = [.. Enumerable.Range(0, 1 << count).Select(set => Explains(r, set, count))];
         return new SpreadShares
@@ -40,6 +42,12 @@ public sealed record SpreadShares
             Explained = explained[^1],
             Shares = [.. Enumerable.Range(0, count).Select(j => Share(explained, j, count))],
         };
+    }
+
+    private static double[] Scores(double[] values)
+    {
+        double[] ranks = ArrayStatistics.RanksInplace((double[])values.Clone(), RankDefinition.Average);
+        return [.. ranks.Select(rank => Normal.InvCDF(0, 1, (rank - 0.5) / ranks.Length))];
     }
 
     /// <summary>R² of the regression on a set of parameters, given as bits.</summary>
@@ -62,8 +70,8 @@ public sealed record SpreadShares
             if ((set >> parameter & 1) != 0)
                 continue;
             int size = System.Numerics.BitOperations.PopCount((uint)set);
-            double orders = MathNet.Numerics.SpecialFunctions.Factorial(size)
-                * MathNet.Numerics.SpecialFunctions.Factorial(count - size - 1) / MathNet.Numerics.SpecialFunctions.Factorial(count);
+            double orders = SpecialFunctions.Factorial(size)
+                * SpecialFunctions.Factorial(count - size - 1) / SpecialFunctions.Factorial(count);
             share += orders * (explained[set | 1 << parameter] - explained[set]);
         }
 

@@ -6,15 +6,20 @@ namespace DrainSim.Tests.Studies.Sampling;
 public sealed class SobolSequenceTests
 {
     /// <remarks>
-    /// The first points as Joe and Kuo's own program prints them for new-joe-kuo-6 (there in Gray-code order, which
-    /// permutes each block of 2^k points): 0; 0.5; then 0.25 and 0.75 against 0.75 and 0.25 from the second coordinate on.
+    /// As the program of Joe and Kuo prints the first eight points of three coordinates; it goes through each block of 2^k
+    /// points in Gray-code order.
     /// </remarks>
     [Fact]
-    public void The_first_points_are_those_of_the_sequence()
+    public void The_first_points_are_those_of_the_authors_program()
     {
-        Assert.Equal([0, 0.5, 0.25, 0.75], Enumerable.Range(0, 4).Select(i => Plain(i, 0)));
-        Assert.Equal([0, 0.5, 0.75, 0.25], Enumerable.Range(0, 4).Select(i => Plain(i, 1)));
-        Assert.Equal([0, 0.5, 0.25, 0.75, 0.625, 0.125, 0.875, 0.375], Enumerable.Range(0, 8).Select(i => Plain(i, 2)));
+        double[][] printed =
+        [
+            [0, 0.5, 0.75, 0.25, 0.375, 0.875, 0.625, 0.125],
+            [0, 0.5, 0.25, 0.75, 0.375, 0.875, 0.125, 0.625],
+            [0, 0.5, 0.25, 0.75, 0.625, 0.125, 0.875, 0.375],
+        ];
+        for (int dimension = 0; dimension < 3; dimension++)
+            Assert.Equal(printed[dimension], Enumerable.Range(0, 8).Select(i => Plain(i ^ (i >> 1), dimension)));
     }
 
     [Theory]

@@ -41,15 +41,15 @@ public sealed class UncertaintyStudyTests
     [InlineData(SamplingMethod.LatinHypercube)]
     public void The_sampling_error_covers_the_truth_as_often_as_it_says(SamplingMethod method)
     {
-        const int seeds = 60;
+        const int seeds = 40;
         double median = Time(0.05, 0.6), deviation = Math.Sqrt(Math.Pow(2 * 0.03, 2) + 0.05 * 0.05);
         double exact = LogNormal.InvCDF(Math.Log(median), deviation, 0.9);
         int held = Enumerable.Range(0, seeds).Count(seed =>
         {
-            Percentile p90 = Run(Study(method) with { Seed = seed, Samples = 512 }).DrainTime[3];
+            Percentile p90 = Run(Study(method) with { Seed = seed, Samples = 256 }).DrainTime[3];
             return Math.Abs(p90.Value - exact) <= p90.Error;
         });
-        Assert.InRange(held, 50, seeds); // Binomial(60, 0.95) is below 50 once in 5000 times
+        Assert.InRange(held, 32, seeds); // Binomial(40, 0.95) is below 32 less than once in 2000 times
     }
 
     [Fact]
@@ -66,14 +66,14 @@ public sealed class UncertaintyStudyTests
         Assert.NotEqual(first.DrainTime, Run(study with { Seed = 2 }).DrainTime);
     }
 
-    /// <remarks>ln t = … − 2·ln d − ln Cd: the bore explains (2·0.03)² of (2·0.03)² + 0.05², 59 %. Ranks keep that to some percent.</remarks>
+    /// <remarks>ln t = … − 2·ln d − ln Cd: the bore explains (2·0.03)² of (2·0.03)² + 0.05², 59 %.</remarks>
     [Fact]
     public void The_spread_is_shared_out_as_the_variances_of_the_linear_case()
     {
         SpreadShares shares = Run(Study(SamplingMethod.Sobol)).DrainTimeShares!;
-        Assert.Equal(0.0036 / (0.0036 + 0.0025), shares.Shares[0], 0.02);
+        Assert.Equal(0.0036 / (0.0036 + 0.0025), shares.Shares[0], 0.01);
         Assert.Equal(shares.Explained, shares.Shares.Sum(), 1e-12);
-        Assert.InRange(shares.Explained, 0.98, 1);
+        Assert.InRange(shares.Explained, 0.995, 1);
     }
 
     [Fact]
@@ -157,6 +157,7 @@ public sealed class UncertaintyStudyTests
         Parameters = [Bore, Coefficient],
         Make = values => CaseJob.Of(() => JobOf(values)),
         Method = method,
+        Samples = 1024,
     };
 
     private static Job JobOf(IReadOnlyList<double> values) =>
