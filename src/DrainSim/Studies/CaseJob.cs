@@ -36,4 +36,21 @@ public readonly record struct CaseJob
             return Refused(e.Message);
         }
     }
+
+    /// <summary>Runs the job; null, with the reason, when there is none or the library refuses it.</summary>
+    internal DrainResult? Run(out string fault, CancellationToken cancellation)
+    {
+        fault = Fault ?? "";
+        if (Job is null)
+            return null;
+        try
+        {
+            return Simulation.Run(Job, cancellation);
+        }
+        catch (ArgumentException refusal)
+        {
+            fault = refusal.Message;
+            return null;
+        }
+    }
 }

@@ -64,11 +64,8 @@ public sealed record UncertaintyStudy
         copula?.Bend(values);
         for (int j = 0; j < values.Length; j++)
             values[j] = Parameters[j].Spread.At(values[j]);
-        CaseJob made = Make(values);
-        if (made.IsRefused)
-            return (new SampleRun(number, plan.RepetitionOf(number), values, null, made.Fault), null, []);
-        DrainResult result = Simulation.Run(made.Job, cancellation);
-        return (new SampleRun(number, plan.RepetitionOf(number), values, RunSummary.Of(result), null),
-            new LevelTrack(result), result.LimitChecks);
+        return Make(values).Run(out string fault, cancellation) is { } result
+            ? (new SampleRun(number, plan.RepetitionOf(number), values, RunSummary.Of(result), null), new LevelTrack(result), result.LimitChecks)
+            : (new SampleRun(number, plan.RepetitionOf(number), values, null, fault), null, []);
     }
 }
