@@ -1,3 +1,7 @@
+using System.Globalization;
+using System.Security.Cryptography;
+using System.Text;
+
 namespace DrainSim.Scenarios.Studies;
 
 /// <summary>The cases of a sweep: which values its parameters take in each, made when they are asked for.</summary>
@@ -37,6 +41,32 @@ public sealed class SweepCases
     /// <summary>Whether a parameter's values stand at even ratios.</summary>
     /// <param name="parameter">index of the parameter</param>
     public bool IsLogarithmic(int parameter) => IsGrid && axes[parameter].IsLogarithmic;
+
+    /// <summary>A number that tells these cases from all others: of the scenario as it was understood and of all values.</summary>
+    public string Fingerprint()
+    {
+        using var hash = IncrementalHash.CreateHash(HashAlgorithmName.SHA256);
+        foreach (UnderstoodValue value in Scenario.Base.Understood)
+            Add(string.Create(CultureInfo.InvariantCulture, $"{value.Path}={value.Value:R}={value.Written}"));
+        foreach (string file in Scenario.InputFiles.Where(File.Exists))
+            hash.AppendData(File.ReadAllBytes(file));
+        for (int i = 0; i < Scenario.Parameters.Count; i++)
+        {
+            Add(Scenario.Parameters[i].Path);
+            if (IsGrid)
+                Add(string.Create(CultureInfo.InvariantCulture, $"{axes[i].Count} {axes[i].IsLogarithmic} {string.Join('|', axes[i].Texts)}"));
+        }
+
+        for (int row = 0; row < table?.Count; row++)
+        {
+            for (int i = 0; i < Scenario.Parameters.Count; i++)
+                Add(table.At(row, i).Text);
+        }
+
+        return Convert.ToHexStringLower(hash.GetHashAndReset());
+
+        void Add(string text) => hash.AppendData(Encoding.UTF8.GetBytes(text + "\n"));
+    }
 
     /// <summary>Writes the values of a case.</summary>
     /// <param name="number">from 0</param>

@@ -44,6 +44,13 @@ public sealed class VariedScenario
         return problems.Count > before ? null : new VariedScenario(job, reading.Scenario, parameters);
     }
 
+    /// <summary>Full paths of the files that the scenario names, such as a strapping table.</summary>
+    public IReadOnlyList<string> InputFiles =>
+    [
+        .. Base.Understood.Where(value => value.Path.EndsWith(".file", StringComparison.Ordinal))
+            .Select(value => Path.GetFullPath(value.Written, Path.GetFullPath(document.Folder))),
+    ];
+
     /// <summary>Makes jobs of values; for one thread.</summary>
     public CaseReader NewReader() => new(document, Base.Job, Parameters);
 }
