@@ -70,6 +70,7 @@ internal static class CommandLine
         {
             new RunCommand(),
             new CheckCommand(),
+            new SweepCommand(),
             new NewCommand(),
             new LiquidsCommand(),
             new FittingsCommand(),

@@ -1,6 +1,7 @@
 using DrainSim.Draining;
 using DrainSim.Lines;
 using DrainSim.Liquids;
+using DrainSim.Scenarios.Studies;
 using DrainSim.Scenarios.Units;
 using DrainSim.Scenarios.Yaml;
 
@@ -24,6 +25,7 @@ internal static class JobReader
             is { } lineBlock ? LineReader.Read(lineBlock, tank) : null;
         double? surface = file.Block("receiver") is { } receiver ? Surface(receiver) : null;
         RunBlock run = RunReader.Read(file.Block("run"), tank, findings);
+        StudyBlock.Check(file);
         file.Finish();
         if (liquid is null || tank is null || line is null)
             return null;

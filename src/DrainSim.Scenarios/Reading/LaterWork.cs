@@ -23,8 +23,6 @@ internal static class LaterWork
         ["timeline"] = "Run the parts of the job one by one",
         ["limits"] = "Compare the results yourself",
         ["run.begins"] = "Times count from the start",
-        ["sweep"] = "Run the cases one by one",
-        ["size"] = "Run the cases one by one",
         ["uncertainty"] = "Run the cases one by one",
         ["forecast"] = "Run the cases one by one",
     };
