@@ -23,8 +23,6 @@ internal static class LaterWork
         ["timeline"] = "Run the parts of the job one by one",
         ["limits"] = "Compare the results yourself",
         ["run.begins"] = "Times count from the start",
-        ["uncertainty"] = "Run the cases one by one",
-        ["forecast"] = "Run the cases one by one",
     };
 
     /// <summary>What to do instead; null for a key that is not of the vocabulary at all.</summary>
