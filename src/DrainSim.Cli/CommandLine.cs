@@ -71,6 +71,7 @@ internal static class CommandLine
             new RunCommand(),
             new CheckCommand(),
             new SweepCommand(),
+            new SizeCommand(),
             new NewCommand(),
             new LiquidsCommand(),
             new FittingsCommand(),

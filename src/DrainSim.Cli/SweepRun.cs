@@ -54,9 +54,7 @@ internal sealed class SweepRun(SweepCases cases, Shard shard, string path)
             cases.Read(number, values);
             for (int i = 0; i < values.Length; i++)
                 cells[i] = values[i].IsNumber ? new ParameterCell(values[i].Si, null) : new ParameterCell(double.NaN, values[i].Text);
-            CaseReading reading = reader.Read(values);
-            CaseResult result = reading.Job is { } job ? CaseResult.Of(job, cancellation) : CaseResult.Impossible(reading.Cause);
-            return table.Row(number + 1, cells, result);
+            return table.Row(number + 1, cells, reader.Run(values, cancellation));
         }
     }
 }

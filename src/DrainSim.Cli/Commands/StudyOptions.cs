@@ -4,7 +4,7 @@ using DrainSim.Cli.Terminal;
 namespace DrainSim.Cli.Commands;
 
 /// <summary>What every study is told on the command line.</summary>
-internal sealed class StudyOptions
+internal sealed class StudyOptions(bool hasThreads = true)
 {
     /// <summary>The scenario.</summary>
     public Argument<string> Scenario { get; } = new("scenario") { Description = "Scenario file." };
@@ -50,7 +50,8 @@ internal sealed class StudyOptions
             command.Options.Add(option);
         command.Options.Add(Set);
         command.Options.Add(Folder);
-        command.Options.Add(Threads);
+        if (hasThreads)
+            command.Options.Add(Threads);
         command.Options.Add(Units.Option);
     }
 

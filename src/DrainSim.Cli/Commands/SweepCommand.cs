@@ -1,5 +1,6 @@
 using System.CommandLine;
 using DrainSim.Cli.Terminal;
+using DrainSim.Reports.Measures;
 using DrainSim.Scenarios;
 using DrainSim.Scenarios.Studies;
 
@@ -75,10 +76,7 @@ internal sealed class SweepCommand : ExplainedCommand
         try
         {
             await Task.Run(() => run.Run(parsed.GetValue(resume), study.ThreadsOf(parsed), ProgressLine.Terminal(error), cancellation), cancellation);
-            if (part.IsWhole)
-                await Task.Run(() => SweepBlock.Write(parsed.InvocationConfiguration.Output, cases, path, [path], study.Units.For(parsed, cases.Scenario.Base)), cancellation);
-            else
-                parsed.InvocationConfiguration.Output.WriteLine($"Part {part.Number} of {part.Of}: {path}");
+            await Task.Run(() => Tell(parsed, cases, part, path, cancellation), cancellation);
         }
         catch (OperationCanceledException)
         {
@@ -97,5 +95,20 @@ internal sealed class SweepCommand : ExplainedCommand
         }
 
         return ExitCode.Ran;
+    }
+
+    private void Tell(ParseResult parsed, SweepCases cases, Shard part, string path, CancellationToken cancellation)
+    {
+        TextWriter output = parsed.InvocationConfiguration.Output;
+        if (!part.IsWhole)
+        {
+            output.WriteLine($"Part {part.Number} of {part.Of}: {path}");
+            return;
+        }
+
+        UnitSystem units = study.Units.For(parsed, cases.Scenario.Base);
+        string picture = Path.ChangeExtension(path, ".png");
+        new SweepFigure(cases, units).Write(path, picture, cancellation);
+        SweepBlock.Write(output, cases, path, [path, picture], units);
     }
 }

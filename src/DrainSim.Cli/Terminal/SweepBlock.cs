@@ -51,7 +51,7 @@ internal static class SweepBlock
         new Column { Title = "drain time", IsNumber = true },
         new Column { Title = "left", IsNumber = true },
         new Column { Title = "least margin", IsNumber = true },
-        new Column { Title = "limits broken, or why not", IsWrapped = true },
+        new Column { Title = "limits broken, reason", IsWrapped = true },
     ]);
 
     private static void AddRow(ColumnTable rows, SweepCases cases, SweepRow row, MeasureFormat format)
@@ -60,7 +60,7 @@ internal static class SweepBlock
         cases.Read(row.Case - 1, values);
         List<string> cells = [];
         for (int i = 0; i < values.Length; i++)
-            cells.Add(values[i].Text);
+            cells.Add(values[i].Shown);
         rows.Add([.. cells, row.Outcome,
             row.DrainTime is { } time ? MeasureFormat.Duration(time) : "",
             row.LeftVolume is { } left ? format.Volume(left) : "",

@@ -24,10 +24,10 @@ internal sealed class AxisTicks
         Labels = [.. Positions.Select(at => Label(at, decimals))];
     }
 
-    private AxisTicks() => (Positions, Labels) = ([], []);
+    private AxisTicks(double[] positions, string[] labels) => (Positions, Labels) = (positions, labels);
 
     /// <summary>An axis without ticks.</summary>
-    public static AxisTicks None { get; } = new();
+    public static AxisTicks None { get; } = new([], []);
 
     /// <summary>Where the ticks stand, in the axis's unit.</summary>
     public double[] Positions { get; }
@@ -41,6 +41,29 @@ internal sealed class AxisTicks
     /// <param name="count">most steps that fit</param>
     public static AxisTicks Decimal(double least, double most, int count) =>
         new(least, most, DecimalStep((most - least) / count));
+
+    /// <summary>Ticks at 1, 2 and 5 times the powers of ten, on an axis of the values' decimal logarithms.</summary>
+    /// <param name="least">logarithm at the lower end of the axis</param>
+    /// <param name="most">logarithm at the upper end</param>
+    public static AxisTicks Logarithmic(double least, double most)
+    {
+        double[] values = [.. from power in Enumerable.Range((int)Math.Floor(least), (int)(Math.Ceiling(most) - Math.Floor(least)) + 1)
+            from digit in most - least > 3 ? (int[])[1] : [1, 2, 5]
+            let value = digit * Math.Pow(10, power)
+            where Math.Log10(value) >= least - 1e-9 && Math.Log10(value) <= most - HeadRoom * (most - least)
+            select value];
+        return new([.. values.Select(Math.Log10)], [.. values.Select(value => value.ToString("G6", CultureInfo.InvariantCulture))]);
+    }
+
+    /// <summary>Ticks at given values.</summary>
+    /// <param name="values">the values</param>
+    public static AxisTicks At(double[] values) =>
+        new(values, [.. values.Select(value => value.ToString("G5", CultureInfo.InvariantCulture).Replace('-', '−'))]);
+
+    /// <summary>A tick for each word, at 0, 1, 2 and so on.</summary>
+    /// <param name="words">the words</param>
+    public static AxisTicks Words(IReadOnlyList<string> words) =>
+        new([.. Enumerable.Range(0, words.Count).Select(i => (double)i)], [.. words]);
 
     /// <summary>Ticks of a time axis from 0, at steps that people count in.</summary>
     /// <param name="unit">the axis's unit</param>

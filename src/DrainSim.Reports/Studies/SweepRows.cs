@@ -14,6 +14,22 @@ public static class SweepRows
     public static IEnumerable<SweepRow> Read(string path, int parameters)
     {
         using CsvReader csv = CsvReader.FromFile(path, Options);
+        foreach (SweepRow row in Rows(csv, parameters))
+            yield return row;
+    }
+
+    /// <summary>The rows of a table that is no file.</summary>
+    /// <param name="text">the table, with its first line</param>
+    /// <param name="parameters">number of its parameters</param>
+    public static IEnumerable<SweepRow> ReadText(string text, int parameters)
+    {
+        using CsvReader csv = CsvReader.FromText(text, Options);
+        foreach (SweepRow row in Rows(csv, parameters))
+            yield return row;
+    }
+
+    private static IEnumerable<SweepRow> Rows(CsvReader csv, int parameters)
+    {
         csv.Read();
         while (csv.Read())
         {

@@ -1,4 +1,5 @@
 using DrainSim.Draining;
+using DrainSim.Studies;
 
 namespace DrainSim.Scenarios.Studies;
 
@@ -34,6 +35,16 @@ public sealed class CaseReader
         if (ReadSlow(values) is { } job && TryEdit(job, values) is { } edited)
             return new CaseReading(edited, "");
         return ReadWhole(values);
+    }
+
+    /// <summary>Runs a case.</summary>
+    /// <param name="values">a value for each parameter, in their order</param>
+    /// <param name="cancellation">ends the run early</param>
+    /// <exception cref="OperationCanceledException">the run was cancelled</exception>
+    public CaseResult Run(ReadOnlySpan<ParameterValue> values, CancellationToken cancellation = default)
+    {
+        CaseReading reading = Read(values);
+        return reading.Job is { } job ? CaseResult.Of(job, cancellation) : CaseResult.Impossible(reading.Cause);
     }
 
     /// <summary>The job with the values that have to be read; null when it is refused with the others as they stand.</summary>

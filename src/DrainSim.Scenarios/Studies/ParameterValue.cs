@@ -20,8 +20,10 @@ public readonly record struct ParameterValue
     public double Si => unit is null ? double.NaN : unit.ToSi(number);
 
     /// <summary>As it would be written in the file, with its unit.</summary>
-    public string Text => written
-        ?? (unit is null ? "" : string.Create(CultureInfo.InvariantCulture, $"{number:R}{(unit.Spelling == "1" ? "" : " ")}{(unit.Spelling == "1" ? "" : unit.Spelling)}"));
+    public string Text => written ?? (unit is null ? "" : Number("R"));
+
+    /// <summary>The value for people: as it is written, else to six figures.</summary>
+    public string Shown => written ?? (unit is null ? "" : Number("G6"));
 
     /// <summary>A word.</summary>
     public static ParameterValue Word(string text) => new(text, double.NaN, null);
@@ -37,5 +39,11 @@ public readonly record struct ParameterValue
         if (quantity is null || QuantityText.Read(text, quantity) is not { IsRefused: false } reading)
             return Word(text);
         return new ParameterValue(text, reading.Value, quantity.Units[0]);
+    }
+
+    private string Number(string figures)
+    {
+        string text = number.ToString(figures, CultureInfo.InvariantCulture);
+        return unit!.Spelling == "1" ? text : $"{text} {unit.Spelling}";
     }
 }

@@ -1,0 +1,51 @@
+using DrainSim.Draining;
+using DrainSim.Reports.Measures;
+using DrainSim.Reports.Studies;
+using SkiaSharp;
+
+namespace DrainSim.Reports.Pictures;
+
+/// <summary>The level curves of a few runs over each other, each with its name.</summary>
+internal static class CoursePanel
+{
+    /// <summary>Draws the panel.</summary>
+    /// <param name="sheet">the page</param>
+    /// <param name="report">the sweep</param>
+    /// <param name="frame">where its data lie, px</param>
+    public static void Draw(Sheet sheet, SweepReport report, SKRect frame)
+    {
+        var format = new MeasureFormat(report.Units);
+        var axis = new TimeAxis(report.Courses.Max(course => course.Result.StoppedAt));
+        double most = report.Courses.Max(course => course.Result.Job.Level);
+        Unit unit = format.LengthUnit(most);
+        Panel panel = axis.Panel(frame, (0, 1.1 * unit.From(most)), 8);
+        (string Name, double[] Xs, double[] Ys, SKColor Color)[] curves = [.. report.Courses.Select((course, i) => Curve(course, axis, unit, Palette.Step(i, report.Courses.Count)))];
+        foreach ((_, double[] xs, double[] ys, SKColor color) in curves)
+        {
+            panel.Curve(xs, ys, color);
+        }
+        panel.Draw(sheet);
+        PageText.RowTitle(sheet, frame, $"Level in the tank, {unit.Sign}");
+        PageText.AxisTitle(sheet, frame, $"time since the start, {axis.Unit.Sign}");
+        var notes = new Notes(sheet, panel);
+        foreach ((_, double[] xs, double[] ys, _) in curves)
+        {
+            notes.KeepClearOf(xs, ys);
+        }
+        foreach ((string name, double[] xs, double[] ys, SKColor color) in curves)
+        {
+            SKPoint end = panel.At(xs[^1], ys[^1]);
+            sheet.Dot(end, 5, color);
+            if (!notes.Add(end, PageText.Note(color), 60, true, name))
+            {
+                notes.AddAlong(xs, ys, PageText.Note(color), name);
+            }
+        }
+    }
+
+    private static (string, double[], double[], SKColor) Curve((string Name, DrainResult Result) course, TimeAxis axis, Unit unit, SKColor color)
+    {
+        var points = new Course(course.Result);
+        return (course.Name, points.Values(now => now.Time, axis.Unit.Size), points.Values(now => now.Level, unit.Size), color);
+    }
+}
