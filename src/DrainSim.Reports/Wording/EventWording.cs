@@ -38,7 +38,7 @@ public static class EventWording
         EventCode.VapourBreak => $"the low point reaches {Verdict.LimitName(job)} and the column parts",
         EventCode.InletUncovered => "air reaches the inlet",
         EventCode.Emptied => "the tank is empty but for a film",
-        EventCode.Levelled => $"the tank is level with {Verdict.FarEnd(job)}",
+        EventCode.Levelled => "the driving head is used up",
         EventCode.TargetReached => "the target is reached",
         EventCode.TimeLimit => "the longest time given is over",
         EventCode.NeverStarted => "the line carries no flow",
@@ -89,6 +89,10 @@ public static class EventWording
             RemedyKind.LowerOutlet => $"Lowering the outlet by {change} (to {value}) {proof}",
             RemedyKind.LowerCrest => $"Lowering the crest by {change} (to {value}) {proof}",
             RemedyKind.LowerInlet => $"Lowering the inlet by {change} (to {value}) {proof}",
+            RemedyKind.WidenVent =>
+                $"One more free vent of {change} bore (a sharp-edged hole) would let the tank breathe: run so, {Proof(remedy, format)}.",
+            RemedyKind.LessInflow => $"No more inflow than {format.Flow(remedy.Value)} ({MeasureFormat.Percent(1 - remedy.Change)} of what is given) {proof}",
+            RemedyKind.HigherBrim => $"A receiver with its brim {change} higher (at a depth of {value}) {proof}",
             RemedyKind.ThrottleOutlet =>
                 $"Throttling at the outlet by a loss coefficient of {MeasureFormat.Number(remedy.Change)} {proof}",
             _ => throw new UnreachableException(remedy.Kind.ToString()),

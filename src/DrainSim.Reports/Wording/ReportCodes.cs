@@ -75,6 +75,9 @@ public static class ReportCodes
         RemedyKind.LowerCrest => "lower_crest",
         RemedyKind.ThrottleOutlet => "throttle_outlet",
         RemedyKind.LowerInlet => "lower_inlet",
+        RemedyKind.WidenVent => "widen_vent",
+        RemedyKind.LessInflow => "less_inflow",
+        RemedyKind.HigherBrim => "higher_brim",
         _ => throw new UnreachableException(kind.ToString()),
     };
 }

@@ -64,6 +64,9 @@ internal static class ParameterPath
     public static BlockNode? Set(BlockNode root, string path, string text)
     {
         string[] steps = StepsOf(path);
+        // What a tank is fitted with may be called without the tank.
+        if (steps[0] is "headspace" or "inflow" && root.Find(steps[0]) is null)
+            steps = ["tank", .. steps];
         return steps.Any(step => step.Length == 0) ? null : Set(root, steps, text) as BlockNode;
     }
 

@@ -35,7 +35,7 @@ public static class ForecastPlan
         double height = scenario.Base.Job.Vessel.Height;
         double gaugePoint = Amount(request.GaugePoint ?? block.GaugePoint, "gauge_point", height, problems);
         FittedParameter[] parameters = Parameters(scenario, problems);
-        var frame = new ReadingsFrame(height, gaugePoint, resolution, null);
+        var frame = new ReadingsFrame(height, gaugePoint, resolution, scenario.Base.Begins);
         if (problems.Count > 0 || ReadingsReader.Read(path!, request.Readings ?? block.Readings!, frame, problems) is not { } sheet)
             return null;
         if (sheet.Readings.Count <= parameters.Length)

@@ -18,7 +18,7 @@ internal sealed partial class DrainModel : IOdeSystem
     private readonly Watch[] watches;
     private readonly double[] guesses;
     private readonly List<Epoch> epochs;
-    private readonly Plant[] plantsAfter;
+    private readonly double lastActTime;
     private Epoch now;
     private double steadyGas;
 
@@ -30,8 +30,8 @@ internal sealed partial class DrainModel : IOdeSystem
         (vessel, run, atmosphere) = (Job.Vessel, Job.Run, Job.Site.AtmosphericPressure);
         LineCount = plant.Lines.Length;
         StartVolume = vessel.Volume(Job.Level);
-        plantsAfter = [.. Job.Timeline.Select(act => new Plant(act.After))];
-        hasMass = plantsAfter.Append(plant).Any(p => p.Gas.HasRate || (plantsAfter.Length > 0 && p.Gas is { IsConfined: true, IsSteady: false }));
+        hasMass = plant.Gas.HasRate || MayConfine(plant);
+        lastActTime = Job.Timeline.Max(act => act.Time) ?? double.NegativeInfinity;
         steadyGas = atmosphere;
         StartMass = plant.Gas.StartMass;
         guesses = new double[LineCount];
@@ -60,6 +60,10 @@ internal sealed partial class DrainModel : IOdeSystem
 
     /// <inheritdoc/>
     public int Dimension => LineCount + (hasMass ? 1 : 0);
+
+    /// <summary>Whether gas of a plant with acts may be shut in, so that its mass has to be known.</summary>
+    private static bool MayConfine(Plant plant) =>
+        plant.Job.Timeline.Count > 0 && plant.Job.Timeline.Select(act => act.After).Append(plant.Job).Any(job => job.Headspace is Gas.ConfinedHeadspace);
 
     private double? TargetVolume => (run.StopAtLevel, run.StopAtVolume) switch
     {
