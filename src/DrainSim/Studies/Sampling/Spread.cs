@@ -20,5 +20,5 @@ public abstract record Spread
 
     /// <summary>A value with its unit, as a scenario would write it.</summary>
     private protected static string Measure(double value, string unit) =>
-        (value.ToString(CultureInfo.InvariantCulture) + " " + unit).TrimEnd();
+        (value.ToString("G6", CultureInfo.InvariantCulture) + " " + unit).TrimEnd();
 }
