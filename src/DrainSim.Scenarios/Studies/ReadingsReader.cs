@@ -22,6 +22,7 @@ internal sealed class ReadingsReader
         TrimWhitespace = true,
         TrackLineNumbers = true,
         AllowLineBreaksInQuotes = false,
+        MalformedData = CsvMalformedDataHandling.Throw,
     };
 
     private readonly string name;

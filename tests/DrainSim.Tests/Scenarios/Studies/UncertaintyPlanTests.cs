@@ -109,7 +109,7 @@ public sealed class UncertaintyPlanTests
     public void A_sample_that_makes_the_geometry_impossible_is_counted_with_its_cause()
     {
         // The outer leg falls 2.6 m: shorter than that in every sixth sample.
-        UncertaintyCase plan = Read(SmallScenario.With(), new UncertaintyRequest { Vary = ["line.path.outer_leg.length=uniform(2.5 m, 3.1 m)"], Samples = "96" })!;
+        UncertaintyCase plan = Read(SmallScenario.With(), new UncertaintyRequest { Vary = ["line.path.outer_leg.length=uniform(2.5 m, 3.1 m)"], Samples = "96", Sampling = "latin_hypercube" })!;
         List<SampleRun> runs = [];
         UncertaintyResult result = plan.Study.Run(runs.Add, TestContext.Current.CancellationToken);
         Assert.Equal(16, result.Refused);
