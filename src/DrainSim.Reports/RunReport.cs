@@ -15,6 +15,9 @@ public sealed record RunReport
     /// <summary>Units for people.</summary>
     public UnitSystem Units { get; init; } = UnitSystem.Metric;
 
+    /// <summary>The clock of the job; null where nobody said when it begins.</summary>
+    public Clock? Clock { get; init; }
+
     /// <summary>The inputs as they were understood, in the scenario's order.</summary>
     public IReadOnlyList<UnderstoodInput> Inputs { get; init; } = [];
 

@@ -20,6 +20,9 @@ public sealed record Scenario
     /// <summary>The units for people; null where the file does not say.</summary>
     public ResultUnits? Units { get; init; }
 
+    /// <summary>The clock at the start, with its zone; null where the file does not say.</summary>
+    public DateTimeOffset? Begins { get; init; }
+
     /// <summary>Everything that was understood, defaults included, in the order of the vocabulary.</summary>
     public required IReadOnlyList<UnderstoodValue> Understood { get; init; }
 

@@ -88,6 +88,7 @@ internal sealed class RunCommand : ExplainedCommand
             Name = scenario.Name,
             Result = result with { Remedies = RemedySearch.Find(result, cancellation) },
             Units = units.For(parsed, scenario),
+            Clock = scenario.Begins is { } begins ? new Clock(begins) : null,
             Inputs = [.. scenario.Understood.Select(AsInput)],
         };
         return FinishedRun.Written(reading, report, target, cancellation);
@@ -101,6 +102,7 @@ internal sealed class RunCommand : ExplainedCommand
             VerdictBlock.Write(output, run);
         else
             VerdictBlock.WriteLine(output, run, isAlone, withWarnings: !parsed.GetValue(quiet));
+        output.Flush();
         if (run.WriteFault is { } fault)
             error.WriteLine($"drainsim run: the files of '{run.Report.Name}' cannot be written: {fault}");
         if (!IsAsExpected(parsed, run))
@@ -110,7 +112,6 @@ internal sealed class RunCommand : ExplainedCommand
         }
         foreach (LimitCheck check in run.Report.Result.LimitChecks.Where(check => !check.IsKept))
             error.WriteLine($"drainsim run: '{run.Report.Name}' breaks a limit: {LimitWording.Text(check, new MeasureFormat(run.Report.Units))}");
-        output.Flush();
         error.Flush();
     }
 

@@ -20,21 +20,26 @@ internal static class LevelTable
     ];
 
     /// <summary>The lines of the table, its heading first; none for a run that never started.</summary>
-    public static IEnumerable<string> Lines(DrainResult result, MeasureFormat format)
+    /// <param name="result">the run</param>
+    /// <param name="format">writes the measures</param>
+    /// <param name="clock">the clock of the job, at whose even steps the crew then dips; null where it has none</param>
+    public static IEnumerable<string> Lines(DrainResult result, MeasureFormat format, Clock? clock)
     {
         if (result.StoppedAt <= 0)
             yield break;
         Unit length = format.LengthUnit(result.Job.Level);
         Unit volume = format.VolumeUnit(result.InitialVolume);
-        yield return $"  {"time",-12}{"level",11}{"volume",14}{"gone",9}";
-        foreach (double time in Times(result.StoppedAt))
+        string heading = clock is null ? "" : $"{"clock",-14}";
+        yield return $"  {heading}{"time",-12}{"level",11}{"volume",14}{"gone",9}";
+        foreach (double time in clock is null ? Times(result.StoppedAt) : ClockTimes(result.StoppedAt, clock))
         {
             Instant now = result.Trace.At(time);
             string level = Measure(now.Level, length, LengthDecimals(length));
             string left = Measure(now.Volume, volume, VolumeDecimals(result.InitialVolume, volume));
             double gone = result.InitialVolume > 0 ? 1 - now.Volume / result.InitialVolume : 0;
             string share = Math.Max(0, 100 * gone).ToString("0", CultureInfo.InvariantCulture) + " %";
-            yield return $"  {MeasureFormat.Duration(time),-12}{level,11}{left,14}{share,9}";
+            string shown = clock is null ? "" : $"{(result.StoppedAt < 600 ? clock.OfDay(time, result.StoppedAt) : clock.Short(time)),-14}";
+            yield return $"  {shown}{MeasureFormat.Duration(time),-12}{level,11}{left,14}{share,9}";
         }
     }
 
@@ -44,6 +49,19 @@ internal static class LevelTable
         double step = Step(end);
         for (int i = 0; i * step < end - 0.1 * step; i++)
             yield return i * step;
+        yield return end;
+    }
+
+    /// <summary>The start, even steps of the clock, and the end; a step close to either is left out.</summary>
+    internal static IEnumerable<double> ClockTimes(double end, Clock clock)
+    {
+        double step = Step(end);
+        yield return 0;
+        for (double time = clock.FirstEven(step); time < end - 0.1 * step; time += step)
+        {
+            if (time > 0.1 * step)
+                yield return time;
+        }
         yield return end;
     }
 

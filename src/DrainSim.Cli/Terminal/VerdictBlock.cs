@@ -22,15 +22,15 @@ internal static class VerdictBlock
         output.WriteLine(report.Title);
         output.WriteLine(Verdict.Sentence(result, format));
         output.WriteLine();
-        foreach ((string label, string text) in Facts(result, format))
+        foreach ((string label, string text) in Facts(result, format, report.Clock))
             WriteParagraph(output, $"  {label,-14}{text}", hang: 16);
         if (result.Lines.Count > 1)
             WriteList(output, "Lines", result.Lines.Select((line, i) => LimitWording.Text(line, i, format)));
         WriteList(output, "Limits", result.LimitChecks.Select(check => LimitWording.Text(check, format)));
-        WriteSection(output, "Levels to expect", LevelTable.Lines(result, format));
+        WriteSection(output, "Levels to expect", LevelTable.Lines(result, format, report.Clock));
         WriteList(output, "What would let it go on", result.Remedies.Select(remedy => EventWording.Text(remedy, format)));
         WriteList(output, "Warnings", Warnings(run));
-        WriteList(output, "Cautions", Cautions.For(result.Job, format).Select(caution => caution.Text));
+        WriteList(output, "Cautions", Cautions.For(result, format).Select(caution => caution.Text));
         if (run.Files.Count > 0)
         {
             output.WriteLine();
@@ -58,10 +58,13 @@ internal static class VerdictBlock
             .Concat(run.Report.Result.Warnings.Select(warning => EventWording.Text(warning, format)));
     }
 
-    private static IEnumerable<(string Label, string Text)> Facts(DrainResult result, MeasureFormat format)
+    private static IEnumerable<(string Label, string Text)> Facts(DrainResult result, MeasureFormat format, Clock? clock)
     {
         if (result.NoStart is null)
-            yield return ("Finish", $"{MeasureFormat.Duration(result.StoppedAt)} after the start");
+        {
+            string byClock = clock is null ? "" : $", {clock.Moment(result.StoppedAt)} ({clock.Zone})";
+            yield return ("Finish", $"{MeasureFormat.Duration(result.StoppedAt)} after the start{byClock}{Tail(result)}");
+        }
         yield return ("Left", $"{format.Volume(result.LeftVolume)} of {format.Volume(result.InitialVolume)}, "
             + $"at a level of {format.Length(result.FinalLevel)}");
         if (result.FallBack is { } back)
@@ -76,7 +79,7 @@ internal static class VerdictBlock
             yield return ("Low point", LowPoint(result, format));
         }
         if (result.LargestVacuum is { } vacuum)
-            yield return ("Headspace", $"{format.Pressure(vacuum.Value)} below the atmosphere at most,{When(vacuum.Time)}");
+            yield return ("Headspace", Headspace(vacuum, result.Job, format));
         if (result.ReceiverLevel is { } depth)
             yield return ("Receiver", $"{format.Length(depth)} deep when it stopped");
         if (result.BalanceLevel is { } balance)
@@ -85,15 +88,33 @@ internal static class VerdictBlock
             yield return ("To start", Prime(prime, format));
     }
 
+    /// <summary>Where the last hundredth takes longer than all the rest: when the rest is done.</summary>
+    private static string Tail(DrainResult result)
+    {
+        double? most = result.Trace.TimeAtVolume(0.01 * result.InitialVolume);
+        return most < 0.5 * result.StoppedAt ? $"; 99 % is out after {MeasureFormat.Duration(most.Value)}" : "";
+    }
+
+    private static string Headspace(Extreme vacuum, Job job, MeasureFormat format)
+    {
+        string largest = vacuum.Value > 1
+            ? $"{format.Pressure(vacuum.Value)} below the atmosphere at most,{When(vacuum.Time)}"
+            : "never below the atmosphere";
+        return job.VacuumRating is { } rating ? $"{largest}; the tank is rated for {format.Pressure(rating)}" : largest;
+    }
+
     private static string LowPoint(DrainResult result, MeasureFormat format)
     {
-        Job job = result.Job;
-        LineNode node = new LineHydraulics(job.Line, job.Liquid, job.Site.Gravity).Node(result.LeastMarginNode);
+        Job job = result.JobAt(result.LeastMargin.Time);
+        int index = result.Lines.Select((line, i) => (line.LeastMargin.Value, i)).Min().i;
+        Line worst = job.DrawOffs[index].Line;
+        LineNode node = new LineHydraulics(worst, job.Liquid, job.Site.Gravity).Node(result.LeastMarginNode);
         string margin = result.LeastMargin.Value < LeastToldMargin
             ? "at its limit"
             : $"at least {format.Pressure(result.LeastMargin.Value)} above its limit";
         double pressure = result.Trace.At(Math.Clamp(result.LeastMargin.Time, 0, result.Trace.End)).LowPointPressure;
-        string place = node.Item is { } item && job.Line.Path[item].Name is { } name ? $", at {name}" : "";
+        string place = node.Item is { } item && worst.Path[item].Name is { } name ? $", at {name}" : "";
+        place += job.DrawOffs.Count > 1 ? $" of {LimitWording.NameOf(worst, index)}" : "";
         return $"{margin}: {format.Pressure(pressure)} absolute{When(result.LeastMargin.Time)}, "
             + $"{format.Length(node.Elevation)} up{place}";
     }

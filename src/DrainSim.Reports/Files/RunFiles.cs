@@ -32,8 +32,8 @@ public static class RunFiles
 
     private static (string Ending, Action<Stream> Write)[] Contents(RunReport report) =>
     [
-        (".csv", stream => SeriesTables.WriteSeries(stream, report.Result)),
-        (".events.csv", stream => SeriesTables.WriteEvents(stream, report.Result)),
+        (".csv", stream => SeriesTables.WriteSeries(stream, report.Result, report.Clock)),
+        (".events.csv", stream => SeriesTables.WriteEvents(stream, report.Result, report.Clock)),
         (".json", stream => ResultDocument.Write(stream, report)),
         (".png", stream => RunPicture.Write(stream, report)),
         (".line.png", stream => LinePicture.Write(stream, report)),

@@ -11,6 +11,11 @@ internal sealed class AxisTicks
     private static readonly double[] TimeSteps = [1, 2, 5, 10, 15, 20, 30, 60, 120];
     private static readonly double[] HourSteps = [0.25, 0.5, 1, 2, 3, 6, 12, 24];
 
+    private static readonly double[] ClockSteps =
+    [
+        1, 2, 5, 10, 15, 30, 60, 120, 300, 600, 900, 1800, 3600, 7200, 10800, 21600, 43200, 86400, 2 * 86400,
+    ];
+
     private AxisTicks(double least, double most, double step)
     {
         int first = (int)Math.Ceiling(least / step - 1e-9);
@@ -76,6 +81,28 @@ internal sealed class AxisTicks
         double step = least < (steps.Length > 0 ? steps[0] / 2 : 0) ? 0 : Array.Find(steps, one => one >= least);
         return new(0, most, step > 0 ? step : DecimalStep(least));
     }
+
+    /// <summary>Ticks at even times of the clock: the time of the day, and the date where a day begins.</summary>
+    /// <param name="clock">the clock of the job</param>
+    /// <param name="unit">the axis's unit</param>
+    /// <param name="most">upper end in that unit</param>
+    /// <param name="count">most steps that fit</param>
+    public static AxisTicks OfClock(Clock clock, Unit unit, double most, int count)
+    {
+        double end = most * unit.Size;
+        double step = Array.Find(ClockSteps, one => one >= end / count);
+        step = step > 0 ? step : 86400 * DecimalStep(end / 86400 / count);
+        var times = new List<double>();
+        for (double time = clock.FirstEven(step); time <= end * (1 - HeadRoom); time += step)
+        {
+            times.Add(time);
+        }
+        return new([.. times.Select(unit.From)], [.. times.Select(time => OfClock(clock.At(time), step))]);
+    }
+
+    private static string OfClock(DateTimeOffset at, double step) => at.TimeOfDay == TimeSpan.Zero
+        ? at.ToString("d MMM", CultureInfo.InvariantCulture)
+        : at.ToString(step < 60 ? "HH:mm:ss" : "HH:mm", CultureInfo.InvariantCulture);
 
     private static double DecimalStep(double least)
     {

@@ -15,7 +15,7 @@ internal static class CoursePanel
     public static void Draw(Sheet sheet, SweepReport report, SKRect frame)
     {
         var format = new MeasureFormat(report.Units);
-        var axis = new TimeAxis(report.Courses.Max(course => course.Result.StoppedAt));
+        var axis = new TimeAxis(report.Courses.Max(course => course.Result.StoppedAt), null);
         double most = report.Courses.Max(course => course.Result.Job.Level);
         Unit unit = format.LengthUnit(most);
         Panel panel = axis.Panel(frame, (0, 1.1 * unit.From(most)), 8);

@@ -9,6 +9,9 @@ namespace DrainSim.Reports.Pictures;
 internal sealed class LevelPanel(
     Sheet sheet, Panel panel, RunReport report, TimeAxis axis, Unit unit, Notes notes)
 {
+    /// <summary>Longest text of an act in the panel, characters.</summary>
+    private const int LongestAct = 44;
+
     private readonly DrainResult result = report.Result;
 
     /// <summary>The tenths before the end, which has its own label.</summary>
@@ -20,10 +23,24 @@ internal sealed class LevelPanel(
     {
         double start = result.Job.Level;
         double[] shown = [.. Marks(result.Job, profile).Where(mark => mark > -0.3 * start && mark < 1.6 * start)];
+        if (ReceiverSurface(result) is { } bottom)
+            shown = [.. shown, bottom, bottom + (result.ReceiverLevel ?? 0)];
         double least = Math.Min(0, shown.DefaultIfEmpty(0).Min());
-        double most = Math.Max(start, shown.DefaultIfEmpty(0).Max());
+        double highest = result.Job.Inflow is null && result.Job.Timeline.Count == 0 ? start : Math.Max(start, result.FinalLevel);
+        double most = Math.Max(highest, shown.DefaultIfEmpty(0).Max());
         most = most > least ? most : least + 1;
         return (least < 0 ? least - 0.06 * (most - least) : 0, most + 0.1 * (most - least));
+    }
+
+    /// <summary>
+    /// Elevation of the bottom of the first receiving tank, m, where its surface can be shown beside the level: within some
+    /// three times its range; null where not.
+    /// </summary>
+    public static double? ReceiverSurface(DrainResult result)
+    {
+        double start = Math.Max(result.Job.Level, 0.1);
+        ReceivingTank? tank = result.Job.DrawOffs.Select(drawOff => drawOff.Receiver).OfType<ReceivingTank>().FirstOrDefault();
+        return tank is not null && tank.Bottom > -2 * start && tank.Bottom + (result.ReceiverLevel ?? 0) < 1.6 * start ? tank.Bottom : null;
     }
 
     /// <summary>Writes all marks, the weightiest first, so that they get the best places.</summary>
@@ -50,14 +67,22 @@ internal sealed class LevelPanel(
         }
     }
 
+    private string InletName =>
+        result.Job.DrawOffs.Count > 1 ? $"inlet of {LimitWording.NameOf(result.Job.Line, 0)}" : "inlet";
+
     private void WriteReferences(LineProfile profile)
     {
         MeasureFormat format = report.Format;
         var marks = new List<(double Elevation, string Name)>
         {
-            (profile.Inlet, $"inlet {format.Length(profile.Inlet)}"),
+            (profile.Inlet, $"{InletName} {format.Length(profile.Inlet)}"),
             (profile.Outlet, $"outlet {format.Length(profile.Outlet)}"),
         };
+        foreach ((DrawOff other, int i) in result.Job.DrawOffs.Select((drawOff, i) => (drawOff, i)).Skip(1))
+        {
+            string line = LimitWording.NameOf(other.Line, i);
+            marks.Add((other.Line.Inlet.Elevation, $"inlet of {line} {format.Length(other.Line.Inlet.Elevation)}"));
+        }
         if (result.Job.ReceiverSurface is { } surface)
         {
             marks.Add((surface, $"receiving surface {format.Length(surface)}"));
@@ -86,8 +111,8 @@ internal sealed class LevelPanel(
         notes.KeepClearOf(at, 10);
         string level = report.Format.Length(result.FinalLevel);
         string second = axis.End <= 0 ? $"level {level}"
-            : result.Outcome == Outcome.Emptied ? MeasureFormat.Duration(axis.End)
-            : $"{MeasureFormat.Duration(axis.End)}, {level}";
+            : result.Outcome == Outcome.Emptied ? When(axis.End)
+            : $"{When(axis.End)}, {level}";
         notes.AddNeeded(at, new TextLook(24, Palette.Liquid), 400, Verdict.Headline(result.Outcome), second);
     }
 
@@ -96,16 +121,16 @@ internal sealed class LevelPanel(
         SKPoint end = panel.At(axis.At(axis.End), unit.From(result.FinalLevel));
         double before = double.NegativeInfinity;
         string last = "";
-        foreach (DrainEvent moment in result.Events)
+        foreach (DrainEvent moment in result.Events.Where(moment => !IsPartOfAct(moment)))
         {
-            string text = Short(moment.Code);
+            string text = moment.Code == EventCode.Act ? ShortAct(moment) : Short(moment.Code);
             if (text.Length == 0 || text == last && moment.Time - before < 0.02 * axis.End)
             {
                 continue;
             }
             (before, last) = (moment.Time, text);
             SKPoint at = At(moment);
-            if (SKPoint.Distance(at, end) > 14 && notes.Add(at, PageText.Note(Palette.Ink), 400, false, text, MeasureFormat.Duration(moment.Time)))
+            if (SKPoint.Distance(at, end) > 14 && notes.Add(at, PageText.Note(Palette.Ink), 400, false, text, When(moment.Time)))
             {
                 sheet.Dot(at, 6, Palette.Ink);
                 notes.KeepClearOf(at, 7);
@@ -139,7 +164,30 @@ internal sealed class LevelPanel(
         EventCode.VacuumRatingPassed => "vacuum rating passed",
         EventCode.PressureRatingPassed => "pressure rating passed",
         EventCode.HoseRatingPassed => "hose rating passed",
-        EventCode.Act => "act",
+        EventCode.AirBreak => "vent on the line open",
+        EventCode.InletUncovered => "inlet uncovered",
+        EventCode.VapourBreak => "column parts",
+        EventCode.ReceiverFull => "receiver full",
         _ => "",
     };
+
+    /// <summary>The time since the start, by the clock too where the job has one.</summary>
+    private string When(double time)
+    {
+        string elapsed = MeasureFormat.Duration(time);
+        return report.Clock is { } clock
+            ? $"{elapsed}, at {(axis.End < 86400 ? clock.OfDay(time, axis.End) : clock.Short(time))}"
+            : elapsed;
+    }
+
+    /// <summary>Whether an event only says how the flow jumped when something was done.</summary>
+    private bool IsPartOfAct(DrainEvent moment) =>
+        moment.Code is EventCode.LeftTurbulent or EventCode.LeftLaminar or EventCode.BecameLaminar or EventCode.BecameTurbulent
+        && result.Events.Any(act => act.Code == EventCode.Act && Math.Abs(act.Time - moment.Time) < 1e-3 * axis.End);
+
+    private string ShortAct(DrainEvent moment)
+    {
+        string text = EventWording.Text(moment, result.Job);
+        return text.Length <= LongestAct ? text : text[..(LongestAct - 1)].TrimEnd() + "…";
+    }
 }

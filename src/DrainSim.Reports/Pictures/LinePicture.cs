@@ -40,6 +40,10 @@ public static class LinePicture
     private static string Subtitle(RunReport report, LinePressures along)
     {
         string margin = PageText.Margin(report, Verdict.LimitName(report.Result.Job));
+        if (along.Named?.Name is { } name)
+        {
+            margin += $", in {name}";
+        }
         return along.Worst.Time > 0
             ? $"Worst moment: {MeasureFormat.Duration(along.Worst.Time)} after the start, {margin}."
             : $"Worst moment: the start, {margin}.";

@@ -6,6 +6,7 @@ namespace DrainSim.Reports.Pictures;
 /// <summary>The pressure along the line of a run, at the start and at the worst moment.</summary>
 internal sealed class LinePressures
 {
+    private readonly DrainResult result;
     private readonly LineHydraulics line;
     private readonly Job job;
     private readonly int index;
@@ -13,11 +14,12 @@ internal sealed class LinePressures
     /// <summary>Compiles the line with the least margin and takes both moments from a run.</summary>
     public LinePressures(DrainResult result)
     {
-        job = result.Job;
+        this.result = result;
         index = WorstLine(result);
-        line = new LineHydraulics(job.DrawOffs[index].Line, job.Liquid, job.Site.Gravity);
         Start = result.Trace.At(0);
         Worst = result.Trace.At(Math.Clamp(result.LeastMargin.Time, 0, result.Trace.End));
+        job = result.JobAt(Worst.Time);
+        line = Compiled(job);
         Distances = Along(node => node.Distance);
         Elevations = Along(node => node.Elevation);
         CrestIndex = line.CrestIndex;
@@ -38,11 +40,21 @@ internal sealed class LinePressures
     /// <summary>The highest node.</summary>
     public int CrestIndex { get; }
 
-    /// <summary>Pressures at the nodes at a moment, Pa absolute.</summary>
+    /// <summary>The line, where it is one of several; else null.</summary>
+    public Line? Named => job.DrawOffs.Count > 1 ? job.DrawOffs[index].Line : null;
+
+    /// <summary>Pressures at the nodes at a moment, Pa absolute, through the line as acts have made it by then.</summary>
     public double[] Pressures(Instant now)
     {
+        Job then = result.JobAt(now.Time);
+        LineHydraulics through = then == job ? line : Compiled(then);
         double[] pressures = new double[line.NodeCount];
-        line.Pressures(Math.Max(0, now.LineFlows?[index] ?? now.Flow), now.Level, now.HeadspacePressure ?? job.Site.AtmosphericPressure, pressures);
+        // An act may have given the line other parts: its nodes are then not those of the picture.
+        if (through.NodeCount != line.NodeCount)
+        {
+            through = line;
+        }
+        through.Pressures(Math.Max(0, now.LineFlows?[index] ?? now.Flow), now.Level, now.HeadspacePressure ?? job.Site.AtmosphericPressure, pressures);
         return pressures;
     }
 
@@ -55,6 +67,8 @@ internal sealed class LinePressures
         double weight = job.Liquid.Density * job.Site.Gravity;
         return [.. pressures.Zip(Elevations, (p, z) => z + (p - job.Site.AtmosphericPressure) / weight)];
     }
+
+    private LineHydraulics Compiled(Job then) => new(then.DrawOffs[index].Line, then.Liquid, then.Site.Gravity);
 
     private static int WorstLine(DrainResult result)
     {

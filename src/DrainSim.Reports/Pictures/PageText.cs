@@ -1,5 +1,6 @@
 using System.Globalization;
 using DrainSim.Draining;
+using DrainSim.Lines;
 using DrainSim.Reports.Measures;
 using SkiaSharp;
 
@@ -54,12 +55,8 @@ internal static class PageText
     /// <summary>Writes the foot: liquid, line, and what the page is not.</summary>
     public static void Foot(Sheet sheet, Job job, MeasureFormat format)
     {
-        var profile = new LineProfile(job.Line);
-        string count = job.Line.Parallel > 1
-            ? string.Create(CultureInfo.InvariantCulture, $"{job.Line.Parallel} lines of ") : "line of ";
         string plant = $"{job.Liquid.Name} at {format.Temperature(job.Liquid.Temperature)} · "
-            + $"{count}{format.Length(job.Line.Bore)} bore, {format.Length(profile.Points[^1].Along)} long, "
-            + $"outlet at {format.Length(profile.Outlet)}";
+            + (job.DrawOffs.Count > 1 ? SeveralLines(job, format) : OneLine(job.Line, format));
         Foot(sheet, plant);
     }
 
@@ -74,6 +71,17 @@ internal static class PageText
             y += FootLook.LineHeight;
         }
     }
+
+    private static string OneLine(Line line, MeasureFormat format)
+    {
+        var profile = new LineProfile(line);
+        string count = line.Parallel > 1 ? string.Create(CultureInfo.InvariantCulture, $"{line.Parallel} lines of ") : "line of ";
+        return $"{count}{format.Length(line.Bore)} bore, {format.Length(profile.Points[^1].Along)} long, "
+            + $"outlet at {format.Length(profile.Outlet)}";
+    }
+
+    private static string SeveralLines(Job job, MeasureFormat format) => "lines: " + string.Join(", ",
+        job.DrawOffs.Select((drawOff, i) => $"{Wording.LimitWording.NameOf(drawOff.Line, i)} {format.Length(drawOff.Line.Bore)}"));
 
     /// <summary>Writes the heading of a row above its frame.</summary>
     public static void RowTitle(Sheet sheet, SKRect frame, string text) =>

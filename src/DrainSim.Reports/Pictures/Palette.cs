@@ -12,6 +12,7 @@ internal static class Palette
     public static readonly SKColor Frame = new(0x9A, 0xA6, 0xAD);
     public static readonly SKColor Liquid = new(0x17, 0x52, 0x73);
     public static readonly SKColor LiquidTint = new(0xE6, 0xEF, 0xF4);
+    public static readonly SKColor Receiver = new(0x2F, 0x6B, 0x5A);
     public static readonly SKColor Flow = new(0x9C, 0x6A, 0x14);
     public static readonly SKColor Pressure = new(0x5B, 0x3F, 0x73);
     public static readonly SKColor Limit = new(0xB2, 0x3A, 0x2A);
@@ -32,6 +33,12 @@ internal static class Palette
     /// <param name="dark">the dark end</param>
     /// <param name="share">how dark, from 0 to 1</param>
     public static SKColor Ramp(SKColor dark, double share) => Between(Between(Paper, dark, 0.12), dark, share);
+
+    /// <summary>The colours of several lines, in their order, over and over.</summary>
+    public static readonly SKColor[] Lines =
+    [
+        new(0xC4, 0x8A, 0x2C), new(0x4F, 0x6B, 0x2E), new(0x8A, 0x3B, 0x5E), new(0x2E, 0x7A, 0x86), new(0x7A, 0x56, 0x3A),
+    ];
 
     /// <summary>The same colour for a figure.</summary>
     public static ScottPlot.Color Of(SKColor color) => new(color.Red, color.Green, color.Blue);

@@ -6,8 +6,8 @@ using SkiaSharp;
 namespace DrainSim.Reports.Pictures;
 
 /// <summary>
-/// The picture of a run: the falling level with the stop and the events, the flow, and the low-point
-/// pressure against its limit, over one time axis; upright, in the proportions of an A4 page.
+/// The picture of a run: the falling level with the stop and the events, the flow, the headspace where it has a pressure
+/// of its own, and the low-point pressure against its limit, over one time axis; upright, in the proportions of an A4 page.
 /// </summary>
 public static class RunPicture
 {
@@ -30,11 +30,18 @@ public static class RunPicture
         float top = PageText.Head(sheet, report, Verdict.Sentence(report.Result, report.Format));
         PageText.Foot(sheet, report.Result.Job, report.Format);
         var course = new Course(report.Result);
-        var axis = new TimeAxis(course.End);
+        var axis = new TimeAxis(course.End, report.Clock);
         float room = Height - 102 - top;
-        DrawLevel(sheet, report, course, axis, Row(top, 0.47f * room));
-        DrawFlow(sheet, report, course, axis, Row(top + 0.47f * room, 0.23f * room));
-        DrawPressure(sheet, report, course, axis, Row(top + 0.70f * room, 0.30f * room));
+        bool hasGas = HeadspaceRow.IsNeeded(report.Result);
+        (float level, float flow, float gas) = hasGas ? (0.37f, 0.19f, 0.20f) : (0.47f, 0.23f, 0);
+        DrawLevel(sheet, report, course, axis, Row(top, level * room));
+        FlowRow.Draw(sheet, report, course, axis, Row(top + level * room, flow * room));
+        if (hasGas)
+        {
+            HeadspaceRow.Draw(sheet, report, course, axis, Row(top + (level + flow) * room, gas * room));
+        }
+        float above = level + flow + gas;
+        DrawPressure(sheet, report, course, axis, Row(top + above * room, (1 - above) * room));
         sheet.Write(stream);
     }
 
@@ -52,38 +59,22 @@ public static class RunPicture
         double[] ys = course.Values(now => now.Level, unit.Size);
         panel.Tint(xs, ys, Palette.LiquidTint);
         panel.Curve(xs, ys, Palette.Liquid);
+        double[]? below = LevelPanel.ReceiverSurface(result) is { } bottom
+            ? course.Values(now => bottom + (now.ReceiverLevel ?? 0), unit.Size) : null;
+        if (below is not null)
+        {
+            panel.Curve(xs, below, Palette.Receiver, isDashed: true);
+        }
         panel.Draw(sheet);
-        PageText.RowTitle(sheet, frame, $"Level in the tank, {unit.Sign}");
+        PageText.RowTitle(sheet, frame, below is null ? $"Level in the tank, {unit.Sign}" : $"Surfaces above the tank's lowest point, {unit.Sign}");
         var notes = new Notes(sheet, panel);
         notes.KeepClearOf(xs, ys);
+        if (below is not null)
+        {
+            notes.KeepClearOf(xs, below);
+            notes.AddAlong(xs, below, PageText.Note(Palette.Receiver), "surface in the receiver");
+        }
         new LevelPanel(sheet, panel, report, axis, unit, notes).Annotate(profile);
-    }
-
-    private static void DrawFlow(Sheet sheet, RunReport report, Course course, TimeAxis axis, SKRect frame)
-    {
-        Extreme largest = report.Result.LargestFlow;
-        double peak = course.Instants.Max(now => now.Flow);
-        Unit unit = report.Format.FlowUnit(peak);
-        double back = Math.Min(0, 1.1 * unit.From(course.Instants.Min(now => now.Flow)));
-        Panel panel = axis.Panel(frame, (back, peak > 0 ? 1.32 * unit.From(peak) : 1), peak > 0 ? 4 : 0);
-        double[] xs = axis.Times(course);
-        double[] ys = course.Values(now => now.Flow, unit.Size);
-        panel.Curve(xs, ys, Palette.Flow);
-        panel.Draw(sheet);
-        PageText.RowTitle(sheet, frame, $"Flow out of the tank, {unit.Sign}");
-        var notes = new Notes(sheet, panel);
-        notes.KeepClearOf(xs, ys);
-        axis.MarkEnd(sheet, panel, notes);
-        if (peak > 0)
-        {
-            SKPoint at = panel.At(axis.At(largest.Time), unit.From(largest.Value));
-            sheet.Dot(at, 6, Palette.Flow);
-            notes.Add(at, PageText.Note(Palette.Flow), 240, false, $"largest {report.Format.Flow(largest.Value)}");
-        }
-        else
-        {
-            notes.Add(panel.At(0, 0), PageText.Note(Palette.Flow), 100, false, "no flow");
-        }
     }
 
     private static void DrawPressure(Sheet sheet, RunReport report, Course course, TimeAxis axis, SKRect frame)
@@ -101,8 +92,7 @@ public static class RunPicture
         panel.Curve(xs, ys, Palette.Pressure);
         panel.Draw(sheet);
         PageText.RowTitle(sheet, frame, $"Lowest pressure in the line, {unit.Sign} absolute");
-        PageText.AxisTitle(sheet, frame,
-            axis.End > 0 ? $"time since the start, {axis.Unit.Sign}" : "at the start");
+        PageText.AxisTitle(sheet, frame, axis.Title);
         var notes = new Notes(sheet, panel);
         notes.KeepClearOf(xs, ys);
         axis.MarkEnd(sheet, panel, notes);

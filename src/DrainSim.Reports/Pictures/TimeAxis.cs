@@ -11,16 +11,25 @@ internal sealed class TimeAxis
 
     /// <summary>An axis from the start to a little after the end; without ticks for a run of no length.</summary>
     /// <param name="end">when the run stopped, s</param>
-    public TimeAxis(double end)
+    /// <param name="clock">the clock of the job; null where it has none</param>
+    public TimeAxis(double end, Clock? clock)
     {
         End = end;
         Unit = MeasureFormat.TimeUnit(end);
         most = end > 0 ? 1.04 * Unit.From(end) : 1;
-        ticks = end > 0 ? AxisTicks.Time(Unit, most, 10) : AxisTicks.None;
+        ticks = end <= 0 ? AxisTicks.None
+            : clock is null ? AxisTicks.Time(Unit, most, 10)
+            : AxisTicks.OfClock(clock, Unit, most, 8);
+        Title = end <= 0 ? "at the start"
+            : clock is null ? $"time since the start, {Unit.Sign}"
+            : $"time of the day, {clock.Zone}; start {clock.Moment(0)}";
     }
 
     /// <summary>When the run stopped, s.</summary>
     public double End { get; }
+
+    /// <summary>What the axis shows, in words.</summary>
+    public string Title { get; }
 
     /// <summary>The axis's unit.</summary>
     public Unit Unit { get; }

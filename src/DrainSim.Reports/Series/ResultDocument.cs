@@ -51,7 +51,9 @@ public static class ResultDocument
         json.WriteString("outcome", OutcomeCodes.Code(result.Outcome));
         json.WriteString("reason", result.NoStart is { } reason ? ReportCodes.Of(reason) : null);
         json.WriteString("sentence", Verdict.Sentence(result, report.Format));
+        json.WriteString("begins", report.Clock?.Iso(0));
         Number(json, "stopped_at_s", result.StoppedAt);
+        json.WriteString("stopped_at_clock", report.Clock?.Iso(result.StoppedAt));
         Number(json, "initial_volume_m3", result.InitialVolume);
         Number(json, "drained_volume_m3", result.DrainedVolume);
         Number(json, "left_volume_m3", result.LeftVolume);
@@ -78,6 +80,10 @@ public static class ResultDocument
             json.WriteString("text", EventWording.Text(moment, report.Result.Job));
             Number(json, "level_m", moment.Level);
             Number(json, "volume_m3", moment.Volume);
+            if (report.Clock is { } clock)
+            {
+                json.WriteString("clock", clock.Iso(moment.Time));
+            }
             json.WriteEndObject();
         }
         json.WriteEndArray();
@@ -132,7 +138,7 @@ public static class ResultDocument
             json.WriteEndObject();
         }
         json.WriteEndArray();
-        WriteStories(json, "cautions", Cautions.For(report.Result.Job, format).Select(caution =>
+        WriteStories(json, "cautions", Cautions.For(report.Result, format).Select(caution =>
             (caution.Code, (double?)null, caution.Text)));
     }
 

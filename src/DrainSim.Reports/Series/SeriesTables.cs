@@ -1,5 +1,6 @@
 using CsvHelper;
 using DrainSim.Draining;
+using DrainSim.Reports.Measures;
 using DrainSim.Reports.Wording;
 
 namespace DrainSim.Reports.Series;
@@ -23,14 +24,18 @@ public static class SeriesTables
 
     private static readonly CsvWriterOptions Options = new() { NewLine = "\n" };
 
-    /// <summary>Writes the time series at <see cref="SampleTimes"/>; a cell is empty where a quantity is absent.</summary>
+    /// <summary>
+    /// Writes the time series at <see cref="SampleTimes"/>: <see cref="Columns"/>, the flow of each line where there are
+    /// several, and the clock where the job has one. A cell is empty where a quantity is absent.
+    /// </summary>
     /// <param name="stream">receives UTF-8; left open</param>
     /// <param name="result">the run</param>
+    /// <param name="clock">the clock of the job; null where it has none</param>
     /// <exception cref="IOException">the stream refuses</exception>
-    public static void WriteSeries(Stream stream, DrainResult result)
+    public static void WriteSeries(Stream stream, DrainResult result, Clock? clock = null)
     {
         using CsvWriter csv = CsvWriter.Create(stream, Options, leaveOpen: true);
-        csv.WriteRecord(SeriesColumns);
+        csv.WriteRecord([.. SeriesColumns, .. LineColumns(result), .. ClockColumn(clock)]);
         foreach (double time in SampleTimes.Of(result))
         {
             Instant now = result.Trace.At(time);
@@ -44,6 +49,11 @@ public static class SeriesTables
             csv.WriteField(now.LowPointMargin);
             WriteOptional(csv, now.ReceiverLevel);
             WriteOptional(csv, now.HeadspacePressure);
+            foreach (double flow in now.LineFlows ?? [])
+            {
+                csv.WriteField(flow);
+            }
+            WriteClock(csv, clock, time);
             csv.EndRecord();
         }
     }
@@ -51,11 +61,12 @@ public static class SeriesTables
     /// <summary>Writes the events in time order.</summary>
     /// <param name="stream">receives UTF-8; left open</param>
     /// <param name="result">the run</param>
+    /// <param name="clock">the clock of the job; null where it has none</param>
     /// <exception cref="IOException">the stream refuses</exception>
-    public static void WriteEvents(Stream stream, DrainResult result)
+    public static void WriteEvents(Stream stream, DrainResult result, Clock? clock = null)
     {
         using CsvWriter csv = CsvWriter.Create(stream, Options, leaveOpen: true);
-        csv.WriteRecord(EventsColumns);
+        csv.WriteRecord([.. EventsColumns, .. ClockColumn(clock)]);
         foreach (DrainEvent moment in result.Events)
         {
             csv.WriteField(moment.Time);
@@ -63,7 +74,22 @@ public static class SeriesTables
             csv.WriteField(moment.Level);
             csv.WriteField(moment.Volume);
             csv.WriteField(EventWording.Text(moment, result.Job));
+            WriteClock(csv, clock, moment.Time);
             csv.EndRecord();
+        }
+    }
+
+    private static IEnumerable<string> LineColumns(DrainResult result) => result.Lines.Count > 1
+        ? result.Lines.Select((line, i) => $"flow_{LimitWording.NameOf(line.DrawOff.Line, i).Replace(' ', '_')}_m3_s")
+        : [];
+
+    private static string[] ClockColumn(Clock? clock) => clock is null ? [] : ["clock"];
+
+    private static void WriteClock(CsvWriter csv, Clock? clock, double time)
+    {
+        if (clock is not null)
+        {
+            csv.WriteField(clock.Iso(time));
         }
     }
 

@@ -14,13 +14,29 @@ public static class Cautions
     public static Caution Closing { get; } = new("authorises_nothing",
         "DrainSim informs; it authorises nothing. Local codes, the site's permit and licensed practice decide.");
 
-    /// <summary>The cautions for a job, <see cref="Closing"/> last.</summary>
+    /// <summary>Velocity up to which a flammable liquid is started, m/s: API RP 2003 and IEC TS 60079-32-1, from memory.</summary>
+    private const double SlowStart = 1;
+
+    /// <summary>Velocity that a flammable liquid never passes, m/s: the same, from memory.</summary>
+    private const double FullFlow = 7;
+
+    /// <summary>The cautions for a job before it is run, <see cref="Closing"/> last.</summary>
     /// <param name="job">the job</param>
     /// <param name="format">writes the measures</param>
-    public static IReadOnlyList<Caution> For(Job job, MeasureFormat format)
+    public static IReadOnlyList<Caution> For(Job job, MeasureFormat format) => For(job, format, null);
+
+    /// <summary>The cautions for a job that was run, <see cref="Closing"/> last.</summary>
+    /// <param name="result">what the run found</param>
+    /// <param name="format">writes the measures</param>
+    public static IReadOnlyList<Caution> For(DrainResult result, MeasureFormat format) =>
+        For(result.Job, format, result.LargestVelocity.Value);
+
+    private static List<Caution> For(Job job, MeasureFormat format, double? velocity)
     {
         LiquidHazards hazards = job.Liquid.Hazards;
         var cautions = new List<Caution>();
+        if (hazards.HasFlag(LiquidHazards.Flammable) && velocity > SlowStart)
+            cautions.Add(Charging(velocity.Value, format));
         AddLiquid(cautions, hazards, format, job.Liquid.Temperature);
         if (new LineProfile(job.Line).IsSiphon)
         {
@@ -51,6 +67,15 @@ public static class Cautions
         }
         cautions.Add(Closing);
         return cautions;
+    }
+
+    private static Caution Charging(double velocity, MeasureFormat format)
+    {
+        string full = velocity > FullFlow ? $" and past the {format.Velocity(FullFlow)} that they never allow" : "";
+        return new("static_charge",
+            $"It runs at up to {format.Velocity(velocity)}. API RP 2003 and IEC TS 60079-32-1 ask for a slow start, no more than "
+            + $"{format.Velocity(SlowStart)} until the outlet is covered, and for less than {format.Velocity(FullFlow)} after it, less "
+            + $"still in wide bores{full}. This is a reminder, no permission: throttle as your standard says.");
     }
 
     private static void AddLiquid(

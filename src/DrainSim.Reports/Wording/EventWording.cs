@@ -31,14 +31,14 @@ public static class EventWording
         EventCode.Act => job.Timeline[(int)moment.Number - 1].Text,
         EventCode.AirBreak => "the vent on the line lets air in",
         EventCode.VacuumHeld => "the vacuum in the headspace holds the liquid up",
-        EventCode.YieldHeld => "the head no longer moves the liquid",
+        EventCode.YieldHeld => "the liquid's yield stress holds it",
         EventCode.Balanced => "as much runs in as out",
         EventCode.ReceiverFull => "the receiver is full to its brim",
         EventCode.Overflowed => "the tank overflows",
         EventCode.VapourBreak => $"the low point reaches {Verdict.LimitName(job)} and the column parts",
         EventCode.InletUncovered => "air reaches the inlet",
         EventCode.Emptied => "the tank is empty but for a film",
-        EventCode.Levelled => $"the tank is level with {Verdict.FarEnd(job)}",
+        EventCode.Levelled => "the driving head is used up",
         EventCode.TargetReached => "the target is reached",
         EventCode.TimeLimit => "the longest time given is over",
         EventCode.NeverStarted => "the line carries no flow",
@@ -72,6 +72,9 @@ public static class EventWording
             + "gas from the liquid may gather at the crest (low confidence).",
         WarningCode.NeverEmpties =>
             $"The line keeps up with an inflow of at most {format.Flow(warning.Number)} down to the inlet; this one is more.",
+        WarningCode.FrictionDiffers =>
+            "The flow of a liquid with a yield stress is turbulent here, and the published forms differ: by one of them the friction is up to "
+            + $"{MeasureFormat.Percent(warning.Number)} less, and the job shorter.",
         WarningCode.ThinMargin =>
             $"At the worst moment only {format.Pressure(warning.Number)} is left at the low point. "
             + "Warmer liquid, a lower barometer or a rise in the hose would use it up.",
@@ -89,6 +92,10 @@ public static class EventWording
             RemedyKind.LowerOutlet => $"Lowering the outlet by {change} (to {value}) {proof}",
             RemedyKind.LowerCrest => $"Lowering the crest by {change} (to {value}) {proof}",
             RemedyKind.LowerInlet => $"Lowering the inlet by {change} (to {value}) {proof}",
+            RemedyKind.WidenVent =>
+                $"One more free vent of {change} bore (a sharp-edged hole) would let the tank breathe: run so, {Proof(remedy, format)}.",
+            RemedyKind.LessInflow => $"No more inflow than {format.Flow(remedy.Value)} ({MeasureFormat.Percent(1 - remedy.Change)} of what is given) {proof}",
+            RemedyKind.HigherBrim => $"A receiver with its brim {change} higher (at a depth of {value}) {proof}",
             RemedyKind.ThrottleOutlet =>
                 $"Throttling at the outlet by a loss coefficient of {MeasureFormat.Number(remedy.Change)} {proof}",
             _ => throw new UnreachableException(remedy.Kind.ToString()),

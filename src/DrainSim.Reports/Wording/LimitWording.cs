@@ -1,5 +1,6 @@
 using System.Diagnostics;
 using DrainSim.Draining;
+using DrainSim.Lines;
 using DrainSim.Reports.Measures;
 
 namespace DrainSim.Reports.Wording;
@@ -39,11 +40,16 @@ public static class LimitWording
     /// <param name="format">writes the measures</param>
     public static string Text(LineResult line, int index, MeasureFormat format)
     {
-        string name = line.DrawOff.Line.Name ?? $"line {index + 1}";
+        string name = NameOf(line.DrawOff.Line, index);
         string ending = line.Outcome is { } outcome ? Verdict.Headline(outcome).ToLowerInvariant() : "still runs";
         string receiver = line.ReceiverLevel is { } depth ? $"; {format.Length(depth)} in its receiver" : "";
         return $"{name}: {ending} after {MeasureFormat.Duration(line.StoppedAt)}, {format.Volume(line.DeliveredVolume)} through it{receiver}.";
     }
+
+    /// <summary>What one of several lines is called.</summary>
+    /// <param name="line">the line</param>
+    /// <param name="index">its place in the job, from 0</param>
+    public static string NameOf(Line line, int index) => line.Name ?? $"line {index + 1}";
 
     private static string Name(LimitKind kind) => kind switch
     {

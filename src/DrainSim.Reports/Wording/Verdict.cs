@@ -16,7 +16,29 @@ public static class Verdict
         string left = format.Volume(result.LeftVolume);
         string level = format.Length(result.FinalLevel);
         string stops = $"Stops after {time} with {left} left";
-        return result.Outcome switch
+        return Ending(result, format, time, left, level, stops) + Danger(result, format);
+    }
+
+    /// <summary>What no verdict may leave out: a rating of the tank that is passed on the way.</summary>
+    private static string Danger(DrainResult result, MeasureFormat format)
+    {
+        if (result.LargestVacuum is { } vacuum && result.Job.VacuumRating is { } stands && vacuum.Value > stands)
+            return $" The tank's vacuum rating of {format.Pressure(stands)} is passed {When(result, EventCode.VacuumRatingPassed)}.";
+        bool isOver = result.Events.Any(moment => moment.Code == EventCode.PressureRatingPassed);
+        return isOver && result.Job.PressureRating is { } rating
+            ? $" The tank's pressure rating of {format.Pressure(rating)} is passed {When(result, EventCode.PressureRatingPassed)}."
+            : "";
+    }
+
+    private static string When(DrainResult result, EventCode code)
+    {
+        double time = result.Events.FirstOrDefault(moment => moment.Code == code).Time;
+        return time > 0 ? $"after {MeasureFormat.Duration(time)}" : "from the start";
+    }
+
+
+    private static string Ending(DrainResult result, MeasureFormat format, string time, string left, string level, string stops) =>
+        result.Outcome switch
         {
             Outcome.Emptied => $"Empties in {time}; nothing but a film is left.",
             Outcome.InletUncovered => $"{stops}: air reaches the inlet at {level}.",
@@ -24,17 +46,17 @@ public static class Verdict
                 $"{stops}: at {level} the low point reaches {LimitName(result.Job)} and the column parts.",
             Outcome.AirBreak => $"{stops}: at {level} the vent on the line lets air in.",
             Outcome.VacuumHeld => $"{stops}: at {level} the vacuum in the headspace holds the liquid up.",
-            Outcome.YieldHeld => $"{stops}: at {level} the head no longer moves the liquid.",
+            Outcome.YieldHeld => $"{stops}: at {level} the liquid's yield stress holds it{YieldHead(result, format)}.",
             Outcome.Balanced => $"Never empties: after {time} as much runs in as out, at {level}, with {left} in the tank.",
             Outcome.ReceiverFull => $"{stops}: at {level} the receiver is full to its brim.",
             Outcome.Overflowed => $"Overflows after {time}: more runs in than the line carries.",
-            Outcome.Levelled => $"{stops}: at {level} it stands level with {FarEnd(result.Job)}.",
+            Outcome.Levelled => $"{stops}: at {level} it stands level with {FarEnd(result.Job, result.ReceiverLevel)}.",
             Outcome.TargetReached => Target(result, format, time),
             Outcome.TimeLimit => $"Not done after {time}, the longest time given: {left} left, at {level}.",
-            Outcome.NeverStarted => $"Never starts: {Reason(result.Job, result.NoStart, result.Prime, format)}.",
+            Outcome.NeverStarted => $"Never starts: {Reason(result.Job, result.NoStart, result.Prime, format)}"
+                + $"{(result.NoStart == NoStart.YieldHolds ? YieldHead(result, format) : "")}.",
             _ => throw new UnreachableException(result.Outcome.ToString()),
         };
-    }
 
     /// <summary>The outcome in a word or two, for a curve or a table.</summary>
     public static string Headline(Outcome outcome) => outcome switch
@@ -60,8 +82,18 @@ public static class Verdict
         LineProfile.IsLimitGiven(job) ? "the least pressure allowed" : "the vapour pressure";
 
     /// <summary>What the liquid runs to, in words.</summary>
-    internal static string FarEnd(Job job) =>
-        job.ReceiverSurface > new LineProfile(job.Line).Outlet ? "the receiving surface" : "the outlet";
+    internal static string FarEnd(Job job) => FarEnd(job, null);
+
+    /// <summary>What the liquid has run to, in words.</summary>
+    /// <param name="job">the job</param>
+    /// <param name="depth">depth in the receiving tank by then, m; null where there is none</param>
+    internal static string FarEnd(Job job, double? depth)
+    {
+        double outlet = new LineProfile(job.Line).Outlet;
+        return job.ReceiverSurface > outlet ? "the receiving surface"
+            : job.DrawOffs[0].Receiver is ReceivingTank tank && tank.Bottom + (depth ?? tank.Level) > outlet ? "the liquid in the receiver"
+            : "the outlet";
+    }
 
     /// <summary>Why a line does not start, as the rest of a sentence.</summary>
     /// <param name="job">the job</param>
@@ -77,6 +109,7 @@ public static class Verdict
                 $"the inlet, at {format.Length(job.Line.Inlet.Elevation)}, stands above the level of {level}",
             NoStart.NoDrivingHead =>
                 $"{FarEnd(job)}, at {format.Length(FarElevation(job))}, stands no lower than the level of {level}",
+            NoStart.YieldHolds => $"the liquid's yield stress holds it at the level of {level}",
             NoStart.LiftBeyondLimit when prime is not null =>
                 $"the crest stands {format.Length(prime.StaticLift)} above the level, "
                 + $"and no column higher than {format.Length(prime.LiftLimit)} holds together",
@@ -88,10 +121,16 @@ public static class Verdict
         };
     }
 
+    private static string YieldHead(DrainResult result, MeasureFormat format) =>
+        result.Lines.Select(line => line.YieldHead).Max() is { } head
+            ? $"; it takes a head of more than {format.Length(head)} to move it"
+            : "";
+
     private static double FarElevation(Job job)
     {
         double outlet = new LineProfile(job.Line).Outlet;
-        return Math.Max(outlet, job.ReceiverSurface ?? outlet);
+        double surface = job.DrawOffs[0].Receiver is ReceivingTank tank ? tank.Bottom + tank.Level : job.ReceiverSurface ?? outlet;
+        return Math.Max(outlet, surface);
     }
 
     private static string Target(DrainResult result, MeasureFormat format, string time)

@@ -201,6 +201,13 @@ internal sealed class BlockReader(BlockNode node, string path, Position at, Find
     /// <summary>The block under a key; null, without a problem, when something else stands there.</summary>
     public BlockReader? BlockIfAny(string key) => Find(key) is { Value: BlockNode } ? Block(key) : null;
 
+    /// <summary>The block under a key as it stands, its own keys not asked for one by one; null when it is absent or no block.</summary>
+    public BlockNode? SettingsOf(string key) => Block(key) is null ? null : (BlockNode)Find(key)!.Value;
+
+    /// <summary>Whether the value of a key can be read as a quantity.</summary>
+    public bool IsAmount(string key, Quantity quantity) =>
+        Find(key)?.Value is TextNode text && !QuantityText.Read(text.Text, quantity).IsRefused;
+
     /// <summary>The list under a key; null, without a problem, when something else stands there.</summary>
     public ListNode? ListIfAny(string key) => Find(key)?.Value as ListNode;
 

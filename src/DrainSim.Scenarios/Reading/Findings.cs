@@ -30,6 +30,9 @@ internal sealed class Findings(SourceText source)
     /// <summary>Whether a further refusal would only be counted.</summary>
     public bool IsFull => problems.Count >= MostKept;
 
+    /// <summary>Findings of another reading of the same file.</summary>
+    public Findings Fresh() => new(source);
+
     /// <summary>Adds a refusal.</summary>
     /// <param name="at">its place</param>
     /// <param name="key">dotted path of the key</param>

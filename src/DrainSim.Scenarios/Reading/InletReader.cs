@@ -20,6 +20,10 @@ internal static class InletReader
         InletFacing facing = block.Choice("facing", InletFacing.Down,
             ("down", InletFacing.Down), ("side", InletFacing.Side), ("up", InletFacing.Up));
         double? loss = Loss(block, facing);
+        double? clearance = block.Amount("floor_clearance", Quantities.Length, Allowed.Positive);
+        AirDraw airDraw = block.Choice("air_draw", AirDraw.Warn, ("warn", AirDraw.Warn), ("break", AirDraw.Break));
+        if (clearance is not null && facing != InletFacing.Down)
+            block.Refuse("floor_clearance", "belongs to an inlet that faces down", "It is the gap between the end of a dip leg and the floor");
         if (tank is not null && elevation >= tank.Vessel.Height)
         {
             block.Refuse("elevation", string.Create(CultureInfo.InvariantCulture,
@@ -29,7 +33,14 @@ internal static class InletReader
         }
         block.Finish();
         return elevation is { } z && loss is { } k
-            ? block.Build(() => new Inlet { Elevation = z, Facing = facing, EdgeLoss = k })
+            ? block.Build(() => new Inlet
+            {
+                Elevation = z,
+                Facing = facing,
+                EdgeLoss = k,
+                FloorClearance = clearance,
+                AirDraw = airDraw,
+            })
             : null;
     }
 

@@ -1,3 +1,4 @@
+using System.Globalization;
 using DrainSim.Lines;
 using DrainSim.Scenarios.Units;
 
@@ -22,6 +23,8 @@ internal static class LineReader
         LinePath? path = PathReader.Read(block, inlet?.Elevation, bore);
         AtVapour atVapour = block.Choice("at_vapour", AtVapour.Break, ("break", AtVapour.Break), ("limit", AtVapour.Limit));
         double? least = block.Amount("least_pressure", Quantities.Pressure, Allowed.NotNegative);
+        double? airBreak = AirBreak(block, inlet, path);
+        double? vacuumRating = block.Amount("vacuum_rating", Quantities.Pressure, Allowed.NotNegative);
         if (block.BlockIfAny("start") is not null || !block.Choice("start", true, ("primed", true), ("empty", false)))
             block.Refuse("start", "not read by this version", LaterWork.Find("line.start")!);
         if (wall is null && path is { NeedsRoughness: true } && !block.Has("roughness") && !block.Has("material"))
@@ -40,7 +43,19 @@ internal static class LineReader
             Path = path.Items,
             AtVapour = atVapour,
             LeastPressure = least,
+            AirBreak = airBreak,
+            VacuumRating = vacuumRating,
         });
+    }
+
+    private static double? AirBreak(BlockReader block, Inlet? inlet, LinePath? path)
+    {
+        double? hole = block.Amount("air_break", Quantities.Length, Allowed.NotNegative);
+        if (path is null || inlet is null || hole is null || (hole > inlet.Elevation && hole <= path.Crest))
+            return hole;
+        block.Refuse("air_break", "no part of the line that the level passes is at this elevation",
+            string.Create(CultureInfo.InvariantCulture, $"The inner leg rises from {inlet.Elevation:0.####} m to {path.Crest:0.####} m"));
+        return null;
     }
 
     private static double? Bore(BlockReader block)

@@ -71,7 +71,7 @@ internal static class PathReader
 
     private static PathItem? Item(BlockReader block, HashSet<string> names, PathWalk walk)
     {
-        string? name = Name(block, names);
+        string? name = NameReader.Read(block, names);
         string? kind = block.OnlyOne(Help, "length", "fitting", "valve", "reducer", "loss");
         double? bore = OwnBore(block);
         if (block.Has("bore"))
@@ -87,17 +87,6 @@ internal static class PathReader
         };
         block.Finish();
         return item is null ? null : item with { Name = name, Bore = bore };
-    }
-
-    private static string? Name(BlockReader block, HashSet<string> names)
-    {
-        if (block.Word("name") is not { } name)
-            return null;
-        if (!char.IsAsciiLetter(name[0]) || name.Any(letter => !char.IsAsciiLetterOrDigit(letter) && letter is not ('_' or '-')))
-            block.Refuse("name", $"{Quote.Of(name)} cannot stand in a parameter's path", "A name is letters, digits, '_' and '-', a letter first");
-        else if (!names.Add(name))
-            block.Refuse("name", $"{Quote.Of(name)} is the name of an item before", "Each item has its own name");
-        return name;
     }
 
     private static Fitting? FittingItem(BlockReader block)

@@ -25,6 +25,7 @@ internal static class RunReader
         double? every = block.Amount("report_every", Quantities.Time, Allowed.Positive);
         double tolerance = block.AmountOr("tolerance", Quantities.Ratio, Allowed.Within(1e-13, 1e-2, "from 1e-13 to 0.01"),
             Usual.Tolerance, Usual.Tolerance.ToString("0e0", CultureInfo.InvariantCulture));
+        DateTimeOffset? begins = ClockReader.Read(block, "begins");
         ResultUnits? units = block.Choice<ResultUnits?>("units", null, ("metric", ResultUnits.Metric), ("us", ResultUnits.Us));
         if (tank is not null)
             JudgeTargets(block, tank, level, volume);
@@ -39,7 +40,7 @@ internal static class RunReader
             SettledWithin = settled,
             ReportEvery = every,
             Tolerance = tolerance,
-        }) ?? Usual, units);
+        }) ?? Usual, units, begins);
     }
 
     private static void JudgeTargets(BlockReader block, FilledTank tank, double? level, double? volume)

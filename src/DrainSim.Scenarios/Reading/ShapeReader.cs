@@ -9,7 +9,7 @@ internal static class ShapeReader
 {
     private static readonly (string Word, Func<BlockReader, string, Vessel?> Read)[] Shapes =
     [
-        ("vertical_cylinder", VerticalCylinder),
+        ("vertical_cylinder", (block, _) => VerticalCylinder(block, "bottom")),
         ("horizontal_cylinder", HorizontalCylinder),
         ("sphere", Sphere),
         ("box", Box),
@@ -22,13 +22,14 @@ internal static class ShapeReader
     /// <summary>The vessel; null when it is refused.</summary>
     /// <param name="block">the block that has the key <c>shape</c></param>
     /// <param name="folder">folder in which a strapping table is looked for</param>
-    public static Vessel? Read(BlockReader block, string folder)
+    /// <param name="bottomHead">key of the lower head where <c>bottom</c> says something else</param>
+    public static Vessel? Read(BlockReader block, string folder, string bottomHead = "bottom")
     {
         if (!block.Has("shape"))
             block.Miss("is missing", $"The shapes are {string.Join(", ", Shapes.Select(shape => shape.Word))}", "shape");
         Func<BlockReader, string, Vessel?>? read = block.Choice<Func<BlockReader, string, Vessel?>?>("shape", null, [.. Shapes]);
         if (read is not null)
-            return read(block, folder);
+            return read == Shapes[0].Read ? VerticalCylinder(block, bottomHead) : read(block, folder);
         // Without the shape nobody knows which dimensions belong to it: they are not unknown keys.
         foreach (string dimension in Dimensions)
             block.Has(dimension);
@@ -38,14 +39,14 @@ internal static class ShapeReader
     private static readonly string[] Dimensions =
     [
         "diameter", "height", "length", "width", "depth", "bottom", "top", "heads", "bottom_diameter", "top_diameter",
-        "bottom_length", "bottom_width", "side_slope", "sections", "file",
+        "bottom_length", "bottom_width", "side_slope", "sections", "file", "bottom_head",
     ];
 
-    private static VerticalCylinder? VerticalCylinder(BlockReader block, string folder)
+    private static VerticalCylinder? VerticalCylinder(BlockReader block, string bottomHead)
     {
         double? diameter = Dimension(block, "diameter");
         double? height = Dimension(block, "height");
-        Head? bottom = HeadReader.Read(block, "bottom", diameter);
+        Head? bottom = HeadReader.Read(block, bottomHead, diameter);
         Head? top = HeadReader.Read(block, "top", diameter);
         return diameter is { } d && height is { } h && bottom is not null && top is not null
             ? block.Build(() => new VerticalCylinder { Diameter = d, ShellHeight = h, Bottom = bottom, Top = top })

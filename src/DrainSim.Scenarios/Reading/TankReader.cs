@@ -1,4 +1,6 @@
 using System.Globalization;
+using DrainSim.Draining;
+using DrainSim.Gas;
 using DrainSim.Scenarios.Units;
 using DrainSim.Vessels;
 
@@ -19,6 +21,10 @@ internal static class TankReader
         double? level = block.Amount("level", Quantities.Length, Allowed.NotNegative);
         double? contents = block.Amount("contents", Quantities.Volume, Allowed.NotNegative);
         double? fill = block.Amount("fill", Quantities.Ratio, Allowed.Share);
+        Headspace headspace = HeadspaceReader.Read(block);
+        Inflow? inflow = InflowReader.Read(block);
+        double? vacuumRating = block.Amount("vacuum_rating", Quantities.Pressure, Allowed.NotNegative);
+        double? pressureRating = block.Amount("pressure_rating", Quantities.Pressure, Allowed.NotNegative);
         block.Finish();
         if (vessel is null || given is null)
             return null;
@@ -39,7 +45,15 @@ internal static class TankReader
         };
         if (start == 0)
             block.Warn(given, "the tank is empty at the start", "");
-        return start is { } found ? new FilledTank(vessel, found) : null;
+        if (start is not { } found)
+            return null;
+        return new FilledTank(vessel, found)
+        {
+            Headspace = headspace,
+            Inflow = inflow,
+            VacuumRating = vacuumRating,
+            PressureRating = pressureRating,
+        };
     }
 
     private static string Text(FormattableString text) => text.ToString(CultureInfo.InvariantCulture);

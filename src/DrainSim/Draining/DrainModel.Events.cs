@@ -1,5 +1,6 @@
 using System.Diagnostics;
 using DrainSim.Integration;
+using DrainSim.Lines;
 
 namespace DrainSim.Draining;
 
@@ -19,7 +20,7 @@ internal sealed partial class DrainModel : IEventSet
         double unclamped = StartVolume + now.InflowVolume(t);
         for (int i = 0; i < LineCount; i++)
             unclamped -= y[i];
-        var moment = new Moment(t, unclamped, surface, GasPressure(now, t, volume, y));
+        var moment = new Moment(t, unclamped, surface, GasPressure(now, volume, y));
         for (int i = 0; i < watches.Length; i++)
             values[i] = Value(watches[i], moment, y, dydt);
     }
@@ -53,16 +54,49 @@ internal sealed partial class DrainModel : IEventSet
     public bool OnRestart(int index, double t, Span<double> y)
     {
         Watch watch = watches[index];
-        LineMode mode = now.Modes[watch.Line];
         if (watch.Kind == WatchKind.ActFalls)
+        {
             Begin(AfterAct(watch.Ordinal, t, y));
-        else if (watch.Kind == WatchKind.AllSettle)
+            JudgeAfterAct(t, y);
+        }
+        else
+        {
+            React(watch, t, y);
+        }
+
+        return now.LinesAtWork > 0;
+    }
+
+    private void React(Watch watch, double t, ReadOnlySpan<double> y)
+    {
+        LineMode mode = now.Modes[watch.Line];
+        if (watch.Kind == WatchKind.AllSettle)
             EndAllAtRest(t, y);
         else if (watch.Kind == WatchKind.MarginVanishes && now.Plant.Lines[watch.Line].HoldsAtVapour)
             Begin(now.With(t, watch.Line, mode with { IsLimited = !mode.IsLimited }));
         else if (EndingOf(watch, t, y) is { } ending)
             Begin(now.With(t, watch.Line, mode with { Ending = ending, EndedAt = t }));
-        return now.LinesAtWork > 0;
+    }
+
+    /// <summary>
+    /// An act may leave a line where its end is behind it already, its inlet lifted out of the liquid or its head gone:
+    /// there nothing crosses zero any more, so what would end the line is looked at once.
+    /// </summary>
+    private void JudgeAfterAct(double t, ReadOnlySpan<double> y)
+    {
+        Span<double> dydt = stackalloc double[Dimension];
+        Span<double> values = stackalloc double[watches.Length];
+        Derivative(t, y, dydt);
+        EventValues(t, y, dydt, values);
+        for (int i = 0; i < watches.Length; i++)
+        {
+            bool ends = watches[i].Kind is WatchKind.InletUncovers or WatchKind.AirBreakUncovers or WatchKind.AirDrawn
+                or WatchKind.MarginVanishes or WatchKind.LiftExhausts or WatchKind.HeadSettles;
+            if (!ends || Rule(i) is not { Action: EventAction.Restart } rule)
+                continue;
+            if (rule.Direction == EventDirection.Rising ? values[i] > 0 : values[i] < 0)
+                React(watches[i], t, y);
+        }
     }
 
     /// <summary>How the line of a watch ends when it fires; null where it does not end.</summary>
@@ -95,10 +129,9 @@ internal sealed partial class DrainModel : IEventSet
 
     private Epoch AfterAct(int ordinal, double t, Span<double> y)
     {
-        Plant after = plantsAfter[ordinal];
-        bool massIsKnown = now.Plant.Gas is { IsConfined: true, IsSteady: false };
-        if (hasMass && after.Gas.IsConfined && !massIsKnown)
-            y[LineCount] = after.Gas.MassAt(GasPressure(now, t, Volume(now, t, y), y), Volume(now, t, y));
+        Plant after = new(Job.Timeline[ordinal].ChangeOf(now.Plant.Job, Job));
+        if (hasPressure && after.Gas.IsConfined)
+            y[LineCount] = GasPressure(now, Volume(now, t, y), y);
         return now.With(t, after);
     }
 
@@ -109,7 +142,7 @@ internal sealed partial class DrainModel : IEventSet
     private bool EndsAtRest(int line)
     {
         CompiledLine compiled = now.Plant.Lines[line];
-        bool isAlone = now.LinesAtWork == 1 && now.Plant.Job.Inflow is null;
+        bool isAlone = now.LinesAtWork == 1 && now.Plant.Job.Inflow is null && now.From >= lastActTime;
         return isAlone || (compiled.DrawOff.Receiver is null && compiled.Hydraulics.RisesAboveInlet);
     }
 
@@ -125,16 +158,18 @@ internal sealed partial class DrainModel : IEventSet
     private bool RunsBack(int line, double t, ReadOnlySpan<double> y)
     {
         double volume = Volume(now, t, y);
-        return now.Plant.Lines[line].Head(vessel.Level(volume), GasPressure(now, t, volume, y), y[line]) < 0;
+        return now.Plant.Lines[line].Head(vessel.Level(volume), GasPressure(now, volume, y), y[line]) < 0;
     }
 
     private Outcome RestOf(int line, double t, ReadOnlySpan<double> y)
     {
         double volume = Volume(now, t, y), surface = vessel.Level(volume);
-        double liquidHead = surface - now.Plant.Lines[line].OutletLevel(y[line]);
-        if (now.Plant.Gas.IsConfined && liquidHead > 2 * run.SettledWithin)
+        double liquidHead = surface - now.Plant.Lines[line].OutletLevel(y[line]), yield = now.Plant.Lines[line].Hydraulics.YieldHead;
+        if (now.Plant.Gas.IsConfined && liquidHead > yield + 2 * run.SettledWithin)
             return Outcome.VacuumHeld;
-        return !HoldsHeel(line) && surface <= 2 * run.SettledWithin ? Outcome.Emptied : Outcome.Levelled;
+        if (!HoldsHeel(line) && surface <= 2 * run.SettledWithin)
+            return Outcome.Emptied;
+        return yield > run.SettledWithin ? Outcome.YieldHeld : Outcome.Levelled;
     }
 
     private double Value(Watch watch, in Moment at, ReadOnlySpan<double> y, ReadOnlySpan<double> dydt)
@@ -145,11 +180,11 @@ internal sealed partial class DrainModel : IEventSet
         {
             WatchKind.TargetReached or WatchKind.SectionPasses or WatchKind.TankBrims => (at.Volume - watch.Value) / vessel.Capacity,
             WatchKind.InletUncovers => (at.Volume - line.UncoverVolume) / vessel.Capacity,
-            WatchKind.AirBreakUncovers => at.Surface - line.DrawOff.Line.AirBreak!.Value,
-            WatchKind.AirDrawn => at.Surface - line.SubmergedAbove(flow),
+            WatchKind.AirBreakUncovers => line.DrawOff.Line.AirBreak is { } hole ? at.Surface - hole : 1,
+            WatchKind.AirDrawn => line.DrawOff.Line.Inlet.AirDraw == AirDraw.Break ? at.Surface - line.SubmergedAbove(flow) : 1,
             WatchKind.MarginVanishes => FreeMargin(watch.Line, at, delivered, flow) / atmosphere,
             WatchKind.LiftExhausts => line.Margin(0, at.Surface, at.Gas) / line.SpecificWeight - run.SettledWithin,
-            WatchKind.HeadSettles => Unsettled(RestHead(line, at, delivered)),
+            WatchKind.HeadSettles => Unsettled(RestHead(line, at, delivered), line.Hydraulics.YieldHead),
             WatchKind.AllSettle => IsFed(at.Time) ? 1 : LargestHead(at, y) - run.SettledWithin,
             WatchKind.BoreUncovers => BoreCover(line.InletLimit(at.Surface), flow),
             WatchKind.OutletCovers => line.ReceiverSurface(delivered) - line.Hydraulics.OutletElevation,
@@ -177,12 +212,15 @@ internal sealed partial class DrainModel : IEventSet
         return Math.Abs(liquid) > Math.Abs(head) ? liquid : head;
     }
 
-    /// <summary>Whether something still runs in, now or later.</summary>
+    /// <summary>Whether something still runs in, now or later, or something is still to be done.</summary>
     private bool IsFed(double t) =>
-        now.Plant.Job.Inflow is { Points: [.., var last] } && (t < last.Time || last.Flow > 0);
+        t <= lastActTime || (now.Plant.Job.Inflow is { Points: [.., var last] } && (t < last.Time || last.Flow > 0));
 
-    /// <summary>The head above the settled head, m; the head itself, which changes its sign, where none is settled, which 0 says.</summary>
-    private double Unsettled(double head) => run.SettledWithin == 0 ? head : Math.Abs(head) - run.SettledWithin;
+    /// <summary>
+    /// The head above the yield head and the settled head, m; the head itself, which changes its sign, where neither is there.
+    /// </summary>
+    private double Unsettled(double head, double yield) =>
+        run.SettledWithin == 0 && yield == 0 ? head : Math.Abs(head) - yield - run.SettledWithin; // 0 says that there is none
 
     /// <summary>
     /// The margin in free flow, Pa; the flow of the dense output serves where it is free. Where the margin cannot vanish
@@ -203,9 +241,9 @@ internal sealed partial class DrainModel : IEventSet
 
     private double RegimeDistance(CompiledLine line, Watch watch, in Moment at, double delivered)
     {
-        double flow = line.Hydraulics.RegimeFlows[watch.Ordinal];
-        if (line.Hydraulics.IsShut)
+        if (line.Hydraulics.IsShut || watch.Ordinal >= line.Hydraulics.RegimeFlows.Count)
             return -1;
+        double flow = line.Hydraulics.RegimeFlows[watch.Ordinal];
         return now.Modes[watch.Line].IsLimited
             ? line.Margin(flow, at.Surface, at.Gas) / atmosphere
             : Math.Abs(line.Head(at.Surface, at.Gas, delivered)) - line.RegimeHeads[watch.Ordinal];
@@ -217,7 +255,7 @@ internal sealed partial class DrainModel : IEventSet
         for (int i = 0; i < LineCount; i++)
         {
             if (now.Modes[i].IsAtWork)
-                largest = Math.Max(largest, Math.Abs(RestHead(now.Plant.Lines[i], at, y[i])));
+                largest = Math.Max(largest, Math.Abs(RestHead(now.Plant.Lines[i], at, y[i])) - now.Plant.Lines[i].Hydraulics.YieldHead);
         }
 
         return largest;

@@ -85,6 +85,13 @@ public sealed record DrainResult
     /// <summary>What would let it go on; empty where nothing is needed or nothing helps.</summary>
     public IReadOnlyList<Remedy> Remedies { get; init; } = [];
 
+    /// <summary>The job as acts have made it by a time.</summary>
+    /// <param name="time">since the start, s</param>
+    public Job JobAt(double time) => PlantSource?.Invoke(time) ?? Job;
+
+    /// <summary>Finds the job as acts have made it.</summary>
+    internal Func<double, Job>? PlantSource { private get; init; }
+
     /// <summary>Looks for the events.</summary>
     internal Func<IReadOnlyList<DrainEvent>> EventSource { init => events = new(value); }
 

@@ -14,4 +14,13 @@ public enum RemedyKind
 
     /// <summary>The inlet lower.</summary>
     LowerInlet,
+
+    /// <summary>One more opening in the roof of the tank, or a wider one.</summary>
+    WidenVent,
+
+    /// <summary>Less inflow.</summary>
+    LessInflow,
+
+    /// <summary>A receiver that holds more, its walls carried on straight up.</summary>
+    HigherBrim,
 }

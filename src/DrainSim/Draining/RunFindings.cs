@@ -9,7 +9,7 @@ internal static class RunFindings
     /// <param name="model">the balance at its first instant</param>
     /// <param name="outcome">why not</param>
     public static DrainResult OfNoRun(DrainModel model, Outcome outcome) =>
-        Assemble(model, outcome, new RunHistory(model), [], new IntegrationCounters());
+        Assemble(model, outcome, new RunHistory(model), FirstActs(model), new IntegrationCounters());
 
     /// <summary>The result of a run.</summary>
     /// <param name="model">the balance, run to its end</param>
@@ -45,8 +45,9 @@ internal static class RunFindings
             LeastMarginNode = worst.LeastMarginNode,
             LargestFlow = lines.Length == 1 ? lines[0].LargestFlow : survey.Largest(i => i.Flow),
             LargestVelocity = lines.MaxBy(line => line.LargestVelocity.Value)!.LargestVelocity,
-            EventSource = () => AllEvents(model, outcome, trace, [.. passed, .. RunWatch.Submergences(model, survey)], last),
+            EventSource = () => AllEvents(model, outcome, trace, [.. passed, .. RunWatch.Submergences(model, survey), .. RunWatch.HoseRatings(model, survey)], last),
             Trace = trace,
+            PlantSource = time => model.EpochAt(time).Plant.Job,
             Prime = lines[0].Prime,
             SteadinessSource = () => survey.Steadiness(passed),
             Lines = lines,
@@ -82,7 +83,7 @@ internal static class RunFindings
 
     private static List<DrainEvent> PassedEvents(DrainModel model, IntegrationResult integration)
     {
-        var events = new List<DrainEvent>();
+        List<DrainEvent> events = FirstActs(model);
         foreach (LocatedEvent located in integration.Events)
         {
             Watch watch = model.Watches[located.Index];
@@ -90,6 +91,20 @@ internal static class RunFindings
             double volume = model.Volume(epoch, located.Time, located.State.AsSpan());
             if (RunWatch.CodeOf(model, epoch, watch, located) is var (code, number))
                 events.Add(new DrainEvent(located.Time, code, model.Job.Vessel.Level(volume), volume, number, watch.Line));
+        }
+
+        return events;
+    }
+
+    /// <summary>The acts that were done before the first instant.</summary>
+    private static List<DrainEvent> FirstActs(DrainModel model)
+    {
+        Job job = model.Job;
+        List<DrainEvent> events = [];
+        for (int i = 0; i < job.Timeline.Count; i++)
+        {
+            if (job.Timeline[i].IsDueAtStart(job.Level))
+                events.Add(new DrainEvent(0, EventCode.Act, job.Level, model.StartVolume, i + 1));
         }
 
         return events;

@@ -17,7 +17,7 @@ internal sealed class RunHistory
         : this(model)
     {
         this.trajectory = trajectory;
-        Knots = KnotsOf(trajectory, end);
+        Knots = KnotsOf(trajectory, end, [.. model.Epochs.Zip(model.Epochs.Skip(1)).Where(e => e.First.Plant != e.Second.Plant).Select(e => e.Second.From)]);
         Instants = [.. Knots.Select(t => t == end ? At(t) : Read(t))]; // the last step was cut short: its flow is solved anew
     }
 
@@ -71,7 +71,8 @@ internal sealed class RunHistory
     /// <summary>The run as its reader sees it.</summary>
     public Trace ToTrace() => new(Knots, At, Volume, Array.ConvertAll(Instants, instant => instant.Volume));
 
-    private static List<double> KnotsOf(Trajectory trajectory, double end)
+    /// <summary>The ends of the steps; behind an act the first instant of the changed plant too, where the flow is another one.</summary>
+    private static List<double> KnotsOf(Trajectory trajectory, double end, double[] acts)
     {
         var times = new List<double>(trajectory.StepCount + 1) { 0 };
         for (int i = 0; i < trajectory.StepCount; i++)
@@ -82,6 +83,12 @@ internal sealed class RunHistory
 
         if (end > 0)
             times.Add(end);
+        foreach (double act in acts.Where(act => act > 0 && act < end))
+        {
+            if (times.BinarySearch(Math.BitIncrement(act)) is < 0 and var place)
+                times.Insert(~place, Math.BitIncrement(act));
+        }
+
         return times;
     }
 }

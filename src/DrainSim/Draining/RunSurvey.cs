@@ -96,6 +96,37 @@ internal sealed class RunSurvey
             t => quantity(history.Level(t), history.Flows(t)[line]) / scale, from, to, 1e-12, 100, out double root) ? root : to;
     }
 
+    /// <summary>First time at which a quantity of the state falls to zero, s; null when it never does.</summary>
+    /// <param name="line">index of a line; looked at while it works</param>
+    /// <param name="quantity">the quantity of a state</param>
+    public double? FirstFall(int line, Func<Instant, double> quantity)
+    {
+        Instant[] instants = history.Instants;
+        double last = 0;
+        for (int i = 0; i < instants.Length && model.EpochAt(instants[i].Time).Modes[line].IsAtWork; i++)
+        {
+            double value = quantity(instants[i]);
+            if (value <= 0)
+            {
+                return i == 0 ? 0
+                    : Brent.TryFindRoot(t => quantity(history.Read(t)) / (last - value), instants[i - 1].Time, instants[i].Time, 1e-12, 100, out double root)
+                        ? root : instants[i].Time;
+            }
+
+            last = value;
+        }
+
+        return null;
+    }
+
+    /// <summary>Pressure at the low point of one line at a state, Pa absolute.</summary>
+    public double LowPointPressure(int line, Instant instant)
+    {
+        CompiledLine compiled = model.EpochAt(instant.Time).Plant.Lines[line];
+        double gas = instant.HeadspacePressure ?? model.Job.Site.AtmosphericPressure;
+        return compiled.Margin(FlowOf(instant, line), instant.Level, gas) + compiled.Threshold;
+    }
+
     /// <summary>The state at a time, with the flows of the dense output, and a quantity of it.</summary>
     public (Instant Instant, double Quantity) At(double time, Func<Instant, double> quantity)
     {

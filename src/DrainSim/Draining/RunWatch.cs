@@ -97,6 +97,22 @@ internal static class RunWatch
         }
     }
 
+    /// <summary>The moments at which the suction in each line passes what its hose stands.</summary>
+    public static IEnumerable<DrainEvent> HoseRatings(DrainModel model, RunSurvey survey)
+    {
+        for (int i = 0; i < model.LineCount; i++)
+        {
+            int index = i;
+            if (model.Epochs[0].Plant.Lines[index].DrawOff.Line.VacuumRating is not { } rating)
+                continue;
+            double least = model.Job.Site.AtmosphericPressure - rating;
+            if (survey.FirstFall(index, instant => survey.LowPointPressure(index, instant) - least) is not { } time)
+                continue;
+            (Instant at, _) = survey.At(time, _ => 0);
+            yield return new DrainEvent(time, EventCode.HoseRatingPassed, at.Level, at.Volume, rating, index);
+        }
+    }
+
     /// <summary>Level at which the last inflow and the outflow balance, m; null where there is none within the tank.</summary>
     public static double? BalanceLevel(DrainModel model)
     {
@@ -127,6 +143,8 @@ internal static class RunWatch
         bool siphons = model.Epochs[0].Plant.Lines.Any(line => line.Hydraulics.RisesAboveInlet);
         Add(WarningCode.ThinMargin, result.LeastMargin.Value,
             siphons && result.StoppedAt > 0 && result.LeastMargin.Value is > Touching and < ThinMargin);
+        double differs = TurbulentYield.ShareLess(model.Epochs[0].Plant.Lines[0], job, result.Lines[0].LargestFlow.Value);
+        Add(WarningCode.FrictionDiffers, differs, differs > 0);
         double vacuum = result.LargestVacuum?.Value ?? 0;
         Add(WarningCode.VacuumRatingPassed, vacuum, vacuum > job.VacuumRating);
         double over = result.LargestVacuum is null ? 0 : survey.Largest(i => i.HeadspacePressure!.Value - job.Site.AtmosphericPressure).Value;

@@ -42,18 +42,25 @@ public static class Simulation
     {
         Plant plant = Compile(job);
         double gas = StartGas(plant);
-        NoStart? refusal = StartCheck.Refusal(job, plant.Lines[0], gas);
+        NoStart? refusal = StartCheck.Refusal(plant.Job, plant.Lines[0], gas);
         var model = new DrainModel(plant, StartModes(plant));
         Span<double> start = stackalloc double[model.Dimension];
         model.StartState(start);
-        return new FirstInstant(model.At(0, start), refusal, StartCheck.Prime(job, plant.Lines[0]));
+        return new FirstInstant(model.At(0, start), refusal, StartCheck.Prime(plant.Job, plant.Lines[0]));
     }
 
     private static Plant Compile(Job job)
     {
         ArgumentNullException.ThrowIfNull(job);
         Require.Within(job.Level, 0, job.Vessel.Height, "level", "m");
-        return new Plant(job);
+        return new Plant(job.Timeline.Any(act => act.IsDueAtStart(job.Level)) ? AfterFirstActs(job) : job);
+    }
+
+    /// <summary>The job with the acts done that are due before the first instant; they stay in the timeline, for the record.</summary>
+    private static Job AfterFirstActs(Job job)
+    {
+        Job start = job with { Timeline = [.. job.Timeline.Select(act => act with { Before = act.Before ?? job })] };
+        return start.Timeline.Where(act => act.IsDueAtStart(job.Level)).Aggregate(start, (sofar, act) => act.ChangeOf(sofar, start));
     }
 
     /// <summary>How each line works at the first instant: free, held at its threshold, or ended before it began.</summary>
@@ -81,7 +88,8 @@ public static class Simulation
     private static Outcome? AtRest(Plant plant, LineMode[] modes)
     {
         Job job = plant.Job;
-        if (job.Level <= job.Run.SettledWithin && plant.Lines.All(l => l.Hydraulics.InletElevation <= job.Run.SettledWithin))
+        bool mayRise = job.Inflow is not null || job.Timeline.Any();
+        if (!mayRise && job.Level <= job.Run.SettledWithin && plant.Lines.All(l => l.Hydraulics.InletElevation <= job.Run.SettledWithin))
             return Outcome.Emptied;
         if (job.Level <= job.Run.StopAtLevel || plant.Vessel.Volume(job.Level) <= job.Run.StopAtVolume)
             return Outcome.TargetReached;

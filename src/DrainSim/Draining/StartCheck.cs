@@ -12,12 +12,16 @@ internal static class StartCheck
     public static NoStart? Refusal(Job job, CompiledLine line, double gas)
     {
         double head = line.Head(job.Level, gas, delivered: 0);
+        // A drain that the liquid may yet rise to, or that is yet to be changed, waits; a siphon cannot.
+        bool waits = line.HasTail && (job.Inflow is not null || job.Timeline.Any());
         bool runsBack = head < -job.Run.SettledWithin && line.IsSubmerged(0);
         return line switch
         {
             { Hydraulics.IsShut: true } when !job.Timeline.Any() => NoStart.ValveShut,
+            _ when waits => null,
             _ when job.Level <= line.Hydraulics.InletElevation => NoStart.InletAboveLevel,
             _ when !runsBack && head <= job.Run.SettledWithin => NoStart.NoDrivingHead,
+            _ when line.Hydraulics.YieldHead > 0 && line.MovingHead(job.Level, gas, 0) <= job.Run.SettledWithin => NoStart.YieldHolds,
             _ when line.Margin(0, job.Level, gas) <= 0 => NoStart.LiftBeyondLimit,
             _ => null,
         };

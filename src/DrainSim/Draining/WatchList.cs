@@ -15,17 +15,18 @@ internal static class WatchList
         if (target is { } volume)
             watches.Add(new Watch(WatchKind.TargetReached, Value: volume));
         for (int i = 0; i < plant.Lines.Length; i++)
-            watches.AddRange(OfLine(plant.Lines[i], i));
+            watches.AddRange(OfLine(plant.Job, plant.Lines[i], i));
         watches.AddRange(OfTank(plant.Job, plant.Lines.Length, plant.Gas));
         return [.. watches];
     }
 
-    private static IEnumerable<Watch> OfLine(CompiledLine line, int index)
+    private static IEnumerable<Watch> OfLine(Job job, CompiledLine line, int index)
     {
+        Line[] asItBecomes = [.. job.Timeline.Select(act => act.After).Prepend(job).Select(plant => plant.DrawOffs[index].Line)];
         yield return new(WatchKind.InletUncovers, index);
-        if (line.DrawOff.Line.AirBreak is not null)
+        if (asItBecomes.Any(own => own.AirBreak is not null))
             yield return new(WatchKind.AirBreakUncovers, index);
-        if (line.DrawOff.Line.Inlet.AirDraw == AirDraw.Break)
+        if (asItBecomes.Any(own => own.Inlet.AirDraw == AirDraw.Break))
             yield return new(WatchKind.AirDrawn, index);
         yield return new(WatchKind.MarginVanishes, index);
         if (line.HoldsAtVapour)
@@ -45,23 +46,28 @@ internal static class WatchList
 
     private static IEnumerable<Watch> OfTank(Job job, int lines, GasLaw gas)
     {
-        if (lines > 1 || job.Inflow is not null)
+        if (lines > 1 || job.Timeline.Select(act => act.After).Append(job).Any(plant => plant.Inflow is not null))
             yield return new(WatchKind.AllSettle);
         foreach (double level in job.Vessel.SectionLevels)
             yield return new(WatchKind.SectionPasses, Value: job.Vessel.Volume(level));
-        if (gas.IsConfined && job.VacuumRating is not null)
+        bool isConfined = gas.IsConfined || job.Timeline.Any(act => act.After.Headspace is Gas.ConfinedHeadspace);
+        if (isConfined && job.VacuumRating is not null)
             yield return new(WatchKind.VacuumRatingPasses);
-        if (gas.IsConfined && job.PressureRating is not null)
+        if (isConfined && job.PressureRating is not null)
             yield return new(WatchKind.PressureRatingPasses);
-        if (job.Inflow is { } inflow)
+        Inflow[] inflows = [.. job.Timeline.Select(act => act.After).Prepend(job).Select(plant => plant.Inflow).OfType<Inflow>()];
+        if (inflows.Length > 0)
         {
             yield return new(WatchKind.FlowsBalance);
             yield return new(WatchKind.TankBrims, Value: job.Vessel.Capacity);
-            foreach ((double time, _) in inflow.Points.Where(p => p.Time > 0))
+            foreach (double time in inflows.SelectMany(inflow => inflow.Points).Select(p => p.Time).Where(time => time > 0).Distinct())
                 yield return new(WatchKind.InflowTurns, Value: time);
         }
 
         for (int j = 0; j < job.Timeline.Count; j++)
-            yield return new(WatchKind.ActFalls, 0, j);
+        {
+            if (!job.Timeline[j].IsDueAtStart(job.Level))
+                yield return new(WatchKind.ActFalls, 0, j);
+        }
     }
 }

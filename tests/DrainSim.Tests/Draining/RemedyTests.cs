@@ -58,6 +58,38 @@ public sealed class RemedyTests
     [Fact]
     public void A_job_that_is_done_needs_no_remedy() => Assert.Empty(Find(Jobs.Siphon()));
 
+    [Fact]
+    public void A_tank_held_by_its_vacuum_is_let_go_by_a_vent_that_keeps_its_rating()
+    {
+        Job held = Jobs.OrificeDrain() with { Headspace = new DrainSim.Gas.ClosedHeadspace(), VacuumRating = 500 };
+        Remedy remedy = Assert.Single(Find(held));
+        Assert.Equal((RemedyKind.WidenVent, Outcome.Emptied), (remedy.Kind, remedy.ProvedOutcome));
+        // Air let in at the flow of the liquid: Q = Cd·a·√(2·Δp/ρ), incompressible, ρ of air at 20 °C by the ideal gas law.
+        double flow = Jobs.OrificeFactor() * Math.Sqrt(3), density = 101325 / (287.05 * 293.15);
+        double area = flow / (0.61 * Math.Sqrt(2 * 500 / density));
+        Assert.Equal(Math.Sqrt(4 * area / Math.PI), remedy.Value, 0.03 * remedy.Value); // the flow itself falls by the vacuum
+    }
+
+    [Fact]
+    public void A_fed_tank_is_let_empty_by_an_inflow_that_its_line_keeps_up_with()
+    {
+        DrainResult fed = Jobs.Run(Jobs.Siphon() with { Inflow = Inflow.Constant(2.4e-3) });
+        Assert.Equal(Outcome.Balanced, fed.Outcome);
+        Remedy remedy = Assert.Single(RemedySearch.Find(fed, TestContext.Current.CancellationToken));
+        Assert.Equal((RemedyKind.LessInflow, Outcome.InletUncovered), (remedy.Kind, remedy.ProvedOutcome));
+        Assert.Equal(fed.Warnings.Single(w => w.Code == WarningCode.NeverEmpties).Number, remedy.Value, 4e-3 * remedy.Value);
+    }
+
+    [Fact]
+    public void A_receiver_that_is_full_is_mended_by_a_higher_brim()
+    {
+        ReceivingTank tank = new() { Vessel = Jobs.Prism(4, 1), Bottom = -4 };
+        Job full = Jobs.OrificeDrain() with { DrawOffs = [new DrawOff { Line = Jobs.Orifice(0.05, 0.6), Receiver = tank }] };
+        Remedy remedy = Assert.Single(Find(full));
+        Assert.Equal((RemedyKind.HigherBrim, Outcome.Emptied), (remedy.Kind, remedy.ProvedOutcome));
+        Assert.Equal(0.5, remedy.Change, 2e-3); // 6 m³ into 4 m²
+    }
+
     private static IReadOnlyList<Remedy> Find(Job job) =>
         RemedySearch.Find(Jobs.Run(job), TestContext.Current.CancellationToken);
 

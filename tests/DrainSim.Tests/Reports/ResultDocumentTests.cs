@@ -10,7 +10,7 @@ public sealed class ResultDocumentTests
     [Fact]
     public void The_top_level_keys_are_the_approved_ones() => Assert.Equal(
         [
-            "title", "drainsim", "outcome", "reason", "sentence", "stopped_at_s", "initial_volume_m3",
+            "title", "drainsim", "outcome", "reason", "sentence", "begins", "stopped_at_s", "stopped_at_clock", "initial_volume_m3",
             "drained_volume_m3", "left_volume_m3", "final_level_m",
             "least_low_point_pressure_Pa", "least_low_point_pressure_at_s", "least_margin_Pa", "least_margin_at_s",
             "least_margin_node", "largest_flow_m3_s", "largest_flow_at_s", "largest_velocity_m_s",
