@@ -50,7 +50,7 @@ internal sealed class SizeFiles(SizePlan plan, SizingResult result, IReadOnlyLis
     private SweepReport Report(string csv)
     {
         var unit = plan.Parameter.Unit!;
-        bool isLogarithmic = result.From > 0 && result.To > 4 * result.From && unit.Offset == 0;
+        bool isLogarithmic = result.From > 0 && result.To > 3 * result.From && unit.Offset == 0;
         (SweepRow Row, double Value)[] rows = [.. SweepRows.ReadText(csv, 2)
             .Select(row => (row, NumberText.TryRead(row.Parameters[1], out double value) ? value : 0))
             .Where(row => row.Item1.Parameters[0] is "looked_at" or "found")
@@ -64,8 +64,13 @@ internal sealed class SizeFiles(SizePlan plan, SizingResult result, IReadOnlyLis
             Points = [.. rows.Select(row => new SweepPoint([unit.FromSi(row.Value)], row.Row))],
             TargetTime = target.Quantity == ResultQuantity.DrainTime ? target.Value : null,
             TargetMargin = target.Quantity == ResultQuantity.LeastMargin ? target.Value : null,
+            Marks =
+            [
+                .. result.Values.Select(value => (unit.FromSi(value.Value), SizeWording.Value(plan, value.Value, 4), true)),
+                .. standard.Select(size => (unit.FromSi(size.Size.Bore), size.Size.Id, false)),
+            ],
             Units = units,
-            Subtitle = string.Join(" ", SizeWording.Lines(plan, result, units)),
+            Subtitle = SizeWording.Brief(plan, result, units),
         };
     }
 }

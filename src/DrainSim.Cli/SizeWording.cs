@@ -22,6 +22,16 @@ internal static class SizeWording
             yield return string.Create(CultureInfo.InvariantCulture, $"There are {result.Values.Count} of them; give the range with --between to choose.");
     }
 
+    /// <summary>What was asked for and the values found, in one line.</summary>
+    public static string Brief(SizePlan plan, SizingResult result, UnitSystem units)
+    {
+        var format = new MeasureFormat(units);
+        string asked = $"{plan.Parameter.Path} for {TargetText(result.Target, format)}: ";
+        return asked + (result.Values.Count == 0
+            ? Nothing(result, format)
+            : string.Join(", ", result.Values.Select(value => Value(plan, value.Value, 4) + (value.IsJump ? " (a jump)" : ""))) + ".");
+    }
+
     /// <summary>A value of the parameter in the unit that people wrote.</summary>
     /// <param name="plan">the sizing</param>
     /// <param name="si">the value in SI</param>

@@ -90,7 +90,7 @@ internal sealed class SweepFigure(SweepCases cases, UnitSystem units)
         {
             cases.Read(point.Row.Case - 1, values);
             if (reader.Read(values).Job is { } job && Simulation.Run(job, cancellation) is { StoppedAt: > 0 } result)
-                courses.Add((values[0].Shown, result));
+                courses.Add((values[0].Brief, result));
         }
 
         return courses;

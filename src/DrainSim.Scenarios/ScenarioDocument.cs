@@ -97,6 +97,9 @@ public sealed class ScenarioDocument
     /// <summary>What stands at a dotted path; null when nothing does.</summary>
     internal Node? Find(string path) => root is null ? null : ParameterPath.Find(root, path);
 
+    /// <summary>The path as the reading calls it.</summary>
+    internal string WholePath(string path) => root is null ? path : ParameterPath.Whole(root, path);
+
     /// <summary>The block of a study; what is wrong with its form is a problem.</summary>
     internal StudyBlock StudyBlock(string key, List<Problem> found)
     {

@@ -7,6 +7,8 @@ public sealed class HelpTests
     [InlineData("")]
     [InlineData("run")]
     [InlineData("check")]
+    [InlineData("sweep")]
+    [InlineData("size")]
     [InlineData("uncertainty")]
     [InlineData("forecast")]
     [InlineData("new")]

@@ -30,7 +30,7 @@ internal sealed class SizeCommand : ExplainedCommand
         HelpName = "from..to",
     };
 
-    public SizeCommand() : base("size", "Finds the value of a parameter that meets a drain time, a heel, a margin or the limits.")
+    public SizeCommand() : base("size", "Finds the value of a parameter that meets a drain time, a heel or a margin.")
     {
         study.AddTo(this, parameter, target, between);
         SetAction(SizeAsync);

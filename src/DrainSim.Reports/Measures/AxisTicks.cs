@@ -47,13 +47,13 @@ internal sealed class AxisTicks
     public static AxisTicks Decimal(double least, double most, int count) =>
         new(least, most, DecimalStep((most - least) / count));
 
-    /// <summary>Ticks at 1, 2 and 5 times the powers of ten, on an axis of the values' decimal logarithms.</summary>
+    /// <summary>Ticks at a few multiples of the powers of ten, on an axis of the values' decimal logarithms.</summary>
     /// <param name="least">logarithm at the lower end of the axis</param>
     /// <param name="most">logarithm at the upper end</param>
     public static AxisTicks Logarithmic(double least, double most)
     {
         double[] values = [.. from power in Enumerable.Range((int)Math.Floor(least), (int)(Math.Ceiling(most) - Math.Floor(least)) + 1)
-            from digit in most - least > 3 ? (int[])[1] : [1, 2, 5]
+            from digit in most - least > 3 ? (double[])[1] : most - least > 1 ? [1, 2, 5] : [1, 1.5, 2, 3, 4, 5, 6, 8]
             let value = digit * Math.Pow(10, power)
             where Math.Log10(value) >= least - 1e-9 && Math.Log10(value) <= most - HeadRoom * (most - least)
             select value];

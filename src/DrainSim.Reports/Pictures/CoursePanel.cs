@@ -27,19 +27,26 @@ internal static class CoursePanel
         panel.Draw(sheet);
         PageText.RowTitle(sheet, frame, $"Level in the tank, {unit.Sign}");
         PageText.AxisTitle(sheet, frame, $"time since the start, {axis.Unit.Sign}");
-        var notes = new Notes(sheet, panel);
-        foreach ((_, double[] xs, double[] ys, _) in curves)
+        foreach ((_, double[] xs, double[] ys, SKColor color) in curves)
         {
-            notes.KeepClearOf(xs, ys);
+            sheet.Dot(panel.At(xs[^1], ys[^1]), 5, color);
         }
-        foreach ((string name, double[] xs, double[] ys, SKColor color) in curves)
+        WriteNames(sheet, report, frame, curves);
+    }
+
+    /// <summary>Lists the curves at the upper right, which falling levels leave free.</summary>
+    private static void WriteNames(Sheet sheet, SweepReport report, SKRect frame, (string Name, double[] Xs, double[] Ys, SKColor Color)[] curves)
+    {
+        TextLook look = PageText.Note(Palette.Ink);
+        float width = curves.Max(curve => Sheet.Measure(curve.Name, look));
+        float left = frame.Right - width - 12, y = frame.Top + look.LineHeight;
+        string title = report.Axes[0].Name;
+        sheet.Text(title, frame.Right - 12 - Sheet.Measure(title, look), y, look, halo: true);
+        foreach ((string name, _, _, SKColor color) in curves)
         {
-            SKPoint end = panel.At(xs[^1], ys[^1]);
-            sheet.Dot(end, 5, color);
-            if (!notes.Add(end, PageText.Note(color), 60, true, name))
-            {
-                notes.AddAlong(xs, ys, PageText.Note(color), name);
-            }
+            y += look.LineHeight;
+            sheet.Line(new SKPoint(left - 46, y - 7), new SKPoint(left - 12, y - 7), color, 4);
+            sheet.Text(name, left, y, look, halo: true);
         }
     }
 

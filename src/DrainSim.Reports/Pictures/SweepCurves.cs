@@ -8,7 +8,7 @@ namespace DrainSim.Reports.Pictures;
 internal sealed class SweepCurves
 {
     /// <summary>Points up to which each gets a dot.</summary>
-    private const int MostDots = 60;
+    private const int MostDots = 30;
 
     private readonly Sheet sheet;
     private readonly SweepReport report;
@@ -50,6 +50,7 @@ internal sealed class SweepCurves
         MarkStretches(panel, frame);
         Notes notes = DrawCurve(panel, times, unit, Palette.Liquid);
         PageText.RowTitle(sheet, frame, $"Drain time, {unit.Sign}");
+        MarkValues(panel, notes, times, unit);
         NameStretches(panel, notes);
         if (report.TargetTime is { } target)
         {
@@ -129,6 +130,41 @@ internal sealed class SweepCurves
             float x = panel.At(Before(from), 0).X, end = panel.At(Behind(to), 0).X;
             sheet.Fill(new SKRect(x, frame.Top, end, frame.Bottom), Palette.Undone);
         }
+    }
+
+    /// <summary>Draws a line at each value found, and a dot on the curve at each standard one beside it.</summary>
+    private void MarkValues(Panel panel, Notes notes, double?[] values, Unit unit)
+    {
+        foreach ((double value, _, _) in report.Marks.Where(mark => mark.IsFound))
+        {
+            float x = panel.At(axis.At(value), 0).X;
+            sheet.Line(new SKPoint(x, panel.Frame.Top), new SKPoint(x, panel.Frame.Bottom), Palette.Limit, 2.5f, 3, 5);
+            notes.KeepClearOf(x);
+        }
+        foreach ((double value, string name, bool isFound) in report.Marks.OrderByDescending(mark => mark.IsFound))
+        {
+            if (isFound)
+            {
+                SKPoint top = new(panel.At(axis.At(value), 0).X, panel.Frame.Top + 0.12f * panel.Frame.Height);
+                notes.Add(top, PageText.Note(Palette.Limit), 300, true, name);
+            }
+            else if (On(values, axis.At(value)) is { } known)
+            {
+                SKPoint at = panel.At(axis.At(value), unit.From(known));
+                sheet.Dot(at, 6, Palette.Ink);
+                notes.KeepClearOf(at, 7);
+                notes.Add(at, PageText.Note(Palette.Ink), 400, false, name);
+            }
+        }
+    }
+
+    /// <summary>The value of the curve at a place between its points; null in a gap.</summary>
+    private double? On(double?[] values, double place)
+    {
+        int next = Array.FindIndex(places, one => one >= place);
+        return next > 0 ? values[next - 1] + (values[next] - values[next - 1]) * (place - places[next - 1]) / (places[next] - places[next - 1])
+            : next == 0 && places[0] == place ? values[0]
+            : null;
     }
 
     private void NameStretches(Panel panel, Notes notes)

@@ -36,9 +36,9 @@ internal sealed class SweepMap
     public void Draw(SKRect room)
     {
         float height = room.Height / 2;
-        DrawMap(new SKRect(room.Left, room.Top + 44, room.Right - 40, room.Top + height - 66), "Drain time",
+        DrawMap(new SKRect(room.Left, room.Top + 44, room.Right - 40, room.Top + height - 84), "Drain time",
             point => point.Row.DrainTime, MeasureFormat.Duration, Palette.Liquid);
-        DrawMap(new SKRect(room.Left, room.Top + height + 44, room.Right - 40, room.Bottom - 66), "Least margin at the low point",
+        DrawMap(new SKRect(room.Left, room.Top + height + 44, room.Right - 40, room.Bottom - 70), "Least margin at the low point",
             point => point.Row.LeastMargin, format.Pressure, Palette.Pressure);
     }
 

@@ -43,6 +43,14 @@ internal static class PlantFindings
         json.WriteNumber("least_margin_Pa", line.LeastMargin.Value);
         json.WriteNumber("largest_flow_m3_s", line.LargestFlow.Value);
         json.WriteNumber("largest_velocity_m_s", line.LargestVelocity.Value);
+        if (line.YieldHead is { } yield)
+        {
+            json.WriteNumber("yield_head_m", yield);
+        }
+        else
+        {
+            json.WriteNull("yield_head_m");
+        }
         if (line.ReceiverLevel is { } depth)
         {
             json.WriteNumber("receiver_level_m", depth);

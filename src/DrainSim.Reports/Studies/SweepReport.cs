@@ -27,6 +27,9 @@ public sealed record SweepReport
     /// <summary>Value of the margin that is asked for, Pa; null where none is.</summary>
     public double? TargetMargin { get; init; }
 
+    /// <summary>Values of the one parameter that are worth naming, in the axis's unit; those found stand out.</summary>
+    public IReadOnlyList<(double Value, string Name, bool IsFound)> Marks { get; init; } = [];
+
     /// <summary>Units for people.</summary>
     public UnitSystem Units { get; init; } = UnitSystem.Metric;
 

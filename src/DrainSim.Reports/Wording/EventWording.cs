@@ -31,7 +31,7 @@ public static class EventWording
         EventCode.Act => job.Timeline[(int)moment.Number - 1].Text,
         EventCode.AirBreak => "the vent on the line lets air in",
         EventCode.VacuumHeld => "the vacuum in the headspace holds the liquid up",
-        EventCode.YieldHeld => "the head no longer moves the liquid",
+        EventCode.YieldHeld => "the liquid's yield stress holds it",
         EventCode.Balanced => "as much runs in as out",
         EventCode.ReceiverFull => "the receiver is full to its brim",
         EventCode.Overflowed => "the tank overflows",
@@ -72,6 +72,9 @@ public static class EventWording
             + "gas from the liquid may gather at the crest (low confidence).",
         WarningCode.NeverEmpties =>
             $"The line keeps up with an inflow of at most {format.Flow(warning.Number)} down to the inlet; this one is more.",
+        WarningCode.FrictionDiffers =>
+            "The flow of a liquid with a yield stress is turbulent here, and the published forms differ: by one of them the friction is up to "
+            + $"{MeasureFormat.Percent(warning.Number)} less, and the job shorter.",
         WarningCode.ThinMargin =>
             $"At the worst moment only {format.Pressure(warning.Number)} is left at the low point. "
             + "Warmer liquid, a lower barometer or a rise in the hose would use it up.",

@@ -46,6 +46,7 @@ public static class ReportCodes
     {
         NoStart.InletAboveLevel => "inlet_above_level",
         NoStart.NoDrivingHead => "no_driving_head",
+        NoStart.YieldHolds => "yield_holds",
         NoStart.LiftBeyondLimit => "lift_beyond_limit",
         NoStart.NoPrime => "no_prime",
         NoStart.ValveShut => "valve_shut",
@@ -64,6 +65,7 @@ public static class ReportCodes
         WarningCode.HoseMayFlatten => "hose_may_flatten",
         WarningCode.GasMayGather => "gas_may_gather",
         WarningCode.NeverEmpties => "never_empties",
+        WarningCode.FrictionDiffers => "friction_differs",
         WarningCode.ThinMargin => "thin_margin",
         _ => throw new UnreachableException(code.ToString()),
     };

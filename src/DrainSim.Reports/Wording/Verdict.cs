@@ -46,14 +46,15 @@ public static class Verdict
                 $"{stops}: at {level} the low point reaches {LimitName(result.Job)} and the column parts.",
             Outcome.AirBreak => $"{stops}: at {level} the vent on the line lets air in.",
             Outcome.VacuumHeld => $"{stops}: at {level} the vacuum in the headspace holds the liquid up.",
-            Outcome.YieldHeld => $"{stops}: at {level} the head no longer moves the liquid.",
+            Outcome.YieldHeld => $"{stops}: at {level} the liquid's yield stress holds it{YieldHead(result, format)}.",
             Outcome.Balanced => $"Never empties: after {time} as much runs in as out, at {level}, with {left} in the tank.",
             Outcome.ReceiverFull => $"{stops}: at {level} the receiver is full to its brim.",
             Outcome.Overflowed => $"Overflows after {time}: more runs in than the line carries.",
             Outcome.Levelled => $"{stops}: at {level} it stands level with {FarEnd(result.Job, result.ReceiverLevel)}.",
             Outcome.TargetReached => Target(result, format, time),
             Outcome.TimeLimit => $"Not done after {time}, the longest time given: {left} left, at {level}.",
-            Outcome.NeverStarted => $"Never starts: {Reason(result.Job, result.NoStart, result.Prime, format)}.",
+            Outcome.NeverStarted => $"Never starts: {Reason(result.Job, result.NoStart, result.Prime, format)}"
+                + $"{(result.NoStart == NoStart.YieldHolds ? YieldHead(result, format) : "")}.",
             _ => throw new UnreachableException(result.Outcome.ToString()),
         };
 
@@ -108,6 +109,7 @@ public static class Verdict
                 $"the inlet, at {format.Length(job.Line.Inlet.Elevation)}, stands above the level of {level}",
             NoStart.NoDrivingHead =>
                 $"{FarEnd(job)}, at {format.Length(FarElevation(job))}, stands no lower than the level of {level}",
+            NoStart.YieldHolds => $"the liquid's yield stress holds it at the level of {level}",
             NoStart.LiftBeyondLimit when prime is not null =>
                 $"the crest stands {format.Length(prime.StaticLift)} above the level, "
                 + $"and no column higher than {format.Length(prime.LiftLimit)} holds together",
@@ -118,6 +120,11 @@ public static class Verdict
             _ => throw new UnreachableException(reason.ToString()),
         };
     }
+
+    private static string YieldHead(DrainResult result, MeasureFormat format) =>
+        result.Lines.Select(line => line.YieldHead).Max() is { } head
+            ? $"; it takes a head of more than {format.Length(head)} to move it"
+            : "";
 
     private static double FarElevation(Job job)
     {

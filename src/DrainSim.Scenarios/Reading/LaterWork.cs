@@ -5,7 +5,6 @@ internal static class LaterWork
 {
     private static readonly Dictionary<string, string> Keys = new()
     {
-        ["liquid.rheology"] = "Give the viscosity of a Newtonian liquid",
         ["line.start"] = "The line counts as primed",
     };
 

@@ -13,8 +13,9 @@ internal static class LiquidReader
     /// <summary>The liquid; null when it is refused.</summary>
     public static Liquid? Read(BlockReader block)
     {
-        bool hasNumbers = OwnNumbers.Any(block.Has);
-        Liquid? liquid = block.Has("name") && !hasNumbers ? ByName(block) : ByNumbers(block, hasNumbers);
+        Rheology? rheology = RheologyReader.Read(block);
+        bool hasNumbers = OwnNumbers.Any(block.Has) || rheology is not Newtonian;
+        Liquid? liquid = block.Has("name") && !hasNumbers ? ByName(block) : ByNumbers(block, hasNumbers, rheology);
         block.Finish();
         return liquid;
     }
@@ -44,7 +45,7 @@ internal static class LiquidReader
         return strength is not null && row.At(temperature, strength).IsRefused ? "strength" : "reid_vapour_pressure";
     }
 
-    private static Liquid? ByNumbers(BlockReader block, bool hasNumbers)
+    private static Liquid? ByNumbers(BlockReader block, bool hasNumbers, Rheology? rheology)
     {
         if (!hasNumbers)
         {
@@ -55,14 +56,12 @@ internal static class LiquidReader
         string name = block.Word("name") ?? "liquid";
         double temperature = block.AmountOr("temperature", Quantities.Temperature, Allowed.Positive, 293.15, "20 degC");
         double? density = block.Needed("density", Quantities.Density, Allowed.Positive);
-        string? given = block.OnlyOne("Give one of the two", "viscosity", "kinematic_viscosity");
-        double? viscosity = block.Amount("viscosity", Quantities.Viscosity, Allowed.Positive);
-        double? kinematic = block.Amount("kinematic_viscosity", Quantities.KinematicViscosity, Allowed.Positive);
+        double? viscosity = rheology is Newtonian ? Viscosity(block, density) : ApparentViscosity(block, rheology);
         double? vapour = block.Needed("vapour_pressure", Quantities.Pressure, Allowed.NotNegative);
         if (name != "liquid" && LiquidLibrary.Find(name) is { } known)
             block.Warn("name", $"the numbers given here stand, not those of the built-in {known.Id}", "Leave them out to use the built-in liquid");
-        Judge(block, density, viscosity ?? kinematic * density);
-        if (density is not { } rho || (viscosity ?? kinematic * rho) is not { } mu || vapour is not { } pv || given is null)
+        Judge(block, density, rheology is Newtonian ? viscosity : null);
+        if (density is not { } rho || viscosity is not { } mu || vapour is not { } pv || rheology is null)
             return null;
         return block.Build(() => new Liquid
         {
@@ -70,9 +69,32 @@ internal static class LiquidReader
             Temperature = temperature,
             Density = rho,
             Viscosity = mu,
+            Rheology = rheology,
             VapourPressure = pv,
             Hazards = temperature >= LiquidAt.HotFrom ? LiquidHazards.Hot : LiquidHazards.None,
         });
+    }
+
+    private static double? Viscosity(BlockReader block, double? density)
+    {
+        string? given = block.OnlyOne("Give one of the two", "viscosity", "kinematic_viscosity");
+        double? viscosity = block.Amount("viscosity", Quantities.Viscosity, Allowed.Positive);
+        double? kinematic = block.Amount("kinematic_viscosity", Quantities.KinematicViscosity, Allowed.Positive);
+        return given is null ? null : viscosity ?? kinematic * density;
+    }
+
+    /// <summary>Shear rate at which a liquid that is not Newtonian is told to people, 1/s; common practice, no source.</summary>
+    private const double ShearRate = 100;
+
+    private static double? ApparentViscosity(BlockReader block, Rheology? rheology)
+    {
+        foreach (string key in (ReadOnlySpan<string>)["viscosity", "kinematic_viscosity"])
+        {
+            if (block.Has(key) && rheology is not null)
+                block.Refuse(key, "belongs to a Newtonian liquid", "Leave it out: the rheology says how the liquid flows");
+        }
+
+        return rheology?.Curve(1).ApparentViscosity(ShearRate);
     }
 
     /// <summary>Warns of numbers that no liquid of a yard has; common practice, no source.</summary>

@@ -47,7 +47,7 @@ internal static class ParameterPath
     public static Node? Find(BlockNode root, string path)
     {
         Node? node = root;
-        foreach (string step in StepsOf(path))
+        foreach (string step in StepsOf(Whole(root, path)))
         {
             node = node switch
             {
@@ -63,11 +63,16 @@ internal static class ParameterPath
     /// <summary>The tree with one value set; missing keys are added. Null when the path leads nowhere.</summary>
     public static BlockNode? Set(BlockNode root, string path, string text)
     {
-        string[] steps = StepsOf(path);
-        // What a tank is fitted with may be called without the tank.
-        if (steps[0] is "headspace" or "inflow" && root.Find(steps[0]) is null)
-            steps = ["tank", .. steps];
+        string[] steps = StepsOf(Whole(root, path));
         return steps.Any(step => step.Length == 0) ? null : Set(root, steps, text) as BlockNode;
+    }
+
+    /// <summary>The path as the reading calls it: what a tank is fitted with may be called without the tank.</summary>
+    public static string Whole(BlockNode root, string path)
+    {
+        int end = path.IndexOf('.', StringComparison.Ordinal);
+        string first = end < 0 ? path : path[..end];
+        return first is "headspace" or "inflow" && root.Find(first) is null ? "tank." + path : path;
     }
 
     private static string[] StepsOf(string path) => path.Replace("[", ".[", StringComparison.Ordinal).Split('.');

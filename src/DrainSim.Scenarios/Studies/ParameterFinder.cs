@@ -27,12 +27,13 @@ internal sealed class ParameterFinder
     /// <param name="samples">texts that it is to be set to</param>
     public StudyParameter? Find(string path, IReadOnlyList<string> samples)
     {
-        UnderstoodValue? value = known.GetValueOrDefault(path);
+        string whole = document.WholePath(path);
+        UnderstoodValue? value = known.GetValueOrDefault(whole);
         for (int i = 0; i < samples.Count && value is null; i++)
         {
             ScenarioReading tried = document.With(path, samples[i]).Read();
-            value = tried.Understood.FirstOrDefault(understood => understood.Path == path && !understood.IsDefault);
-            if (value is null && tried.Problems.FirstOrDefault(problem => IsOfPath(problem, path)) is { } fault)
+            value = tried.Understood.FirstOrDefault(understood => understood.Path == whole && !understood.IsDefault);
+            if (value is null && tried.Problems.FirstOrDefault(problem => IsOfPath(problem, whole)) is { } fault)
                 return Refuse(path, fault);
         }
 
@@ -41,7 +42,7 @@ internal sealed class ParameterFinder
         if (value.Unit is null)
             return new StudyParameter(path, null, null, null);
         Quantity quantity = Quantities.All.First(one => one.SiUnit == value.Unit);
-        bool isOfFile = known.ContainsKey(path);
+        bool isOfFile = known.ContainsKey(whole);
         Unit unit = ValueList.UnitOf(samples.Count > 0 ? samples[0] : value.Written, quantity);
         return new StudyParameter(path, quantity, unit, isOfFile ? value.Value : null);
     }

@@ -25,6 +25,9 @@ public readonly record struct ParameterValue
     /// <summary>The value for people: as it is written, else to six figures.</summary>
     public string Shown => written ?? (unit is null ? "" : Number("G6"));
 
+    /// <summary>The value for a picture: as it is written, else to four figures.</summary>
+    public string Brief => written ?? (unit is null ? "" : Number("G4"));
+
     /// <summary>A word.</summary>
     public static ParameterValue Word(string text) => new(text, double.NaN, null);
 

@@ -183,6 +183,35 @@ public static class Quantities
         ],
     };
 
+    /// <summary>Consistencies of liquids whose stress follows a power n of the shear rate, Pa·s^n.</summary>
+    public static Quantity Consistency { get; } = new()
+    {
+        Name = "consistency",
+        SiUnit = "Pa.s^n",
+        Examples = "2.5 Pa.s^n or 400 mPa.s^n",
+        Units =
+        [
+            Row("Pa.s^n", 1, "1 Pa at 1/s, n the flow index", "Pa·s^n", "Pa*s^n", "Pa s^n"),
+            Row("mPa.s^n", 1e-3, "0.001 Pa.s^n", "mPa·s^n", "mPa*s^n", "mPa s^n"),
+        ],
+    };
+
+    /// <summary>Yield stresses, Pa.</summary>
+    public static Quantity Stress { get; } = new()
+    {
+        Name = "stress",
+        SiUnit = "Pa",
+        Examples = "12 Pa, 500 mPa or 120 dyn/cm2",
+        Units =
+        [
+            Row("Pa", 1, "1 N/m2"),
+            Row("mPa", 1e-3, "0.001 Pa"),
+            Row("kPa", 1e3, "1000 Pa"),
+            Row("dyn/cm2", 0.1, "1e-5 N on 1 cm2", "dyn/cm²"),
+            Row("lbf/100ft2", Pound * StandardGravity / (100 * Foot * Foot), "1 lb under 9.80665 m/s2 on 100 ft2", "lb/100ft2"),
+        ],
+    };
+
     /// <summary>Kinematic viscosities, m²/s.</summary>
     public static Quantity KinematicViscosity { get; } = new()
     {
@@ -281,8 +310,8 @@ public static class Quantities
     /// <summary>All quantities with units, in the order of the table.</summary>
     public static IReadOnlyList<Quantity> All { get; } =
     [
-        Length, Area, Volume, Flow, Time, Pressure, Density, Viscosity, KinematicViscosity,
-        Temperature, Angle, Velocity, Acceleration, Ratio,
+        Length, Area, Volume, Flow, Time, Pressure, Density, Viscosity, Consistency,
+        KinematicViscosity, Temperature, Angle, Velocity, Acceleration, Ratio,
     ];
 
     private static Unit Row(string spelling, double factor, string definition, params string[] others) =>

@@ -5,7 +5,7 @@ using DrainSim.Vessels;
 namespace DrainSim.Draining;
 
 /// <summary>A line and its receiver, ready to be asked for flows and pressures at any state; immutable.</summary>
-internal sealed class CompiledLine
+internal sealed partial class CompiledLine
 {
     private readonly double receiverStart, atmosphere, gravity, fixedSurface;
     private readonly Vessel? receiver;
@@ -99,6 +99,13 @@ internal sealed class CompiledLine
     public double Head(double surface, double gas, double delivered) =>
         surface - OutletLevel(delivered) + (gas - atmosphere) / SpecificWeight;
 
+    /// <summary>Driving head, whichever way it acts, above what the yield stress holds, m; negative while that holds it.</summary>
+    /// <param name="surface">level in the tank, m</param>
+    /// <param name="gas">pressure of the gas over it, Pa absolute</param>
+    /// <param name="delivered">volume that the line has delivered, m³</param>
+    public double MovingHead(double surface, double gas, double delivered) =>
+        Math.Abs(Head(surface, gas, delivered)) - Hydraulics.YieldHead;
+
     /// <summary>Flow out of the tank, m³/s; negative when a submerged line runs backwards.</summary>
     /// <param name="state">level, gas pressure, delivered volume and whether the flow is held at the threshold</param>
     /// <param name="guess">a flow nearby, m³/s; 0 when none is known</param>
@@ -151,7 +158,7 @@ internal sealed class CompiledLine
     {
         if (!hasOneBore)
             return double.NegativeInfinity;
-        double used = Math.Max(0, Head(surface, gas, delivered));
+        double used = Math.Max(Hydraulics.YieldHead, Head(surface, gas, delivered));
         return gas + SpecificWeight * (surface - Hydraulics.CrestElevation - used) - Threshold;
     }
 
@@ -159,11 +166,10 @@ internal sealed class CompiledLine
     /// <param name="flow">one of the line's regime flows, m³/s</param>
     public double RegimeLimit(double flow)
     {
-        double own = Hydraulics.Reynolds(flow) * bore;
         double limit = FrictionFactor.LaminarLimit, nearest = double.PositiveInfinity;
         for (int i = 0; i < Hydraulics.NodeCount; i++)
         {
-            double re = own / Hydraulics.Node(i).Bore;
+            double re = Hydraulics.ReynoldsAt(i, flow);
             foreach (double candidate in (ReadOnlySpan<double>)[FrictionFactor.LaminarLimit, FrictionFactor.TurbulentLimit])
             {
                 if (Math.Abs(re - candidate) < nearest)

@@ -20,7 +20,7 @@ internal sealed partial class DrainModel : IEventSet
         double unclamped = StartVolume + now.InflowVolume(t);
         for (int i = 0; i < LineCount; i++)
             unclamped -= y[i];
-        var moment = new Moment(t, unclamped, surface, GasPressure(now, t, volume, y));
+        var moment = new Moment(t, unclamped, surface, GasPressure(now, volume, y));
         for (int i = 0; i < watches.Length; i++)
             values[i] = Value(watches[i], moment, y, dydt);
     }
@@ -130,9 +130,8 @@ internal sealed partial class DrainModel : IEventSet
     private Epoch AfterAct(int ordinal, double t, Span<double> y)
     {
         Plant after = new(Job.Timeline[ordinal].ChangeOf(now.Plant.Job, Job));
-        bool massIsKnown = now.Plant.Gas is { IsConfined: true, IsSteady: false };
-        if (hasMass && after.Gas.IsConfined && !massIsKnown)
-            y[LineCount] = after.Gas.MassAt(GasPressure(now, t, Volume(now, t, y), y), Volume(now, t, y));
+        if (hasPressure && after.Gas.IsConfined)
+            y[LineCount] = GasPressure(now, Volume(now, t, y), y);
         return now.With(t, after);
     }
 
@@ -159,16 +158,18 @@ internal sealed partial class DrainModel : IEventSet
     private bool RunsBack(int line, double t, ReadOnlySpan<double> y)
     {
         double volume = Volume(now, t, y);
-        return now.Plant.Lines[line].Head(vessel.Level(volume), GasPressure(now, t, volume, y), y[line]) < 0;
+        return now.Plant.Lines[line].Head(vessel.Level(volume), GasPressure(now, volume, y), y[line]) < 0;
     }
 
     private Outcome RestOf(int line, double t, ReadOnlySpan<double> y)
     {
         double volume = Volume(now, t, y), surface = vessel.Level(volume);
-        double liquidHead = surface - now.Plant.Lines[line].OutletLevel(y[line]);
-        if (now.Plant.Gas.IsConfined && liquidHead > 2 * run.SettledWithin)
+        double liquidHead = surface - now.Plant.Lines[line].OutletLevel(y[line]), yield = now.Plant.Lines[line].Hydraulics.YieldHead;
+        if (now.Plant.Gas.IsConfined && liquidHead > yield + 2 * run.SettledWithin)
             return Outcome.VacuumHeld;
-        return !HoldsHeel(line) && surface <= 2 * run.SettledWithin ? Outcome.Emptied : Outcome.Levelled;
+        if (!HoldsHeel(line) && surface <= 2 * run.SettledWithin)
+            return Outcome.Emptied;
+        return yield > run.SettledWithin ? Outcome.YieldHeld : Outcome.Levelled;
     }
 
     private double Value(Watch watch, in Moment at, ReadOnlySpan<double> y, ReadOnlySpan<double> dydt)
@@ -183,7 +184,7 @@ internal sealed partial class DrainModel : IEventSet
             WatchKind.AirDrawn => line.DrawOff.Line.Inlet.AirDraw == AirDraw.Break ? at.Surface - line.SubmergedAbove(flow) : 1,
             WatchKind.MarginVanishes => FreeMargin(watch.Line, at, delivered, flow) / atmosphere,
             WatchKind.LiftExhausts => line.Margin(0, at.Surface, at.Gas) / line.SpecificWeight - run.SettledWithin,
-            WatchKind.HeadSettles => Unsettled(RestHead(line, at, delivered)),
+            WatchKind.HeadSettles => Unsettled(RestHead(line, at, delivered), line.Hydraulics.YieldHead),
             WatchKind.AllSettle => IsFed(at.Time) ? 1 : LargestHead(at, y) - run.SettledWithin,
             WatchKind.BoreUncovers => BoreCover(line.InletLimit(at.Surface), flow),
             WatchKind.OutletCovers => line.ReceiverSurface(delivered) - line.Hydraulics.OutletElevation,
@@ -215,8 +216,11 @@ internal sealed partial class DrainModel : IEventSet
     private bool IsFed(double t) =>
         t <= lastActTime || (now.Plant.Job.Inflow is { Points: [.., var last] } && (t < last.Time || last.Flow > 0));
 
-    /// <summary>The head above the settled head, m; the head itself, which changes its sign, where none is settled, which 0 says.</summary>
-    private double Unsettled(double head) => run.SettledWithin == 0 ? head : Math.Abs(head) - run.SettledWithin;
+    /// <summary>
+    /// The head above the yield head and the settled head, m; the head itself, which changes its sign, where neither is there.
+    /// </summary>
+    private double Unsettled(double head, double yield) =>
+        run.SettledWithin == 0 && yield == 0 ? head : Math.Abs(head) - yield - run.SettledWithin; // 0 says that there is none
 
     /// <summary>
     /// The margin in free flow, Pa; the flow of the dense output serves where it is free. Where the margin cannot vanish
@@ -251,7 +255,7 @@ internal sealed partial class DrainModel : IEventSet
         for (int i = 0; i < LineCount; i++)
         {
             if (now.Modes[i].IsAtWork)
-                largest = Math.Max(largest, Math.Abs(RestHead(now.Plant.Lines[i], at, y[i])));
+                largest = Math.Max(largest, Math.Abs(RestHead(now.Plant.Lines[i], at, y[i])) - now.Plant.Lines[i].Hydraulics.YieldHead);
         }
 
         return largest;

@@ -7,20 +7,21 @@ namespace DrainSim.Draining;
 /// <remarks>
 /// State: y[i] is the volume that line i has taken out of the tank, m³, so that its slope is the line's flow, the volume in
 /// the tank is V = V₀ + ∫inflow − Σy[i] and that in a receiver Vr₀ + y[i]: the balance closes by construction. Where gas
-/// comes and goes its mass, kg, is the last component. What is watched on the way stands in the other part of the class.
+/// comes and goes its pressure, Pa, is the last component: not its mass, of which the pressure that drives the vent would be a
+/// difference of near equals, kept by a balance of stiff terms at every trial state. What is watched on the way and the slopes for implicit steps
+/// stand in the other parts of the class.
 /// </remarks>
 internal sealed partial class DrainModel : IOdeSystem
 {
     private readonly Vessel vessel;
     private readonly RunSettings run;
     private readonly double atmosphere;
-    private readonly bool hasMass;
+    private readonly bool hasPressure;
     private readonly Watch[] watches;
     private readonly double[] guesses;
     private readonly List<Epoch> epochs;
     private readonly double lastActTime;
     private Epoch now;
-    private double steadyGas;
 
     /// <param name="plant">the plant at the start</param>
     /// <param name="modes">how its lines work at the start</param>
@@ -30,9 +31,8 @@ internal sealed partial class DrainModel : IOdeSystem
         (vessel, run, atmosphere) = (Job.Vessel, Job.Run, Job.Site.AtmosphericPressure);
         LineCount = plant.Lines.Length;
         StartVolume = vessel.Volume(Job.Level);
-        hasMass = plant.Gas.HasRate || MayConfine(plant);
+        hasPressure = plant.Gas.Breathes || MayConfine(plant);
         lastActTime = Job.Timeline.Max(act => act.Time) ?? double.NegativeInfinity;
-        steadyGas = atmosphere;
         StartMass = plant.Gas.StartMass;
         guesses = new double[LineCount];
         watches = WatchList.Of(plant, TargetVolume);
@@ -59,9 +59,9 @@ internal sealed partial class DrainModel : IOdeSystem
     public IReadOnlyList<Epoch> Epochs => epochs;
 
     /// <inheritdoc/>
-    public int Dimension => LineCount + (hasMass ? 1 : 0);
+    public int Dimension => LineCount + (hasPressure ? 1 : 0);
 
-    /// <summary>Whether gas of a plant with acts may be shut in, so that its mass has to be known.</summary>
+    /// <summary>Whether gas of a plant with acts may be shut in, so that its pressure is a state throughout.</summary>
     private static bool MayConfine(Plant plant) =>
         plant.Job.Timeline.Count > 0 && plant.Job.Timeline.Select(act => act.After).Append(plant.Job).Any(job => job.Headspace is Gas.ConfinedHeadspace);
 
@@ -77,8 +77,8 @@ internal sealed partial class DrainModel : IOdeSystem
     public void StartState(Span<double> y)
     {
         y.Clear();
-        if (hasMass)
-            y[LineCount] = StartMass;
+        if (hasPressure)
+            y[LineCount] = now.Plant.Gas.Pressure(StartVolume, StartMass);
     }
 
     /// <summary>The stretch that a time belongs to; at a restart the one before it.</summary>
@@ -101,9 +101,8 @@ internal sealed partial class DrainModel : IOdeSystem
     }
 
     /// <summary>Pressure on the liquid, Pa absolute.</summary>
-    public double GasPressure(Epoch epoch, double t, double volume, ReadOnlySpan<double> y) => epoch.Plant.Gas.IsSteady
-        ? SteadyPressure(epoch, t, vessel.Level(volume), y)
-        : epoch.Plant.Gas.Pressure(volume, hasMass ? y[LineCount] : StartMass);
+    public double GasPressure(Epoch epoch, double volume, ReadOnlySpan<double> y) =>
+        hasPressure && epoch.Plant.Gas.IsConfined ? y[LineCount] : epoch.Plant.Gas.Pressure(volume, StartMass);
 
     /// <summary>Flow of a line out of the tank, solved for, m³/s; 0 for a line that no longer works.</summary>
     public double Flow(Epoch epoch, int line, double surface, double gas, double delivered, bool limited) =>
@@ -124,7 +123,7 @@ internal sealed partial class DrainModel : IOdeSystem
     public Instant At(double t, ReadOnlySpan<double> y)
     {
         Epoch epoch = EpochAt(t);
-        double volume = Volume(epoch, t, y), surface = vessel.Level(volume), gas = GasPressure(epoch, t, volume, y);
+        double volume = Volume(epoch, t, y), surface = vessel.Level(volume), gas = GasPressure(epoch, volume, y);
         Span<double> flows = stackalloc double[LineCount];
         for (int i = 0; i < LineCount; i++)
         {
@@ -145,7 +144,7 @@ internal sealed partial class DrainModel : IOdeSystem
     public Instant At(double t, ReadOnlySpan<double> y, ReadOnlySpan<double> flows)
     {
         Epoch epoch = EpochAt(t);
-        double volume = Volume(epoch, t, y), surface = vessel.Level(volume), gas = GasPressure(epoch, t, volume, y);
+        double volume = Volume(epoch, t, y), surface = vessel.Level(volume), gas = GasPressure(epoch, volume, y);
         (double pressure, double margin) = LowPoint(epoch, surface, gas, flows);
         CompiledLine first = epoch.Plant.Lines[0];
         double total = 0;
@@ -171,11 +170,12 @@ internal sealed partial class DrainModel : IOdeSystem
     /// <inheritdoc/>
     public void Derivative(double t, ReadOnlySpan<double> y, Span<double> dydt)
     {
-        double volume = Volume(now, t, y), surface = vessel.Level(volume), gas = GasPressure(now, t, volume, y);
+        double volume = Volume(now, t, y), surface = vessel.Level(volume), gas = GasPressure(now, volume, y);
+        double growth = -now.Inflow(t);
         for (int i = 0; i < LineCount; i++)
-            dydt[i] = Flow(now, i, surface, gas, y[i], now.Modes[i].IsLimited);
-        if (hasMass)
-            dydt[LineCount] = now.Plant.Gas.HasRate ? now.Plant.Gas.MassFlow(gas) : 0;
+            growth += dydt[i] = Flow(now, i, surface, gas, y[i], now.Modes[i].IsLimited);
+        if (hasPressure)
+            dydt[LineCount] = now.Plant.Gas.IsConfined ? now.Plant.Gas.Rate(gas, volume, growth).Rate : 0;
     }
 
     /// <summary>
@@ -185,17 +185,17 @@ internal sealed partial class DrainModel : IOdeSystem
     /// </summary>
     public void ErrorScale(double t, ReadOnlySpan<double> y, ReadOnlySpan<double> dydt, Span<double> scale)
     {
-        double volume = Volume(now, t, y), surface = vessel.Level(volume), gas = GasPressure(now, t, volume, y);
+        double volume = Volume(now, t, y), surface = vessel.Level(volume), gas = GasPressure(now, volume, y);
         for (int i = 0; i < LineCount; i++)
         {
             CompiledLine line = now.Plant.Lines[i];
-            double toRest = vessel.Area(surface) * Math.Abs(line.Head(surface, gas, y[i]));
+            double toRest = vessel.Area(surface) * Math.Max(0, line.MovingHead(surface, gas, y[i]));
             double toAir = Math.Max(0, volume - line.UncoverVolume);
             scale[i] = Math.Max(1e-12 * vessel.Capacity, Math.Abs(dydt[i]) * t + Math.Min(toRest, toAir));
         }
 
-        if (hasMass)
-            scale[LineCount] = Math.Max(y[LineCount], 1e-9 * StartMass);
+        if (hasPressure)
+            scale[LineCount] = atmosphere;
     }
 
     /// <inheritdoc/>
@@ -226,31 +226,5 @@ internal sealed partial class DrainModel : IOdeSystem
         }
 
         return null;
-    }
-
-    /// <summary>
-    /// The pressure at which vents and lines agree, by a secant held in a bracket: more pressure drives more out, and to
-    /// let more in the pressure has to be less, so that there is one root.
-    /// </summary>
-    private double SteadyPressure(Epoch epoch, double t, double surface, ReadOnlySpan<double> y)
-    {
-        double low = 0, high = 2 * atmosphere, p = steadyGas, lastP = double.NaN, lastExcess = 0;
-        for (int turn = 0; turn < 100; turn++)
-        {
-            double outflow = -epoch.Inflow(t);
-            for (int i = 0; i < LineCount; i++)
-                outflow += Flow(epoch, i, surface, p, y[i], epoch.Modes[i].IsLimited);
-            double asked = epoch.Plant.Gas.SteadyPressure(outflow) ?? epoch.Plant.Job.Liquid.VapourPressure;
-            double excess = asked - p;
-            (low, high) = excess > 0 ? (p, high) : (low, p);
-            double next = double.IsNaN(lastP) ? asked : p - excess * (p - lastP) / (excess - lastExcess);
-            if (!(next > low && next < high))
-                next = Math.Abs(excess) <= 1e-12 * atmosphere ? p : (low + high) / 2;
-            if (Math.Abs(next - p) <= 1e-13 * atmosphere)
-                return steadyGas = next;
-            (lastP, lastExcess, p) = (p, excess, next);
-        }
-
-        return steadyGas = p;
     }
 }

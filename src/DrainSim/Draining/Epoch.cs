@@ -37,6 +37,10 @@ internal sealed class Epoch
     /// <param name="t">time, s</param>
     public double Inflow(double t) => Plant.Job.Inflow?.Flow(t) ?? 0;
 
+    /// <summary>How fast that flow changes, m³/s².</summary>
+    /// <param name="t">time, s</param>
+    public double InflowSlope(double t) => Plant.Job.Inflow?.Slope(t) ?? 0;
+
     /// <summary>The next epoch, with one line working in another way.</summary>
     public Epoch With(double from, int line, LineMode mode)
     {

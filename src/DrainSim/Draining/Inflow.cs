@@ -46,6 +46,18 @@ public sealed record Inflow
         return points[i - 1].Flow + share * (points[i].Flow - points[i - 1].Flow);
     }
 
+    /// <summary>How fast the flow changes, m³/s²; at a point of the table as just after it.</summary>
+    /// <param name="time">since the start, s</param>
+    public double Slope(double time)
+    {
+        if (time < points[0].Time || time >= points[^1].Time)
+            return 0;
+        int i = 1;
+        while (points[i].Time <= time)
+            i++;
+        return (points[i].Flow - points[i - 1].Flow) / (points[i].Time - points[i - 1].Time);
+    }
+
     /// <summary>Volume that has run in since a time, m³.</summary>
     /// <param name="from">from, s</param>
     /// <param name="to">to, s; at least <paramref name="from"/></param>

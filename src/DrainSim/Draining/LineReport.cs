@@ -31,6 +31,7 @@ internal static class LineReport
             LeastMarginNode = survey.LowPointNode(index, margin.Time),
             LargestFlow = flow,
             LargestVelocity = flow with { Value = line.Hydraulics.LargestVelocity(Math.Max(0, flow.Value)) },
+            YieldHead = job.Liquid.FlowCurve.YieldStress > 0 ? line.Hydraulics.YieldHead : null,
             ReceiverLevel = line.ReceiverDepth(delivered),
             FallBack = parts ? FallBackAt(job, line, history.Read(stopped)) : null,
             Prime = StartCheck.Prime(job, line),

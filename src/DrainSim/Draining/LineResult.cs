@@ -33,6 +33,9 @@ public sealed record LineResult
     /// <summary>Largest velocity in the narrowest bore, m/s, and when.</summary>
     public required Extreme LargestVelocity { get; init; }
 
+    /// <summary>Head that the liquid's yield stress holds in it, m; null for a liquid without one.</summary>
+    public double? YieldHead { get; init; }
+
     /// <summary>Depth in the receiver when the run stopped, m; null where it is no tank.</summary>
     public double? ReceiverLevel { get; init; }
 

@@ -9,6 +9,9 @@ public enum NoStart
     /// <summary>The outlet or the receiving surface stands above the level.</summary>
     NoDrivingHead,
 
+    /// <summary>The driving head does not exceed what the liquid's yield stress holds.</summary>
+    YieldHolds,
+
     /// <summary>The column over the crest is higher than the atmosphere can hold.</summary>
     LiftBeyondLimit,
 

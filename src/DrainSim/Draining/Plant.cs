@@ -11,8 +11,6 @@ internal sealed class Plant
         Job = job;
         Lines = [.. job.DrawOffs.Select(drawOff => new CompiledLine(drawOff, job))];
         Gas = new GasLaw(job);
-        if (Gas.HasRate)
-            Gas.Settle(FlowUnderAtmosphere(), job.Vessel.Volume(job.Level));
     }
 
     /// <summary>The job.</summary>
@@ -26,10 +24,4 @@ internal sealed class Plant
 
     /// <summary>The gas over the liquid.</summary>
     public GasLaw Gas { get; }
-
-    private double FlowUnderAtmosphere()
-    {
-        double atmosphere = Job.Site.AtmosphericPressure;
-        return Lines.Sum(line => line.Flow(new LineConditions(Job.Level, atmosphere, 0, false), 0));
-    }
 }

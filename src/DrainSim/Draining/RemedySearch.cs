@@ -45,11 +45,11 @@ public static class RemedySearch
 
     private static RemedyKind[] OfEnding(Outcome outcome, NoStart? noStart) => (outcome, noStart) switch
     {
-        (Outcome.Levelled, _) => [RemedyKind.LowerOutlet],
+        (Outcome.Levelled or Outcome.YieldHeld, _) => [RemedyKind.LowerOutlet],
         (Outcome.VapourBreak, _) => [RemedyKind.LowerCrest, RemedyKind.ThrottleOutlet],
         (Outcome.Balanced or Outcome.Overflowed, _) => [RemedyKind.LessInflow],
         (Outcome.ReceiverFull, _) => [RemedyKind.HigherBrim],
-        (Outcome.NeverStarted, NoStart.NoDrivingHead) => [RemedyKind.LowerOutlet],
+        (Outcome.NeverStarted, NoStart.NoDrivingHead or NoStart.YieldHolds) => [RemedyKind.LowerOutlet],
         (Outcome.NeverStarted, NoStart.LiftBeyondLimit) => [RemedyKind.LowerCrest],
         (Outcome.NeverStarted, NoStart.InletAboveLevel) => [RemedyKind.LowerInlet],
         _ => [],

@@ -143,6 +143,8 @@ internal static class RunWatch
         bool siphons = model.Epochs[0].Plant.Lines.Any(line => line.Hydraulics.RisesAboveInlet);
         Add(WarningCode.ThinMargin, result.LeastMargin.Value,
             siphons && result.StoppedAt > 0 && result.LeastMargin.Value is > Touching and < ThinMargin);
+        double differs = TurbulentYield.ShareLess(model.Epochs[0].Plant.Lines[0], job, result.Lines[0].LargestFlow.Value);
+        Add(WarningCode.FrictionDiffers, differs, differs > 0);
         double vacuum = result.LargestVacuum?.Value ?? 0;
         Add(WarningCode.VacuumRatingPassed, vacuum, vacuum > job.VacuumRating);
         double over = result.LargestVacuum is null ? 0 : survey.Largest(i => i.HeadspacePressure!.Value - job.Site.AtmosphericPressure).Value;

@@ -21,6 +21,7 @@ internal static class StartCheck
             _ when waits => null,
             _ when job.Level <= line.Hydraulics.InletElevation => NoStart.InletAboveLevel,
             _ when !runsBack && head <= job.Run.SettledWithin => NoStart.NoDrivingHead,
+            _ when line.Hydraulics.YieldHead > 0 && line.MovingHead(job.Level, gas, 0) <= job.Run.SettledWithin => NoStart.YieldHolds,
             _ when line.Margin(0, job.Level, gas) <= 0 => NoStart.LiftBeyondLimit,
             _ => null,
         };

@@ -33,6 +33,12 @@ public enum WarningCode
     /// <summary>The inflow is more than the line ever carries at this level; the number is the inflow that it could carry, m³/s.</summary>
     NeverEmpties,
 
+    /// <summary>
+    /// A Bingham liquid flows turbulently, for which the published forms differ; the number is the share by which the friction
+    /// of <see cref="Lines.DarbyMelson"/> is less than the one taken, 1, at the largest flow.
+    /// </summary>
+    FrictionDiffers,
+
     /// <summary>The least margin at the low point is thin; the number is the margin, Pa.</summary>
     ThinMargin,
 }

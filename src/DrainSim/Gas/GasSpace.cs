@@ -43,19 +43,6 @@ public sealed record GasSpace
     public double Pressure(double mass, double volume) =>
         VapourPressure + coefficient * Power(mass / volume, Exponent);
 
-    /// <summary>Pressure on the liquid, Pa absolute, and its slopes.</summary>
-    /// <param name="mass">mass of gas, kg; greater than 0</param>
-    /// <param name="volume">volume of the headspace, m³; greater than 0</param>
-    /// <param name="byMass">∂p/∂m = n·pg/m, Pa/kg</param>
-    /// <param name="byVolume">∂p/∂V = −n·pg/V, Pa/m³</param>
-    public double Pressure(double mass, double volume, out double byMass, out double byVolume)
-    {
-        double gasPressure = coefficient * Power(mass / volume, Exponent);
-        byMass = Exponent * gasPressure / mass;
-        byVolume = -Exponent * gasPressure / volume;
-        return VapourPressure + gasPressure;
-    }
-
     /// <summary>Density of the gas without the vapour, kg/m³; 0 at the vapour pressure and below.</summary>
     /// <param name="pressure">pressure on the liquid, Pa absolute</param>
     public double Density(double pressure) =>
@@ -71,17 +58,31 @@ public sealed record GasSpace
     /// <param name="mass">mass of gas, kg; at least 0</param>
     public double Volume(double pressure, double mass) => mass / Density(pressure);
 
-    /// <summary>
-    /// Time in which the openings wear off a small disturbance of the pressure at a constant volume, s;
-    /// 1/τ = ∂p/∂m · |dW/dp|; infinite for no opening.
-    /// </summary>
-    /// <param name="mass">mass of gas, kg; greater than 0</param>
+    /// <summary>How fast the pressure changes while gas comes in and the headspace grows: the law by time.</summary>
+    /// <remarks><code>
+    /// dp/dt = n/V · [ (pg/ρ)·W − pg·dV/dt ],   pg/ρ = C^(1/n) · pg^(1 − 1/n)
+    ///
+    /// W  mass flow in, kg/s;  ρ  density of the gas without the vapour, kg/m³
+    /// </code>
+    /// At the vapour pressure and below only what comes in counts, and for n other than 1 not even that.
+    /// </remarks>
+    /// <param name="pressure">pressure on the liquid, Pa absolute</param>
     /// <param name="volume">volume of the headspace, m³; greater than 0</param>
-    /// <param name="massFlowSlope">dW/dp of the openings there, kg/(s·Pa)</param>
-    public double RelaxationTime(double mass, double volume, double massFlowSlope)
+    /// <param name="massFlow">mass flow of gas into it, kg/s</param>
+    /// <param name="massFlowSlope">its slope by the pressure, kg/(s·Pa)</param>
+    /// <param name="growth">rate at which the volume grows, m³/s</param>
+    public PressureRate Rate(double pressure, double volume, double massFlow, double massFlowSlope, double growth)
     {
-        Pressure(mass, volume, out double byMass, out _);
-        return 1 / (byMass * Math.Abs(massFlowSlope));
+        double gasPressure = pressure - VapourPressure;
+        double perDensity = Exponent == 1 ? coefficient : Math.Pow(coefficient, 1 / Exponent) * Math.Pow(Math.Max(gasPressure, 0), 1 - 1 / Exponent);
+        double perDensitySlope = gasPressure > 0 ? perDensity * (1 - 1 / Exponent) / gasPressure : 0;
+        double share = Exponent / volume;
+        double rate = share * (perDensity * massFlow - gasPressure * growth);
+        return new PressureRate(
+            rate,
+            share * (perDensitySlope * massFlow + perDensity * massFlowSlope - growth),
+            -rate / volume,
+            -share * gasPressure);
     }
 
     private static double Power(double value, double exponent) =>

@@ -17,6 +17,19 @@ public interface IOdeSystem
     /// outside the domain, and the step is then tried again shorter</param>
     void Derivative(double t, ReadOnlySpan<double> y, Span<double> dydt);
 
+    /// <summary>Whether a quick part of the solution follows a slow one so closely that explicit steps would have to be
+    /// short for stability alone; asked at the start and after every restart. Implicit steps are taken then.</summary>
+    bool IsStiff { get; }
+
+    /// <summary>Writes the slopes of f(t, y); called for implicit steps alone.</summary>
+    /// <param name="t">time at the start of a step</param>
+    /// <param name="y">state there</param>
+    /// <param name="dydt">derivative there</param>
+    /// <param name="byState">receives ∂f_i/∂y_j, row i by row</param>
+    /// <param name="byTime">receives ∂f_i/∂t</param>
+    /// <remarks>They are part of the method, not of an iteration: a wrong one costs accuracy.</remarks>
+    void Jacobian(double t, ReadOnlySpan<double> y, ReadOnlySpan<double> dydt, Span<double> byState, Span<double> byTime);
+
     /// <summary>Writes the magnitude that the relative tolerance of each component is measured against.</summary>
     /// <param name="t">time at an end of a step</param>
     /// <param name="y">state there</param>

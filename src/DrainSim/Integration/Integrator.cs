@@ -45,9 +45,11 @@ public sealed class Integrator<TSystem> where TSystem : IOdeSystem, IEventSet
     /// <summary>A last step may be this much longer than asked for, rather than leave a sliver.</summary>
     private const double LastStepStretch = 1.01;
 
-    private readonly EmbeddedRungeKutta<TSystem> stepper;
+    private readonly EmbeddedRungeKutta<TSystem> explicitStepper;
     private readonly EventScan<TSystem> events;
     private readonly double[] endState;
+    private Rosenbrock<TSystem>? implicitStepper;   // made at the first stiff stretch
+    private Stepper<TSystem> stepper;
     private TSystem system;
     private StepControl control;
     private IntegrationOptions options = new();
@@ -60,7 +62,7 @@ public sealed class Integrator<TSystem> where TSystem : IOdeSystem, IEventSet
     private int restarts;
     private int? stoppedBy;
 
-    /// <summary>An integrator with the pair of Dormand and Prince.</summary>
+    /// <summary>An integrator with the pair of Dormand and Prince and, where the system is stiff, Rodas5P.</summary>
     /// <param name="system">the system; its dimension and number of events are read here, once</param>
     /// <exception cref="ArgumentOutOfRangeException">the dimension is below 1 or the number of events below 0</exception>
     public Integrator(TSystem system)
@@ -68,9 +70,8 @@ public sealed class Integrator<TSystem> where TSystem : IOdeSystem, IEventSet
         ArgumentOutOfRangeException.ThrowIfLessThan(system.Dimension, 1);
         ArgumentOutOfRangeException.ThrowIfNegative(system.EventCount);
         this.system = system;
-        stepper = new EmbeddedRungeKutta<TSystem>(system, DormandPrince54.Tableau);
+        stepper = explicitStepper = new EmbeddedRungeKutta<TSystem>(system, DormandPrince54.Tableau);
         events = new EventScan<TSystem>(system);
-        control = new StepControl(stepper.ErrorOrder);
         endState = new double[system.Dimension];
         trajectory = new Trajectory(system.Dimension, capacity: 1);
     }
@@ -93,7 +94,8 @@ public sealed class Integrator<TSystem> where TSystem : IOdeSystem, IEventSet
         (steps, rejected, restarts, stoppedBy) = (0, 0, 0, null);
         startState.CopyTo(endState);
         trajectory.Begin(start, startState);
-        stepper.ResetCount();
+        explicitStepper.ResetCount();
+        implicitStepper?.ResetCount();
         events.Reset();
         EndingReason? reason = start == end ? EndingReason.ReachedEnd : Begin();
         while (reason is null)
@@ -103,12 +105,21 @@ public sealed class Integrator<TSystem> where TSystem : IOdeSystem, IEventSet
 
     private EndingReason? Begin()
     {
-        control.Forget();
-        if (!stepper.Begin(time, endState))
+        if (!BeginStepper())
             return EndingReason.OutsideDomain;
         events.Begin(time, stepper.State, stepper.Slope);
         length = options.FirstStep ?? stepper.FirstStep(end - time, options.RelativeTolerance);
         return null;
+    }
+
+    /// <summary>Starts the stepper that the system asks for from the state at hand, without memory.</summary>
+    private bool BeginStepper()
+    {
+        stepper = system.IsStiff
+            ? implicitStepper ??= new Rosenbrock<TSystem>(system, Rodas5P.Tableau)
+            : explicitStepper;
+        control = new StepControl(stepper.ErrorOrder);
+        return stepper.Begin(time, endState);
     }
 
     private EndingReason? Advance(CancellationToken cancellation)
@@ -163,7 +174,6 @@ public sealed class Integrator<TSystem> where TSystem : IOdeSystem, IEventSet
 
     private EndingReason? Restart()
     {
-        control.Forget();
         do
         {
             events.InstantState.CopyTo(endState);
@@ -171,7 +181,7 @@ public sealed class Integrator<TSystem> where TSystem : IOdeSystem, IEventSet
                 return EndingReason.Stopped;
             restarts++;
             trajectory.BeginPiece();
-            if (!stepper.Begin(time, endState))
+            if (!BeginStepper())
                 return EndingReason.OutsideDomain;
         }
         while (events.IsCutAgain(time, stepper.State, stepper.Slope));
@@ -202,7 +212,8 @@ public sealed class Integrator<TSystem> where TSystem : IOdeSystem, IEventSet
         EndTime = time,
         EndState = [.. endState],
         Events = events.Events(),
-        Counters = new(steps, rejected, restarts, stepper.Evaluations, events.Evaluations),
+        Counters = new(steps, rejected, restarts,
+            explicitStepper.Evaluations + (implicitStepper?.Evaluations ?? 0), implicitStepper?.Jacobians ?? 0, events.Evaluations),
     };
 
     private void Check(double start, ReadOnlySpan<double> startState, double end, Trajectory trajectory)

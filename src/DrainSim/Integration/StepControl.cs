@@ -34,16 +34,13 @@ internal struct StepControl
     private double oldLength;
     private bool isAfterRejection;
 
-    /// <summary>A control without memory.</summary>
+    /// <summary>A control without memory, as at a restart.</summary>
     /// <param name="errorOrder">power of h that the error estimate goes with</param>
     public StepControl(int errorOrder)
     {
         exponent = 1.0 / errorOrder - ProportionalShare * Memory;
-        Forget();
+        (oldError, oldLength) = (LeastOldError, double.PositiveInfinity);
     }
-
-    /// <summary>Starts afresh, as at a restart.</summary>
-    public void Forget() => (oldError, oldLength, isAfterRejection) = (LeastOldError, double.PositiveInfinity, false);
 
     /// <summary>The next length after an accepted step.</summary>
     public double AfterAcceptance(double h, double error)

@@ -66,8 +66,10 @@ internal static class FlowSearch
                 return next;
             if (high - low <= 4e-16 * high)
                 return q;
+            // Across a kink two points may throw each other back and forth: a step that has not halved is replaced too.
+            bool stalls = turn > 2 && Math.Abs(step) > 0.5 * Math.Abs(moved);
             (moved, before, beforeInverse, beforeT) = (step, q, inverse, t);
-            if (!inside || next == q)
+            if (!inside || next == q || stalls)
                 (moved, next) = (double.NaN, Math.Sqrt(low * high));
             q = next;
         }

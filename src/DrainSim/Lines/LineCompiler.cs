@@ -8,7 +8,7 @@ internal sealed class LineCompiler
 {
     private readonly Line line;
     private readonly double gravity;
-    private readonly double kinematicViscosity;
+    private readonly double kinematicViscosity; // of a Newtonian liquid; what else it enters StressLosses takes out again
     private readonly List<LineNode> nodes = [];
     private readonly List<LossStep> steps = [];
     private readonly List<PipeWall> walls = [];
@@ -26,7 +26,7 @@ internal sealed class LineCompiler
     {
         this.line = line;
         this.gravity = gravity;
-        kinematicViscosity = liquid.Viscosity / liquid.Density;
+        kinematicViscosity = liquid.FlowCurve.Consistency / liquid.Density;
         bore = line.Bore;
         elevation = line.Inlet.Elevation;
         AddNode("inlet", null, NodePlace.Inlet, line.Inlet.EdgeLoss, 0);
@@ -48,6 +48,12 @@ internal sealed class LineCompiler
 
     /// <summary>The bores of straight runs and of the outlet, m.</summary>
     public IEnumerable<double> RegimeBores => [.. runBores, bore];
+
+    /// <summary>What lies between the node before and each node.</summary>
+    public IReadOnlyList<LossStep> Steps => steps;
+
+    /// <summary>Bore and roughness of each wall, m, in the order of their indices.</summary>
+    public IEnumerable<(double Bore, double Roughness)> WallRoughness => wallOf.OrderBy(wall => wall.Value).Select(wall => wall.Key);
 
     /// <summary>The losses as arrays.</summary>
     public LineLosses Losses() => new()

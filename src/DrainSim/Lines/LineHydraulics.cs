@@ -10,7 +10,8 @@ namespace DrainSim.Lines;
 /// </code>
 /// Flows are of all parallel lines together. Nothing changes after construction and no method allocates, so one
 /// object serves any number of threads. The loss H rises strictly with the flow; only where the sole loss is the
-/// jet of a pure orifice does its slope touch 0, at Re 4000.
+/// jet of a pure orifice does its slope touch 0, at Re 4000. For a liquid with a yield stress the loss begins at the yield
+/// head Σ 4·τ_y·L/(ρ·g·D) of its runs, and a liquid at rest is taken at the point of moving.
 /// </remarks>
 public sealed class LineHydraulics
 {
@@ -19,6 +20,7 @@ public sealed class LineHydraulics
 
     private readonly LineNode[] nodes;
     private readonly LineLosses losses;
+    private readonly StressLosses? stress; // takes the place of losses for a liquid that is not Newtonian
     private readonly double parallel;
     private readonly double ownArea;
     private readonly double ownReynolds;
@@ -38,6 +40,8 @@ public sealed class LineHydraulics
         var compiled = new LineCompiler(line, liquid, gravity);
         nodes = compiled.Nodes;
         losses = compiled.Losses();
+        if (liquid.FlowCurve is { IsNewtonian: false } curve)
+            stress = new StressLosses(compiled, curve, liquid.Density);
         parallel = line.Parallel;
         ownArea = parallel * Area(line.Bore);
         ownReynolds = losses.Steps[0].ReynoldsPerFlow / parallel;
@@ -46,7 +50,7 @@ public sealed class LineHydraulics
         IsShut = compiled.IsShut;
         Inertance = compiled.Inertance / parallel;
         RegimeFlows = Array.AsReadOnly(Array.ConvertAll(
-            compiled.RegimeFlows(compiled.RegimeBores), flow => flow * parallel));
+            stress?.RegimeFlows ?? compiled.RegimeFlows(compiled.RegimeBores), flow => flow * parallel));
         CrestIndex = HighestOf(nodes);
         InnerLegVolume = parallel * compiled.Volumes[CrestIndex];
         LineVolume = parallel * compiled.Volumes[^1];
@@ -94,6 +98,9 @@ public sealed class LineHydraulics
     /// </summary>
     public IReadOnlyList<double> RegimeFlows { get; }
 
+    /// <summary>Head that the liquid's yield stress holds before anything flows, m; 0 for a liquid without one.</summary>
+    public double YieldHead => stress?.YieldHead ?? 0;
+
     /// <summary>Number of nodes; at least 1.</summary>
     public int NodeCount => nodes.Length;
 
@@ -106,7 +113,7 @@ public sealed class LineHydraulics
     public double HeadLoss(double flow) => HeadLoss(flow, out _);
 
     /// <summary>Head used up by a flow, m, and its slope.</summary>
-    /// <param name="flow">flow, m³/s; at least 0</param>
+    /// <param name="flow">flow, m³/s; at least 0, at which the yield head is used</param>
     /// <param name="slope">dH/dQ, s/m²; at no flow that of the laminar law</param>
     public double HeadLoss(double flow, out double slope)
     {
@@ -114,6 +121,12 @@ public sealed class LineHydraulics
         {
             slope = double.PositiveInfinity;
             return flow > 0 ? double.PositiveInfinity : 0;
+        }
+        if (stress is not null)
+        {
+            double used = stress.Used(NodeCount - 1, flow / parallel, out double usedRise);
+            slope = flow > 0 ? usedRise / flow : double.PositiveInfinity;
+            return used;
         }
         if (flow == 0)
         {
@@ -139,7 +152,7 @@ public sealed class LineHydraulics
         slope = 0;
         if (IsShut)
             return 0;
-        double flow = FlowSearch.Flow(losses, NodeCount - 1, head, guess / parallel, out slope);
+        double flow = FlowTo(NodeCount - 1, head, guess / parallel, out slope);
         slope *= parallel;
         return flow * parallel;
     }
@@ -152,9 +165,18 @@ public sealed class LineHydraulics
     /// <param name="flow">flow, m³/s</param>
     public double LargestVelocity(double flow) => flow / narrowestArea;
 
-    /// <summary>Reynolds number in the line's own bore, 1.</summary>
+    /// <summary>
+    /// Reynolds number in the line's own bore, 1; for a liquid that is not Newtonian that of laminar friction 64/Re.
+    /// </summary>
     /// <param name="flow">flow, m³/s</param>
-    public double Reynolds(double flow) => flow * ownReynolds;
+    public double Reynolds(double flow) => stress is null ? flow * ownReynolds : ReynoldsAt(0, flow);
+
+    /// <summary>Reynolds number in the bore of a node, 1.</summary>
+    /// <param name="node">from 0 to <see cref="NodeCount"/> − 1</param>
+    /// <param name="flow">flow, m³/s; at least 0</param>
+    public double ReynoldsAt(int node, double flow) => stress is null
+        ? flow / parallel * losses.Steps[node].ReynoldsPerFlow
+        : stress.Reynolds(node, Math.Abs(flow) / parallel);
 
     /// <summary>Water starting time Σ L·v/(g·H): in which the head alone would bring the line to the flow, s.</summary>
     /// <param name="flow">flow, m³/s</param>
@@ -169,9 +191,10 @@ public sealed class LineHydraulics
     /// <param name="pressures">receives <see cref="NodeCount"/> pressures</param>
     public void Pressures(double flow, double surface, double gasPressure, Span<double> pressures)
     {
-        var walk = new LossWalk(losses, flow / parallel);
-        while (walk.MoveNext())
-            pressures[walk.Node] = gasPressure + weight * (surface - (nodes[walk.Node].Elevation + walk.Used));
+        if (stress is null)
+            Pressures(new LossWalk(losses, flow / parallel), surface, gasPressure, pressures);
+        else
+            Pressures(new StressWalk(stress, flow / parallel), surface, gasPressure, pressures);
     }
 
     /// <summary>The least absolute pressure over the nodes before the outlet, Pa.</summary>
@@ -186,20 +209,9 @@ public sealed class LineHydraulics
     /// <param name="node">where it is; the first of equals</param>
     public double LowPointPressure(double flow, double surface, double gasPressure, out int node)
     {
-        double highest = double.NegativeInfinity;
-        node = 0;
-        var walk = new LossWalk(losses, flow / parallel);
-        int count = Math.Max(1, NodeCount - 1);
-        for (int i = 0; i < count; i++)
-        {
-            walk.MoveNext();
-            double lift = nodes[i].Elevation + walk.Used;
-            if (lift > highest)
-            {
-                highest = lift;
-                node = i;
-            }
-        }
+        double highest = stress is null
+            ? HighestLift(new LossWalk(losses, flow / parallel), out node)
+            : HighestLift(new StressWalk(stress, flow / parallel), out node);
         return gasPressure + weight * (surface - highest);
     }
 
@@ -221,11 +233,42 @@ public sealed class LineHydraulics
             if (pressure >= leastPressure || node == solved || flow == 0)
                 break;
             double head = (gasPressure - leastPressure) / weight + surface - nodes[node].Elevation;
-            double kept = FlowSearch.Flow(losses, node, head, flow / parallel, out _);
+            double kept = FlowTo(node, head, flow / parallel, out _);
             flow = Math.Min(flow, kept * parallel);
             solved = node;
         }
         return flow;
+    }
+
+    private double FlowTo(int node, double head, double guess, out double slope) => stress is null
+        ? FlowSearch.Flow(losses, node, head, guess, out slope)
+        : stress.Flow(node, head, guess, out slope);
+
+    private void Pressures<TWalk>(TWalk walk, double surface, double gasPressure, Span<double> pressures)
+        where TWalk : struct, ILossWalk
+    {
+        for (int i = 0; walk.MoveNext(); i++)
+            pressures[i] = gasPressure + weight * (surface - (nodes[i].Elevation + walk.Used));
+    }
+
+    /// <summary>The highest sum of elevation and head used over the nodes before the outlet, m.</summary>
+    private double HighestLift<TWalk>(TWalk walk, out int node)
+        where TWalk : struct, ILossWalk
+    {
+        double highest = double.NegativeInfinity;
+        node = 0;
+        int count = Math.Max(1, NodeCount - 1);
+        for (int i = 0; i < count; i++)
+        {
+            walk.MoveNext();
+            double lift = nodes[i].Elevation + walk.Used;
+            if (lift > highest)
+            {
+                highest = lift;
+                node = i;
+            }
+        }
+        return highest;
     }
 
     private static double Area(double bore) => Math.PI / 4 * bore * bore;

@@ -3,7 +3,7 @@ namespace DrainSim.Lines;
 /// <summary>Walks along a line at one flow and adds up the loss, node by node.</summary>
 /// <param name="losses">the line</param>
 /// <param name="q">flow of one line, m³/s; at least 0</param>
-internal struct LossWalk(LineLosses losses, double q)
+internal struct LossWalk(LineLosses losses, double q) : ILossWalk
 {
     private int wall = -1;
     private double factor;
@@ -14,13 +14,13 @@ internal struct LossWalk(LineLosses losses, double q)
     /// <summary>The node reached; −1 before the first.</summary>
     public int Node { get; private set; } = -1;
 
-    /// <summary>Head used up to the node, its velocity head included, m.</summary>
+    /// <inheritdoc/>
     public double Used { get; private set; }
 
     /// <summary>q times the derivative of <see cref="Used"/> by q, m.</summary>
     public double UsedRise { get; private set; }
 
-    /// <summary>Goes on to the next node; false behind the last.</summary>
+    /// <inheritdoc/>
     public bool MoveNext()
     {
         if (++Node >= losses.Count)

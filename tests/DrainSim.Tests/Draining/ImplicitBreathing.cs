@@ -34,7 +34,7 @@ internal sealed record ImplicitBreathing(double Area, double Height, double Leve
         {
             double outflow = Outflow(gas, p), inflow = VentFlow(p);
             double gasNow = gas, massNow = mass;
-            p = Brent.FindRoot(next => Residual(next) / Area, p - 500, p + 500, 1e-9);
+            p = Brent.FindRoot(next => Residual(next) / Area, p - 500, p + 500, 1e-13);
             mass = MassAfter(p);
             gas = mass * Air * Temperature / (p - Vapour);
 

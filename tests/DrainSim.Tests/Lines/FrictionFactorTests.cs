@@ -5,8 +5,8 @@ using DrainSim.Tests.Liquids;
 namespace DrainSim.Tests.Lines;
 
 /// <summary>
-/// Friction factors against the check table, whose rows name their source and tolerance. Its rows of Churchill's
-/// formula and of other rheologies are for laws that are not in the library.
+/// Friction factors of Newtonian liquids against the check table, whose rows name their source and tolerance. Its rows of
+/// Churchill's formula are for a law that lines do not use.
 /// </summary>
 public sealed class FrictionFactorTests
 {

@@ -21,6 +21,10 @@ internal static class CheckTable
     public static double Number(this IReadOnlyDictionary<string, string> row, string column) =>
         NumberText.TryRead(row[column], out double value) ? value : throw new InvalidDataException(row[column]);
 
+    /// <summary>The number in a column, or another where the column is empty.</summary>
+    public static double Number(this IReadOnlyDictionary<string, string> row, string column, double otherwise) =>
+        row[column].Length == 0 ? otherwise : row.Number(column);
+
     /// <summary>One line on a row that our value misses, or null where it is met.</summary>
     public static string? Miss(this IReadOnlyDictionary<string, string> row, double expected, double actual)
     {

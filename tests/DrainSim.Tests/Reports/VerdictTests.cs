@@ -78,6 +78,11 @@ public sealed class VerdictTests
         "Never starts: the crest stands 34.1 ft above the level, and no column higher than 33.1 ft holds together.");
 
     [Fact]
+    public void A_yield_stress_holds() => AssertSentence(Never(NoStart.YieldHolds),
+        "Never starts: the liquid's yield stress holds it at the level of 2.6 m.",
+        "Never starts: the liquid's yield stress holds it at the level of 8.53 ft.");
+
+    [Fact]
     public void A_valve_is_shut() => AssertSentence(Never(NoStart.ValveShut),
         "Never starts: a valve on the line is shut.",
         "Never starts: a valve on the line is shut.");

@@ -177,6 +177,24 @@ public sealed class GoodScenarioTests
     }
 
     [Fact]
+    public void Every_rheology_is_read_without_a_viscosity()
+    {
+        Assert.Equal(new PowerLaw { Consistency = 2.5, FlowIndex = 0.6 }, Of("model: power_law, consistency: 2500 mPa.s^n, flow_index: 60 %"));
+        Assert.Equal(new Bingham { YieldStress = 12, PlasticViscosity = 0.04 }, Of("model: bingham, yield_stress: 120 dyn/cm2, plastic_viscosity: 40 cP"));
+        Assert.Equal(new HerschelBulkley { YieldStress = 3, Consistency = 0.5, FlowIndex = 0.4 },
+            Of("model: herschel_bulkley, yield_stress: 3 Pa, consistency: 0.5 Pa s^n, flow_index: 0.4"));
+        Assert.Equal(new Newtonian(), Read(GoodScenario.With("temperature: 18 degC", "temperature: 18 degC\n  rheology: {model: newtonian}")).Scenario!.Job.Liquid.Rheology);
+
+        static Rheology Of(string rheology)
+        {
+            ScenarioReading reading = Read(GoodScenario.With(
+                "  name: water\n  temperature: 18 degC", $"  density: 1100 kg/m3\n  vapour_pressure: 2 kPa\n  rheology: {{{rheology}}}"));
+            Assert.Equal("", ProblemReport.Refusal(reading));
+            return reading.Scenario!.Job.Liquid.Rheology;
+        }
+    }
+
+    [Fact]
     public void An_inlet_above_the_level_is_left_to_the_run() =>
         Assert.False(Read(GoodScenario.With("elevation: 50 mm", "elevation: 2.8 m")).IsRefused);
 

@@ -11,6 +11,9 @@ public abstract class Problem : IOdeSystem, IEventSet
 
     public int Dimension => InitialState.Length;
 
+    /// <summary>Whether it is stepped implicitly, as a test says.</summary>
+    public bool IsStiff { get; set; }
+
     public int EventCount => events.Count;
 
     /// <summary>Answers a restart; goes on unchanged unless a test says otherwise.</summary>
@@ -19,6 +22,30 @@ public abstract class Problem : IOdeSystem, IEventSet
     public abstract void Exact(double t, Span<double> y);
 
     public abstract void Derivative(double t, ReadOnlySpan<double> y, Span<double> dydt);
+
+    /// <summary>By central differences; the cube root of the last bit balances both of their errors.</summary>
+    public virtual void Jacobian(
+        double t, ReadOnlySpan<double> y, ReadOnlySpan<double> dydt, Span<double> byState, Span<double> byTime)
+    {
+        const double share = 6e-6;
+        double[] at = y.ToArray(), more = new double[Dimension], less = new double[Dimension];
+        for (int j = 0; j < Dimension; j++)
+        {
+            double probe = share * Math.Max(Math.Abs(y[j]), 1);
+            at[j] = y[j] + probe;
+            Derivative(t, at, more);
+            at[j] = y[j] - probe;
+            Derivative(t, at, less);
+            at[j] = y[j];
+            for (int i = 0; i < Dimension; i++)
+                byState[i * Dimension + j] = (more[i] - less[i]) / (2 * probe);
+        }
+
+        Derivative(t + share, y, more);
+        Derivative(t - share, y, less);
+        for (int i = 0; i < Dimension; i++)
+            byTime[i] = (more[i] - less[i]) / (2 * share);
+    }
 
     public virtual void ErrorScale(double t, ReadOnlySpan<double> y, ReadOnlySpan<double> dydt, Span<double> scale) =>
         ErrorScales.Magnitude(y, 1e-3, scale);
