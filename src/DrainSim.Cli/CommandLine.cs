@@ -70,6 +70,10 @@ internal static class CommandLine
         {
             new RunCommand(),
             new CheckCommand(),
+            new SweepCommand(),
+            new SizeCommand(),
+            new UncertaintyCommand(),
+            new ForecastCommand(),
             new NewCommand(),
             new LiquidsCommand(),
             new FittingsCommand(),

@@ -58,7 +58,7 @@ internal sealed class HelpWithExamples : SynchronousCommandLineAction
         output.WriteLine();
         output.WriteLine("Exit codes:");
         output.WriteLine("  0    the job ran, whatever its outcome");
-        output.WriteLine("  1    a limit of the scenario was broken, or --expect was not met");
+        output.WriteLine("  1    a limit of the scenario was broken, --expect was not met, or no size was found");
         output.WriteLine("  2    the scenario or the command line was refused; nothing was run");
         output.WriteLine("  3    an output could not be written");
         output.WriteLine("  70   a fault of the program itself");

@@ -30,6 +30,19 @@ public static class Nearest
         return best;
     }
 
+    /// <summary>The known words with the fewest edits from the text, the nearest first.</summary>
+    /// <param name="text">the word as written</param>
+    /// <param name="known">the words that would have been right; the first of equals is taken</param>
+    /// <param name="most">how many</param>
+    public static IReadOnlyList<string> Several(string text, IEnumerable<string> known, int most)
+    {
+        ArgumentNullException.ThrowIfNull(text);
+        return text.Length is 0 or > LongestWord
+            ? []
+            : [.. known.Where(word => word.Length <= LongestWord)
+                .OrderBy(word => Edits(text.ToLowerInvariant(), word.ToLowerInvariant())).Take(most)];
+    }
+
     /// <summary>
     /// Letters to insert, delete, replace or swap with a neighbour so that one word becomes the
     /// other: the optimal string alignment distance (Damerau 1964, each letter edited once).

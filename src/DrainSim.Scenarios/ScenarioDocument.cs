@@ -1,5 +1,6 @@
 using System.Text;
 using DrainSim.Scenarios.Reading;
+using DrainSim.Scenarios.Studies;
 using DrainSim.Scenarios.Yaml;
 
 namespace DrainSim.Scenarios;
@@ -14,6 +15,12 @@ public sealed class ScenarioDocument
 {
     /// <summary>Largest file that is read, bytes.</summary>
     public const int LargestFile = 1 << 20;
+
+    /// <summary>What is said of a path that leads nowhere.</summary>
+    internal const string NoSuchParameter = "no such parameter";
+
+    /// <summary>What is said of a key that nobody asks for.</summary>
+    internal const string NoSuchKey = "no such key";
 
     private readonly SourceText source;
     private readonly IReadOnlyList<Problem> problems;
@@ -83,9 +90,46 @@ public sealed class ScenarioDocument
         if (ParameterPath.Set(root, path, text) is { } changed)
             return new ScenarioDocument(FileName, Folder, source, changed, problems);
         string help = Nearest.Find(path, Parameters) is { } near ? $"did you mean {Quote.Of(near)}?" : "'drainsim check' lists them";
-        Problem problem = new(0, 0, Quote.Plain(path), "no such parameter", help);
+        Problem problem = new(0, 0, Quote.Plain(path), NoSuchParameter, help);
         return new ScenarioDocument(FileName, Folder, source, root, [.. problems, problem]);
     }
+
+    /// <summary>What stands at a dotted path; null when nothing does.</summary>
+    internal Node? Find(string path) => root is null ? null : ParameterPath.Find(root, path);
+
+    /// <summary>The path as the reading calls it.</summary>
+    internal string WholePath(string path) => root is null ? path : ParameterPath.Whole(root, path);
+
+    /// <summary>The block of a study; what is wrong with its form is a problem.</summary>
+    internal StudyBlock StudyBlock(string key, List<Problem> found)
+    {
+        if (root is null)
+            return new StudyBlock();
+        Findings findings = new(source);
+        StudyBlock block = Scenarios.Studies.StudyBlock.Read(new BlockReader(root, "", root.At, findings), key);
+        found.AddRange(findings.Problems);
+        return block;
+    }
+
+    /// <summary>The block of a study as its own reader takes it; what is wrong with its form is a problem.</summary>
+    /// <param name="read">reads the block from the whole file</param>
+    /// <param name="none">what stands for a file that could not be read at all</param>
+    /// <param name="found">takes the problems</param>
+    internal T StudyBlock<T>(Func<BlockReader, T> read, T none, List<Problem> found)
+    {
+        if (root is null)
+            return none;
+        Findings findings = new(source);
+        T block = read(new BlockReader(root, "", root.At, findings));
+        found.AddRange(findings.Problems);
+        return block;
+    }
+
+    /// <summary>The document without the blocks of its studies, which its job does not need.</summary>
+    internal ScenarioDocument WithoutStudies() => root is null || !root.Entries.Any(entry => ParameterPath.IsStudy(entry.Key))
+        ? this
+        : new ScenarioDocument(FileName, Folder, source,
+            root with { Entries = [.. root.Entries.Where(entry => !ParameterPath.IsStudy(entry.Key))] }, problems);
 
     /// <summary>Reads the document into a job, or into everything that is wrong with it.</summary>
     public ScenarioReading Read()
@@ -101,6 +145,7 @@ public sealed class ScenarioDocument
             Problems = findings.Problems,
             Untold = findings.Untold,
             Warnings = findings.Warnings,
+            Understood = findings.Understood,
         };
     }
 }

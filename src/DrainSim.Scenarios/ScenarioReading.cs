@@ -20,6 +20,9 @@ public sealed record ScenarioReading
     /// <summary>What is suspicious, in file order; also for a refused scenario.</summary>
     public IReadOnlyList<Problem> Warnings { get; init; } = [];
 
+    /// <summary>Everything that was understood, also of a refused scenario.</summary>
+    internal IReadOnlyList<UnderstoodValue> Understood { get; init; } = [];
+
     /// <summary>Whether there is no scenario.</summary>
     [MemberNotNullWhen(false, nameof(Scenario))]
     public bool IsRefused => Scenario is null;

@@ -21,6 +21,17 @@ internal sealed class TestFolder : IDisposable
         File.WriteAllText(Full(name), text);
     }
 
+    public void WriteBytes(string name, byte[] bytes) => File.WriteAllBytes(Full(name), bytes);
+
+    /// <summary>Takes a file, or a folder with all in it, away.</summary>
+    public void Delete(string name)
+    {
+        if (Directory.Exists(Full(name)))
+            Directory.Delete(Full(name), recursive: true);
+        else
+            File.Delete(Full(name));
+    }
+
     public string Read(string name) => File.ReadAllText(Full(name));
 
     public byte[] Bytes(string name) => File.ReadAllBytes(Full(name));

@@ -31,10 +31,8 @@ internal sealed class AxisTicks
 
     private AxisTicks(double[] positions, string[] labels) => (Positions, Labels) = (positions, labels);
 
-    private AxisTicks() => (Positions, Labels) = ([], []);
-
     /// <summary>An axis without ticks.</summary>
-    public static AxisTicks None { get; } = new();
+    public static AxisTicks None { get; } = new([], []);
 
     /// <summary>Where the ticks stand, in the axis's unit.</summary>
     public double[] Positions { get; }
@@ -48,6 +46,29 @@ internal sealed class AxisTicks
     /// <param name="count">most steps that fit</param>
     public static AxisTicks Decimal(double least, double most, int count) =>
         new(least, most, DecimalStep((most - least) / count));
+
+    /// <summary>Ticks at a few multiples of the powers of ten, on an axis of the values' decimal logarithms.</summary>
+    /// <param name="least">logarithm at the lower end of the axis</param>
+    /// <param name="most">logarithm at the upper end</param>
+    public static AxisTicks Logarithmic(double least, double most)
+    {
+        double[] values = [.. from power in Enumerable.Range((int)Math.Floor(least), (int)(Math.Ceiling(most) - Math.Floor(least)) + 1)
+            from digit in most - least > 3 ? (double[])[1] : most - least > 1 ? [1, 2, 5] : [1, 1.5, 2, 3, 4, 5, 6, 8]
+            let value = digit * Math.Pow(10, power)
+            where Math.Log10(value) >= least - 1e-9 && Math.Log10(value) <= most - HeadRoom * (most - least)
+            select value];
+        return new([.. values.Select(Math.Log10)], [.. values.Select(value => value.ToString("G6", CultureInfo.InvariantCulture))]);
+    }
+
+    /// <summary>Ticks at given values.</summary>
+    /// <param name="values">the values</param>
+    public static AxisTicks At(double[] values) =>
+        new(values, [.. values.Select(value => value.ToString("G5", CultureInfo.InvariantCulture).Replace('-', '−'))]);
+
+    /// <summary>A tick for each word, at 0, 1, 2 and so on.</summary>
+    /// <param name="words">the words</param>
+    public static AxisTicks Words(IReadOnlyList<string> words) =>
+        new([.. Enumerable.Range(0, words.Count).Select(i => (double)i)], [.. words]);
 
     /// <summary>Ticks of a time axis from 0, at steps that people count in.</summary>
     /// <param name="unit">the axis's unit</param>

@@ -30,13 +30,17 @@ internal static class PageText
 
     /// <summary>Writes title and subtitle.</summary>
     /// <returns>where the room below them begins, px</returns>
-    public static float Head(Sheet sheet, RunReport report, string subtitle)
+    public static float Head(Sheet sheet, RunReport report, string subtitle) => Head(sheet, report.Title, subtitle);
+
+    /// <summary>Writes title and subtitle.</summary>
+    /// <returns>where the room below them begins, px</returns>
+    public static float Head(Sheet sheet, string title, string subtitle)
     {
         float width = sheet.Width - 2 * Edge;
         float y = 26;
-        bool isLong = Sheet.Wrap(report.Title, TitleLook, width, 3).Count > 2;
+        bool isLong = Sheet.Wrap(title, TitleLook, width, 3).Count > 2;
         foreach ((string text, TextLook look) in
-            ((string, TextLook)[])[(report.Title, isLong ? LongTitleLook : TitleLook), (subtitle, VerdictLook)])
+            ((string, TextLook)[])[(title, isLong ? LongTitleLook : TitleLook), (subtitle, VerdictLook)])
         {
             foreach (string line in Sheet.Wrap(text, look, width, 4))
             {
@@ -53,6 +57,12 @@ internal static class PageText
     {
         string plant = $"{job.Liquid.Name} at {format.Temperature(job.Liquid.Temperature)} · "
             + (job.DrawOffs.Count > 1 ? SeveralLines(job, format) : OneLine(job.Line, format));
+        Foot(sheet, plant);
+    }
+
+    /// <summary>Writes the foot: a line of what the page is of, and what it is not.</summary>
+    public static void Foot(Sheet sheet, string plant)
+    {
         string note = $"DrainSim {Series.ResultDocument.Version} · quasi-steady · informs, authorises nothing";
         float y = sheet.Height - 50;
         foreach (string text in (ReadOnlySpan<string>)[plant, note])

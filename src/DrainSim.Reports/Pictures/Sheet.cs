@@ -92,6 +92,13 @@ internal sealed class Sheet : IDisposable
         Canvas.DrawLine(from, to, paint);
     }
 
+    /// <summary>A filled rectangle.</summary>
+    public void Fill(SKRect place, SKColor color)
+    {
+        using var paint = new SKPaint { Color = color, IsAntialias = false };
+        Canvas.DrawRect(place, paint);
+    }
+
     /// <summary>A dot with a rim of paper.</summary>
     public void Dot(SKPoint at, float radius, SKColor color)
     {

@@ -22,6 +22,9 @@ internal sealed class BlockReader(BlockNode node, string path, Position at, Find
     /// <summary>What the reading gathers.</summary>
     public Findings Findings => findings;
 
+    /// <summary>Its keys with their values, for a block whose keys are no fixed words.</summary>
+    public IReadOnlyList<Entry> Entries => node.Entries;
+
     /// <summary>Dotted path of a key.</summary>
     public string PathOf(string key) => path.Length == 0 ? key : $"{path}.{key}";
 
@@ -219,9 +222,8 @@ internal sealed class BlockReader(BlockNode node, string path, Position at, Find
         foreach (Entry entry in node.Entries.Where(entry => !asked.Contains(entry.Key)))
         {
             string? near = findings.IsFull ? null : Nearest.Find(entry.Key, asked);
-            string? later = LaterWork.Find(PathOf(entry.Key));
-            string help = later ?? (near is null ? $"The keys here are {string.Join(", ", asked)}" : $"did you mean {Quote.Of(near)}?");
-            findings.Refuse(entry.KeyAt, PathOf(Quote.Plain(entry.Key)), later is null ? "no such key" : "not read by this version", help);
+            string help = near is null ? $"The keys here are {string.Join(", ", asked)}" : $"did you mean {Quote.Of(near)}?";
+            findings.Refuse(entry.KeyAt, PathOf(Quote.Plain(entry.Key)), ScenarioDocument.NoSuchKey, help);
             if (near is not null)
                 meant.Add(near);
         }

@@ -1,5 +1,6 @@
 using DrainSim.Draining;
 using DrainSim.Liquids;
+using DrainSim.Scenarios.Studies;
 using DrainSim.Scenarios.Yaml;
 
 namespace DrainSim.Scenarios.Reading;
@@ -15,6 +16,7 @@ internal static class JobReader
         string? notes = file.Word("notes");
         (Job? start, RunBlock run) = ReadJob(file, title, folder);
         List<Act> acts = TimelineReader.Read(file, root, start, (changed, found) => Changed(changed, title, folder, found));
+        StudyBlock.Check(file);
         file.Finish();
         return start is null ? null : new Scenario
         {

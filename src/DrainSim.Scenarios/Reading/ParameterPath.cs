@@ -6,6 +6,26 @@ namespace DrainSim.Scenarios.Reading;
 /// <summary>Finds a value in a scenario's tree by its dotted path.</summary>
 internal static class ParameterPath
 {
+    private static readonly string[] Studies = ["sweep", "size", "uncertainty", "forecast"];
+
+    /// <summary>Keys of which only one may stand in a block: setting one takes the place of the others.</summary>
+    private static readonly string[][] Rivals =
+    [
+        ["level", "contents", "fill"],
+        ["bore", "size"],
+        ["bore", "schedule"],
+        ["roughness", "material"],
+        ["edge", "loss"],
+        ["viscosity", "kinematic_viscosity"],
+        ["altitude", "atmospheric_pressure"],
+        ["to", "rise"],
+        ["kv", "cv"],
+        ["stop_at_level", "stop_at_volume"],
+    ];
+
+    /// <summary>Whether a key of the file holds a study and nothing of the job.</summary>
+    public static bool IsStudy(string key) => Studies.Contains(key);
+
     /// <summary>How an item of a list is called: by its name, or by its place from 1.</summary>
     /// <param name="list">path of the list</param>
     /// <param name="item">the item</param>
@@ -18,19 +38,47 @@ internal static class ParameterPath
     public static List<string> All(BlockNode root)
     {
         List<string> paths = [];
-        Collect(root, "", paths);
+        foreach (Entry entry in root.Entries.Where(entry => !IsStudy(entry.Key)))
+            Collect(entry.Value, entry.Key, paths);
         return paths;
+    }
+
+    /// <summary>What stands at a path; null when nothing does.</summary>
+    public static Node? Find(BlockNode root, string path)
+    {
+        Node? node = root;
+        foreach (string step in StepsOf(Whole(root, path)))
+        {
+            node = node switch
+            {
+                BlockNode block => block.Find(step)?.Value,
+                ListNode list => list.Items.Where((item, index) => IsCalled(item, index, step)).FirstOrDefault(),
+                _ => null,
+            };
+        }
+
+        return node;
     }
 
     /// <summary>The tree with one value set; missing keys are added. Null when the path leads nowhere.</summary>
     public static BlockNode? Set(BlockNode root, string path, string text)
     {
-        string[] steps = path.Replace("[", ".[", StringComparison.Ordinal).Split('.');
-        // What a tank is fitted with may be called without the tank.
-        if (steps[0] is "headspace" or "inflow" && root.Find(steps[0]) is null)
-            steps = ["tank", .. steps];
+        string[] steps = StepsOf(Whole(root, path));
         return steps.Any(step => step.Length == 0) ? null : Set(root, steps, text) as BlockNode;
     }
+
+    /// <summary>The path as the reading calls it: what a tank is fitted with may be called without the tank.</summary>
+    public static string Whole(BlockNode root, string path)
+    {
+        int end = path.IndexOf('.', StringComparison.Ordinal);
+        string first = end < 0 ? path : path[..end];
+        return first is "headspace" or "inflow" && root.Find(first) is null ? "tank." + path : path;
+    }
+
+    private static string[] StepsOf(string path) => path.Replace("[", ".[", StringComparison.Ordinal).Split('.');
+
+    private static bool IsCalled(Node item, int index, string step) =>
+        step == NameOf(item) || step == string.Create(CultureInfo.InvariantCulture, $"[{index + 1}]");
 
     private static Node? Set(Node node, ReadOnlySpan<string> steps, string text)
     {
@@ -54,18 +102,19 @@ internal static class ParameterPath
         if (key[0] == '[' || Set(old, steps[1..], text) is not { } value)
             return null;
         return entry is null
-            ? block with { Entries = [.. block.Entries, new Entry(key, Position.Outside, value)] }
+            ? block with { Entries = [.. block.Entries.Where(e => !AreRivals(e.Key, key)), new Entry(key, Position.Outside, value)] }
             : block with { Entries = [.. block.Entries.Select(e => e.Key == key ? e with { Value = value } : e)] };
     }
+
+    private static bool AreRivals(string one, string other) =>
+        one != other && Rivals.Any(rivals => rivals.Contains(one) && rivals.Contains(other));
 
     private static ListNode? InList(ListNode list, ReadOnlySpan<string> steps, string text)
     {
         Node[] items = [.. list.Items];
         for (int i = 0; i < items.Length; i++)
         {
-            bool isMeant = steps[0] == NameOf(items[i])
-                || steps[0] == string.Create(CultureInfo.InvariantCulture, $"[{i + 1}]");
-            if (!isMeant)
+            if (!IsCalled(items[i], i, steps[0]))
                 continue;
             if (Set(items[i], steps[1..], text) is not { } item)
                 return null;

@@ -38,7 +38,11 @@ internal static class StrappingFileReader
         return Rows(new StrappingFile(block, Quote.Plain(name), new SourceText(text)), text);
     }
 
-    private static bool IsWithin(string folder, string name, out string path)
+    /// <summary>Whether a file named in a scenario lies in the scenario's folder.</summary>
+    /// <param name="folder">the folder</param>
+    /// <param name="name">the file as it is named</param>
+    /// <param name="path">its full path</param>
+    public static bool IsWithin(string folder, string name, out string path)
     {
         path = "";
         if (Path.IsPathRooted(name) || name.Contains('\0', StringComparison.Ordinal) || name.Contains('\\', StringComparison.Ordinal))

@@ -31,6 +31,23 @@ public static class SizeTable
             ?? All.FirstOrDefault(row => IsCalled(row, wanted) && SameSchedule(row, schedule));
     }
 
+    /// <summary>The rows next to a bore: of hose and of pipe the largest that is no wider and the smallest that is no narrower.</summary>
+    /// <param name="bore">inside diameter, m</param>
+    /// <param name="isOffered">whether a row is to be had</param>
+    public static IReadOnlyList<PipeSize> Beside(double bore, Func<PipeSize, bool> isOffered)
+    {
+        List<PipeSize> beside = [];
+        foreach (IGrouping<string, PipeSize> kind in All.Where(isOffered).GroupBy(row => row.Kind))
+        {
+            if (kind.Where(row => row.Bore <= bore).MaxBy(row => row.Bore) is { } below)
+                beside.Add(below);
+            if (kind.Where(row => row.Bore >= bore).MinBy(row => row.Bore) is { } above && !beside.Contains(above))
+                beside.Add(above);
+        }
+
+        return beside;
+    }
+
     private static bool IsCalled(PipeSize row, string size) =>
         Same(row.Nominal, size) || (row.NominalInches is { } inches && Same(inches, size));
 
