@@ -6,8 +6,8 @@ namespace DrainSim.Draining;
 /// <summary>The balance of a tank, its lines, their receivers and its gas, as the integrator steps it.</summary>
 /// <remarks>
 /// State: y[i] is the volume that line i has taken out of the tank, m³, so that its slope is the line's flow, the volume in
-/// the tank is V = V₀ + ∫inflow − Σy[i] and that in a receiver Vr₀ + y[i]: the balance closes by construction. Where gas
-/// comes and goes its pressure, Pa, is the last component: not its mass, of which the pressure that drives the vent would be a
+/// the tank is V = V₀ + ∫inflow − Σy[i] and that in a receiver Vr₀ + y[i]: the balance closes by construction. Where a
+/// confined gas has more than one line to answer to, its pressure, Pa, is the last component: not its mass, of which the pressure that drives the vent would be a
 /// difference of near equals, kept by a balance of stiff terms at every trial state. What is watched on the way and the slopes for implicit steps
 /// stand in the other parts of the class.
 /// </remarks>
@@ -32,7 +32,8 @@ internal sealed partial class DrainModel : IOdeSystem
         LineCount = plant.Lines.Length;
         StartVolume = vessel.Volume(Job.Level);
         plantsAfter = [.. Job.Timeline.Select(act => new Plant(act.After))];
-        hasPressure = plantsAfter.Append(plant).Any(p => p.Gas.Breathes || (plantsAfter.Length > 0 && p.Gas.IsConfined));
+        bool oneLineAlone = LineCount == 1 && Job.Inflow is null && plantsAfter.Length == 0;
+        hasPressure = plantsAfter.Append(plant).Any(p => p.Gas.Breathes || (p.Gas.IsConfined && !oneLineAlone));
         StartMass = plant.Gas.StartMass;
         guesses = new double[LineCount];
         watches = WatchList.Of(plant, TargetVolume);
