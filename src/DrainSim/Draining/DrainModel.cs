@@ -186,7 +186,7 @@ internal sealed partial class DrainModel : IOdeSystem
         for (int i = 0; i < LineCount; i++)
         {
             CompiledLine line = now.Plant.Lines[i];
-            double toRest = vessel.Area(surface) * Math.Abs(line.Head(surface, gas, y[i]));
+            double toRest = vessel.Area(surface) * Math.Abs(RestHead(line, surface, gas, y[i]));
             double toAir = Math.Max(0, volume - line.UncoverVolume);
             scale[i] = Math.Max(1e-12 * vessel.Capacity, Math.Abs(dydt[i]) * t + Math.Min(toRest, toAir));
         }

@@ -145,6 +145,7 @@ public sealed class BreathingTankTests
     }
 
     /// <summary>What events are located on: between its steps too a run is the one that a tighter tolerance gives.</summary>
+    /// <remarks>A step may be 1e-8 of the 8 m³ to come off, and 1e-8 of an atmosphere: some ten of either.</remarks>
     [Theory]
     [InlineData(0.002)]
     [InlineData(0.02)]
@@ -159,7 +160,7 @@ public sealed class BreathingTankTests
             double t = step.Start + (i % 4) / 4.0 * (step.End - step.Start);
             coarse.Evaluate(t, y);
             fine.Evaluate(t, exact);
-            Assert.Equal(exact[0], y[0], 1e-7);
+            Assert.Equal(exact[0], y[0], 1e-6);
             Assert.Equal(exact[1], y[1], 1e-2);
         }
 
