@@ -218,7 +218,7 @@ internal sealed partial class DrainModel : IEventSet
                 : 1,
             WatchKind.FrontStops => now.Modes[watch.Line].IsFilling ? flow / flowScales[watch.Line] : 1,
             WatchKind.LiftExhausts => line.Margin(0, at.Surface, at.Gas) / line.SpecificWeight - run.SettledWithin,
-            WatchKind.HeadSettles => Unsettled(RestHead(line, at, delivered), line.Hydraulics.YieldHead),
+            WatchKind.HeadSettles => Unsettled(RestHead(line, at.Surface, at.Gas, delivered), line.Hydraulics.YieldHead),
             WatchKind.AllSettle => IsFed(at.Time) ? 1 : LargestHead(at, y) - run.SettledWithin,
             WatchKind.BoreUncovers => BoreCover(line.InletLimit(at.Surface), flow),
             WatchKind.OutletCovers => line.ReceiverSurface(delivered) - line.Hydraulics.OutletElevation,
@@ -238,12 +238,12 @@ internal sealed partial class DrainModel : IEventSet
     /// The head that has to be used up before a line rests, m. Under a vent that lets air in at any vacuum the vacuum wears
     /// off: there the liquid's own head has to be used up too, however small the driving head is meanwhile.
     /// </summary>
-    private double RestHead(CompiledLine line, in Moment at, double delivered)
+    private double RestHead(CompiledLine line, double surface, double gas, double delivered)
     {
-        double head = line.Head(at.Surface, at.Gas, delivered);
+        double head = line.Head(surface, gas, delivered);
         if (!now.Plant.Gas.LosesVacuum)
             return head;
-        double liquid = at.Surface - line.OutletLevel(delivered);
+        double liquid = surface - line.OutletLevel(delivered);
         return Math.Abs(liquid) > Math.Abs(head) ? liquid : head;
     }
 
@@ -292,7 +292,7 @@ internal sealed partial class DrainModel : IEventSet
             if (now.Modes[i] is { IsFilling: true, IsAtWork: true })
                 return 1 + run.SettledWithin; // a column on its way does not rest
             if (now.Modes[i].IsAtWork)
-                largest = Math.Max(largest, Math.Abs(RestHead(now.Plant.Lines[i], at, y[i])) - now.Plant.Lines[i].Hydraulics.YieldHead);
+                largest = Math.Max(largest, Math.Abs(RestHead(now.Plant.Lines[i], at.Surface, at.Gas, y[i])) - now.Plant.Lines[i].Hydraulics.YieldHead);
         }
 
         return largest;
