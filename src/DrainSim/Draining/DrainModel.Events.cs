@@ -92,7 +92,10 @@ internal sealed partial class DrainModel : IEventSet
         _ => EventDirection.Falling,
     };
 
-    /// <summary>The front goes on into the next segment; behind the last the line runs full, its flow that of its head.</summary>
+    /// <summary>
+    /// The front goes on into the next segment; behind the last the line runs full, its flow from then on that of its head. A
+    /// column that reaches the limit at its low point on the way parts, also where a full line would hold its flow there.
+    /// </summary>
     private void Advance(int line, double t, Span<double> y)
     {
         LineMode mode = now.Modes[line];
@@ -114,6 +117,12 @@ internal sealed partial class DrainModel : IEventSet
         bool massIsKnown = now.Plant.Gas is { IsConfined: true, IsSteady: false };
         if (hasMass && after.Gas.IsConfined && !massIsKnown)
             y[LineCount] = after.Gas.MassAt(GasPressure(now, t, Volume(now, t, y), y), Volume(now, t, y));
+        for (int i = 0; i < LineCount; i++)
+        {
+            if (flowAt[i] > 0 && after.Lines[i].Hydraulics.IsShut)
+                y[flowAt[i]] = 0; // a valve stops the column where it is
+        }
+
         return now.With(t, after);
     }
 
@@ -170,7 +179,7 @@ internal sealed partial class DrainModel : IEventSet
             WatchKind.FrontArrives => now.Modes[watch.Line] is { IsFilling: true, Segment: var segment }
                 ? line.Filling!.Beyond(segment, delivered)
                 : 1,
-            WatchKind.FrontStops => now.Modes[watch.Line].IsFilling ? flow / flowScales[watch.Line] : 1,
+            WatchKind.FrontStops => now.Modes[watch.Line].IsFilling && !line.Hydraulics.IsShut ? flow / flowScales[watch.Line] : 1,
             WatchKind.LiftExhausts => line.Margin(0, at.Surface, at.Gas) / line.SpecificWeight - run.SettledWithin,
             WatchKind.HeadSettles => Unsettled(RestHead(line, at, delivered), line.Hydraulics.YieldHead),
             WatchKind.AllSettle => IsFed(at.Time) ? 1 : LargestHead(at, y) - run.SettledWithin,
