@@ -130,7 +130,10 @@ internal sealed partial class DrainModel : IEventSet
         _ => EventDirection.Falling,
     };
 
-    /// <summary>The front goes on into the next segment; behind the last the line runs full, its flow that of its head.</summary>
+    /// <summary>
+    /// The front goes on into the next segment; behind the last the line runs full, its flow from then on that of its head. A
+    /// column that reaches the limit at its low point on the way parts, also where a full line would hold its flow there.
+    /// </summary>
     private void Advance(int line, double t, Span<double> y)
     {
         LineMode mode = now.Modes[line];
@@ -154,6 +157,9 @@ internal sealed partial class DrainModel : IEventSet
         Epoch next = now.With(t, after);
         for (int i = 0; i < LineCount; i++)
         {
+            if (flowAt[i] > 0 && after.Lines[i].Hydraulics.IsShut)
+                y[flowAt[i]] = 0; // a valve stops the column where it is
+
             // Where an act gives a line that still fills other parts, its front goes on from the nearest of them.
             int last = (after.Lines[i].Filling?.SegmentCount ?? 0) - 1;
             if (now.Modes[i].IsFilling && now.Modes[i].Segment > last)
@@ -216,7 +222,7 @@ internal sealed partial class DrainModel : IEventSet
             WatchKind.FrontArrives => now.Modes[watch.Line] is { IsFilling: true, Segment: var segment }
                 ? line.Filling!.Beyond(segment, delivered)
                 : 1,
-            WatchKind.FrontStops => now.Modes[watch.Line].IsFilling ? flow / flowScales[watch.Line] : 1,
+            WatchKind.FrontStops => now.Modes[watch.Line].IsFilling && !line.Hydraulics.IsShut ? flow / flowScales[watch.Line] : 1,
             WatchKind.LiftExhausts => line.Margin(0, at.Surface, at.Gas) / line.SpecificWeight - run.SettledWithin,
             WatchKind.HeadSettles => Unsettled(RestHead(line, at.Surface, at.Gas, delivered), line.Hydraulics.YieldHead),
             WatchKind.AllSettle => IsFed(at.Time) ? 1 : LargestHead(at, y) - run.SettledWithin,
