@@ -5,7 +5,6 @@ internal static class LaterWork
 {
     private static readonly Dictionary<string, string> Keys = new()
     {
-        ["line.start"] = "The line counts as primed",
         ["uncertainty"] = "Run the cases one by one",
         ["forecast"] = "Run the cases one by one",
     };
