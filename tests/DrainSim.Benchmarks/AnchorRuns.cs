@@ -49,7 +49,9 @@ internal static class AnchorRuns
         return elapsed.TotalMicroseconds / jobs.Length;
     }
 
-    private static string Said(ReadOnlySpan<string> command)
+    /// <summary>What a program says, in one line.</summary>
+    /// <param name="command">the program and its arguments</param>
+    public static string Said(ReadOnlySpan<string> command)
     {
         using Process process = Process.Start(new ProcessStartInfo(command[0], command[1..].ToArray())
         {

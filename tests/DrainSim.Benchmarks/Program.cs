@@ -9,6 +9,9 @@ switch (args)
     case ["anchors", .. string[] beside]:
         AnchorRuns.Write(Console.Out, beside);
         break;
+    case ["sweep", .. string[] beside]:
+        SweepRuns.Write(Console.Out, beside);
+        break;
     default:
         BenchmarkSwitcher.FromAssembly(typeof(RunBenchmarks).Assembly).Run(args);
         break;

@@ -73,6 +73,24 @@ public sealed class SweepTests
     }
 
     [Fact]
+    public void An_interrupted_sweep_says_how_to_go_on_and_does()
+    {
+        Assert.SkipWhen(OperatingSystem.IsWindows(), "there is no SIGINT to send");
+        using TestFolder folder = Siphon();
+        byte[] whole = Sweep(folder);
+        folder.Delete("out");
+        Process run = Start(folder);
+        while (!File.Exists(folder.Full(Table + ".partial")) && !run.HasExited)
+            Thread.Sleep(5);
+        using (Process kill = Process.Start("kill", ["-INT", $"{run.Id}"]))
+            kill.WaitForExit();
+        Finished interrupted = DrainSimProcess.Wait(run);
+        Assert.Equal(130, interrupted.ExitCode);
+        Assert.Contains("--resume", interrupted.Error, StringComparison.Ordinal);
+        Assert.Equal(whole, Sweep(folder, "--resume"));
+    }
+
+    [Fact]
     public void Other_values_are_not_gone_on_with()
     {
         using TestFolder folder = Siphon();

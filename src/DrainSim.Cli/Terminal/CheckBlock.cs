@@ -52,6 +52,8 @@ internal static class CheckBlock
         yield return ("Tank", $"{format.Volume(now.Volume)} of {format.Volume(job.Vessel.Capacity)} at a level of {format.Length(now.Level)}");
         yield return ("Liquid", $"{job.Liquid.Name}, {format.Temperature(job.Liquid.Temperature)}");
         yield return ("Driving head", format.Length(now.Head));
+        if (first is { NoStart: null, Prime.Front: { } front })
+            yield return ("Front", $"at {format.Length(front)} in the outer leg; the line has yet to run full");
         yield return ("Flow", first.NoStart is null
             ? $"{format.Flow(now.Flow)}, {format.Velocity(now.Velocity)}, Re {MeasureFormat.Number(Math.Round(now.Reynolds))}"
             : $"none: {Verdict.Reason(job, first.NoStart, first.Prime, format)}");
@@ -60,6 +62,7 @@ internal static class CheckBlock
             yield break;
         yield return ("Static lift", $"{format.Length(prime.StaticLift)} of at most {format.Length(prime.LiftLimit)}");
         yield return ("Prime", $"{format.Volume(prime.LineVolume)}: inner leg {format.Volume(prime.InnerLegVolume)}, outer leg {format.Volume(prime.OuterLegVolume)}");
-        yield return ("To start", $"front in the outer leg below {format.Length(prime.FrontElevation)}, or a suction of {format.Pressure(prime.Suction)} at the outlet");
+        yield return ("To start", $"front in the outer leg below {format.Length(prime.FrontElevation)}, or a suction of {format.Pressure(prime.Suction)} at the outlet"
+            + (prime.DipFills is { } fills ? $", or by hand {MeasureFormat.Number(fills)} × dipped and capped" : ""));
     }
 }

@@ -78,12 +78,16 @@ internal static class VerdictBlock
                 + $"{format.Velocity(result.LargestVelocity.Value)} in the narrowest bore");
             yield return ("Low point", LowPoint(result, format));
         }
+        if (AirBand(result, format) is { } band)
+            yield return ("Air", band);
         if (result.LargestVacuum is { } vacuum)
             yield return ("Headspace", Headspace(vacuum, result.Job, format));
         if (result.ReceiverLevel is { } depth)
             yield return ("Receiver", $"{format.Length(depth)} deep when it stopped");
         if (result.BalanceLevel is { } balance)
             yield return ("Balance", $"inflow and outflow are equal at a level of {format.Length(balance)}");
+        if (result.Lines is [{ RanFullAt: { } full }, ..])
+            yield return ("Line full", $"{MeasureFormat.Duration(full)} after the start");
         if (result.Prime is { } prime)
             yield return ("To start", Prime(prime, format));
     }
@@ -93,6 +97,18 @@ internal static class VerdictBlock
     {
         double? most = result.Trace.TimeAtVolume(0.01 * result.InitialVolume);
         return most < 0.5 * result.StoppedAt ? $"; 99 % is out after {MeasureFormat.Duration(most.Value)}" : "";
+    }
+
+    private static string? AirBand(DrainResult result, MeasureFormat format)
+    {
+        DrainEvent may = result.Events.FirstOrDefault(moment => moment.Code == EventCode.AirMayBeDrawn);
+        DrainEvent likely = result.Events.FirstOrDefault(moment => moment.Code == EventCode.AirDrawn);
+        if (may.Code != EventCode.AirMayBeDrawn)
+            return null;
+        string from = $"a vortex may draw it into the inlet from a level of {format.Length(may.Level)} ({MeasureFormat.Duration(may.Time)}) down";
+        return likely.Code == EventCode.AirDrawn
+            ? $"{from}, and likely does from {format.Length(likely.Level)} ({MeasureFormat.Duration(likely.Time)})"
+            : from;
     }
 
     private static string Headspace(Extreme vacuum, Job job, MeasureFormat format)

@@ -12,6 +12,9 @@ internal sealed class LevelPanel(
     /// <summary>Longest text of an act in the panel, characters.</summary>
     private const int LongestAct = 44;
 
+    /// <summary>Distance of the strokes of a hatched strip, px.</summary>
+    private const float HatchStep = 12;
+
     private readonly DrainResult result = report.Result;
 
     /// <summary>The tenths before the end, which has its own label.</summary>
@@ -47,6 +50,7 @@ internal sealed class LevelPanel(
     public void Annotate(LineProfile profile)
     {
         axis.MarkEnd(sheet, panel, notes);
+        DrawAirBand();
         WriteReferences(profile);
         foreach (DrainEvent moment in Tenths)
         {
@@ -55,6 +59,31 @@ internal sealed class LevelPanel(
         WriteEnd();
         WriteEvents();
         NameTenths();
+    }
+
+    /// <summary>
+    /// The levels between which the published forms say that air is drawn into the first line's inlet, as a hatched strip from
+    /// the moment of the first to the end.
+    /// </summary>
+    private void DrawAirBand()
+    {
+        DrainEvent may = result.Events.FirstOrDefault(moment => moment is { Code: EventCode.AirMayBeDrawn, Line: 0 });
+        DrainEvent likely = result.Events.FirstOrDefault(moment => moment is { Code: EventCode.AirDrawn, Line: 0 });
+        if (may.Code != EventCode.AirMayBeDrawn || axis.End <= 0)
+        {
+            return;
+        }
+        double least = likely.Code == EventCode.AirDrawn ? likely.Level : result.FinalLevel;
+        SKPoint top = panel.At(axis.At(may.Time), unit.From(may.Level));
+        SKPoint bottom = panel.At(axis.At(axis.End), unit.From(least));
+        for (float x = top.X; x < bottom.X + (bottom.Y - top.Y); x += HatchStep)
+        {
+            float from = Math.Max(x - (bottom.Y - top.Y), top.X), to = Math.Min(x, bottom.X);
+            if (from < to)
+            {
+                sheet.Line(new SKPoint(to, top.Y + (x - to)), new SKPoint(from, top.Y + (x - from)), Palette.Liquid.WithAlpha(0x38), 1.5f);
+            }
+        }
     }
 
     private static IEnumerable<double> Marks(Job job, LineProfile profile)
@@ -158,6 +187,7 @@ internal sealed class LevelPanel(
         EventCode.VapourLimitBegins => "flow held at the limit",
         EventCode.VapourLimitEnds => "flow free again",
         EventCode.AirMayBeDrawn => "a vortex may draw air",
+        EventCode.AirDrawn => "air is likely drawn",
         EventCode.BoreUncovered => "bore uncovered",
         EventCode.OutletCovered => "outlet covered",
         EventCode.OutletFreed => "outlet free",

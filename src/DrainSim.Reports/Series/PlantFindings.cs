@@ -43,22 +43,22 @@ internal static class PlantFindings
         json.WriteNumber("least_margin_Pa", line.LeastMargin.Value);
         json.WriteNumber("largest_flow_m3_s", line.LargestFlow.Value);
         json.WriteNumber("largest_velocity_m_s", line.LargestVelocity.Value);
-        if (line.YieldHead is { } yield)
-        {
-            json.WriteNumber("yield_head_m", yield);
-        }
-        else
-        {
-            json.WriteNull("yield_head_m");
-        }
-        if (line.ReceiverLevel is { } depth)
-        {
-            json.WriteNumber("receiver_level_m", depth);
-        }
-        else
-        {
-            json.WriteNull("receiver_level_m");
-        }
+        Number(json, "ran_full_at_s", line.RanFullAt);
+        Number(json, "outer_leg_froude", line.OuterLegFroude);
+        Number(json, "yield_head_m", line.YieldHead);
+        Number(json, "receiver_level_m", line.ReceiverLevel);
         json.WriteEndObject();
+    }
+
+    private static void Number(Utf8JsonWriter json, string name, double? value)
+    {
+        if (value is { } number)
+        {
+            json.WriteNumber(name, number);
+        }
+        else
+        {
+            json.WriteNull(name);
+        }
     }
 }

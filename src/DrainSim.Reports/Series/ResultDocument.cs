@@ -172,6 +172,8 @@ public static class ResultDocument
                 ("static_lift_m", prime.StaticLift),
                 ("lift_limit_m", prime.LiftLimit),
                 ("suction_Pa", prime.Suction),
+                ("front_at_start_m", prime.Front ?? double.NaN),
+                ("dip_fills", prime.DipFills ?? double.NaN),
             ]
             : null);
         WriteObject(json, "fall_back", result.FallBack is { } back

@@ -13,6 +13,7 @@ public static class EventWording
     public static string Text(DrainEvent moment, Job job) => moment.Code switch
     {
         EventCode.TenthGone => $"{MeasureFormat.Number(Math.Round(10 * moment.Number))} % of the volume is gone",
+        EventCode.RunsFull => "the liquid reaches the outlet; the line runs full",
         EventCode.LeftTurbulent => $"the flow leaves the turbulent range{Reynolds(moment)}",
         EventCode.BecameLaminar => $"the flow becomes laminar{Reynolds(moment)}",
         EventCode.LeftLaminar => $"the flow leaves the laminar range{Reynolds(moment)}",
@@ -72,6 +73,9 @@ public static class EventWording
             + "gas from the liquid may gather at the crest (low confidence).",
         WarningCode.NeverEmpties =>
             $"The line keeps up with an inflow of at most {format.Flow(warning.Number)} down to the inlet; this one is more.",
+        WarningCode.AirStaysInLeg =>
+            $"Air may stay in the outer leg: its Froude number is {MeasureFormat.Number(warning.Number)} at most, and air pockets clear from "
+            + (warning.Number < 0.3 ? "about 1 up; below 0.3 they rise back to the crest." : "about 1 up; below it they go irregularly."),
         WarningCode.FrictionDiffers =>
             "The flow of a liquid with a yield stress is turbulent here, and the published forms differ: by one of them the friction is up to "
             + $"{MeasureFormat.Percent(warning.Number)} less, and the job shorter.",

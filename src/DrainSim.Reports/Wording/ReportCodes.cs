@@ -10,6 +10,7 @@ public static class ReportCodes
     public static string Of(EventCode code) => code switch
     {
         EventCode.TenthGone => "tenth_gone",
+        EventCode.RunsFull => "runs_full",
         EventCode.LeftTurbulent => "left_turbulent",
         EventCode.BecameLaminar => "became_laminar",
         EventCode.LeftLaminar => "left_laminar",
@@ -49,6 +50,7 @@ public static class ReportCodes
         NoStart.YieldHolds => "yield_holds",
         NoStart.LiftBeyondLimit => "lift_beyond_limit",
         NoStart.NoPrime => "no_prime",
+        NoStart.FrontStops => "front_stops",
         NoStart.ValveShut => "valve_shut",
         _ => throw new UnreachableException(reason.ToString()),
     };
@@ -65,6 +67,7 @@ public static class ReportCodes
         WarningCode.HoseMayFlatten => "hose_may_flatten",
         WarningCode.GasMayGather => "gas_may_gather",
         WarningCode.NeverEmpties => "never_empties",
+        WarningCode.AirStaysInLeg => "air_stays_in_leg",
         WarningCode.FrictionDiffers => "friction_differs",
         WarningCode.ThinMargin => "thin_margin",
         _ => throw new UnreachableException(code.ToString()),

@@ -115,6 +115,7 @@ public static class Verdict
                 + $"and no column higher than {format.Length(prime.LiftLimit)} holds together",
             NoStart.LiftBeyondLimit => "the crest stands higher above the level than a column holds together",
             NoStart.NoPrime => "the liquid's front in the outer leg does not stand below the level",
+            NoStart.FrontStops => "the liquid's front comes to rest in the outer leg before it reaches the outlet",
             NoStart.ValveShut => "a valve on the line is shut",
             null => "the line never carries a flow",
             _ => throw new UnreachableException(reason.ToString()),

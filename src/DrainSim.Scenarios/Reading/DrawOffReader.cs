@@ -17,7 +17,8 @@ internal static class DrawOffReader
             return Several(file, folder, tank);
         if (!file.Has("line") && !file.Has("lines"))
             file.Miss("is missing", "Give its bore, inlet and path", "line", "lines");
-        Line? line = file.Block("line") is { } block ? LineReader.Read(block, tank) : null;
+        double? front = null;
+        Line? line = file.Block("line") is { } block ? LineReader.Read(block, tank, out front) : null;
         Receiver? receiver = null;
         bool isWhole = line is not null;
         if (file.Block("receiver") is { } below)
@@ -25,7 +26,7 @@ internal static class DrawOffReader
             receiver = ReceiverReader.Read(below, folder);
             isWhole &= receiver is not null;
         }
-        return isWhole ? [new DrawOff { Line = line!, Receiver = receiver }] : null;
+        return isWhole ? [new DrawOff { Line = line!, Receiver = receiver, Front = front }] : null;
     }
 
     private static DrawOff[]? Several(BlockReader file, string folder, FilledTank? tank)
@@ -59,9 +60,9 @@ internal static class DrawOffReader
         string? name = NameReader.Read(block, names);
         BlockReader? below = block.Block("receiver");
         Receiver? receiver = below is null ? null : ReceiverReader.Read(below, folder);
-        Line? line = LineReader.Read(block, tank);
+        Line? line = LineReader.Read(block, tank, out double? front);
         return line is null || (below is not null && receiver is null)
             ? null
-            : new DrawOff { Line = line with { Name = name }, Receiver = receiver };
+            : new DrawOff { Line = line with { Name = name }, Receiver = receiver, Front = front };
     }
 }

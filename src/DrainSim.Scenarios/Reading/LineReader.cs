@@ -12,7 +12,8 @@ internal static class LineReader
     /// <summary>The line; null when it is refused.</summary>
     /// <param name="block">the block</param>
     /// <param name="tank">the tank that it empties, for judging the geometry; null when it was refused</param>
-    public static Line? Read(BlockReader block, FilledTank? tank)
+    /// <param name="front">elevation of the liquid's front in the outer leg at the start, m; null for a primed line</param>
+    public static Line? Read(BlockReader block, FilledTank? tank, out double? front)
     {
         double? bore = Bore(block);
         string? wall = block.AtMostOne(RoughnessHelp, "roughness", "material");
@@ -25,8 +26,7 @@ internal static class LineReader
         double? least = block.Amount("least_pressure", Quantities.Pressure, Allowed.NotNegative);
         double? airBreak = AirBreak(block, inlet, path);
         double? vacuumRating = block.Amount("vacuum_rating", Quantities.Pressure, Allowed.NotNegative);
-        if (block.BlockIfAny("start") is not null || !block.Choice("start", true, ("primed", true), ("empty", false)))
-            block.Refuse("start", "not read by this version", LaterWork.Find("line.start")!);
+        front = StartReader.Read(block, inlet, path);
         if (wall is null && path is { NeedsRoughness: true } && !block.Has("roughness") && !block.Has("material"))
             block.Miss("one of 'roughness' or 'material' is missing", RoughnessHelp, "roughness", "material");
         if (tank is not null && inlet is not null && path is not null)

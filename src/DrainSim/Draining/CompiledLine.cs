@@ -34,6 +34,7 @@ internal sealed partial class CompiledLine
             BrimDepth = tank.BrimDepth;
         }
 
+        Filling = drawOff.Front is { } front ? FillingLine.Of(Hydraulics, front, parallel, gravity) : null;
         tail = TailOf(line, Hydraulics);
         bool drawsAirAtCrown = Hydraulics.RisesAboveInlet && line.Inlet.Facing == InletFacing.Side;
         UncoverLevel = Hydraulics.InletElevation
@@ -75,14 +76,57 @@ internal sealed partial class CompiledLine
     /// <summary>Depth at which the receiver runs over, m; null where it is no tank.</summary>
     public double? BrimDepth { get; }
 
+    /// <summary>The column that has yet to fill the outer leg; null for a line that starts full.</summary>
+    public FillingLine? Filling { get; }
+
+    /// <summary>Head from the surface in the tank to the front of a line that fills, m.</summary>
+    /// <param name="segment">segment that the front is in, from 0</param>
+    /// <param name="surface">level in the tank, m</param>
+    /// <param name="gas">pressure of the gas over it, Pa absolute</param>
+    /// <param name="delivered">volume that has left the tank, m³</param>
+    public double FrontHead(int segment, double surface, double gas, double delivered) =>
+        surface - Filling!.FrontElevation(segment, delivered) + (gas - atmosphere) / SpecificWeight
+        - (OutletLevel(delivered) - Hydraulics.OutletElevation);
+
+    /// <summary>dQ/dt of a line that fills, m³/s².</summary>
+    /// <param name="segment">segment that the front is in, from 0</param>
+    /// <param name="surface">level in the tank, m</param>
+    /// <param name="gas">pressure of the gas over it, Pa absolute</param>
+    /// <param name="delivered">volume that has left the tank, m³</param>
+    /// <param name="flow">flow, m³/s</param>
+    public double Acceleration(int segment, double surface, double gas, double delivered, double flow) =>
+        Filling!.Acceleration(segment, delivered, flow, FrontHead(segment, surface, gas, delivered));
+
+    /// <summary>Least pressure in a line that fills less the threshold, Pa.</summary>
+    /// <param name="segment">segment that the front is in, from 0</param>
+    /// <param name="surface">level in the tank, m</param>
+    /// <param name="gas">pressure of the gas over it, Pa absolute</param>
+    /// <param name="flow">flow, m³/s</param>
+    /// <param name="acceleration">dQ/dt, m³/s²</param>
+    public double FillingMargin(int segment, double surface, double gas, double flow, double acceleration) =>
+        Filling!.LowPointPressure(segment, Math.Max(0, flow), acceleration, surface, gas) - Threshold;
+
+    /// <summary>Froude number v/√(g·D) in the widest bore behind the crest, 1.</summary>
+    /// <param name="flow">flow, m³/s</param>
+    public double OuterLegFroude(double flow)
+    {
+        double widest = 0;
+        for (int i = Hydraulics.CrestIndex; i < Hydraulics.NodeCount; i++)
+            widest = Math.Max(widest, Hydraulics.Node(i).Bore);
+        return flow / (parallel * Math.PI / 4 * widest * widest) / Math.Sqrt(gravity * widest);
+    }
+
     /// <summary>Depth in the receiver, m; null where it is no tank.</summary>
     /// <param name="delivered">volume that the line has delivered, m³</param>
-    public double? ReceiverDepth(double delivered) => receiver?.Level(Math.Max(0, receiverStart + delivered));
+    public double? ReceiverDepth(double delivered) => receiver?.Level(Math.Max(0, receiverStart + Arrived(delivered)));
 
     /// <summary>Elevation of the receiving surface, m; negative infinity in the open air.</summary>
     /// <param name="delivered">volume that the line has delivered, m³</param>
     public double ReceiverSurface(double delivered) =>
-        receiver is null ? fixedSurface : receiverBottom + receiver.Level(Math.Max(0, receiverStart + delivered));
+        receiver is null ? fixedSurface : receiverBottom + receiver.Level(Math.Max(0, receiverStart + Arrived(delivered)));
+
+    /// <summary>Of a volume that has left the tank, what has not stayed in the line, m³.</summary>
+    private double Arrived(double delivered) => Filling is null ? delivered : Math.Max(0, delivered - Filling.Volume);
 
     /// <summary>Whether the outlet is under the receiving surface.</summary>
     /// <param name="delivered">volume that the line has delivered, m³</param>

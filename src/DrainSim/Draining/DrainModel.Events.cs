@@ -33,9 +33,11 @@ internal sealed partial class DrainModel : IEventSet
         {
             WatchKind.TargetReached or WatchKind.TankBrims or WatchKind.FlowsBalance => EventAction.Stop,
             WatchKind.VacuumRatingPasses or WatchKind.PressureRatingPasses => EventAction.Record,
-            WatchKind.SectionPasses or WatchKind.ActFalls or WatchKind.InflowTurns => EventAction.Restart,
+            WatchKind.SectionPasses or WatchKind.ActFalls or WatchKind.InflowTurns or WatchKind.ValveMoves => EventAction.Restart,
             WatchKind.AllSettle => now.LinesAtWork > 1 || now.Plant.Job.Inflow is not null ? EventAction.Restart : EventAction.Ignore,
             _ when !now.Modes[watch.Line].IsAtWork => EventAction.Ignore,
+            WatchKind.FrontArrives or WatchKind.FrontStops => now.Modes[watch.Line].IsFilling ? EventAction.Restart : EventAction.Ignore,
+            WatchKind.RegimePasses or WatchKind.HeadSettles or WatchKind.BoreUncovers when now.Modes[watch.Line].IsFilling => EventAction.Ignore,
             WatchKind.BoreUncovers => EventAction.Record,
             WatchKind.LiftExhausts when !now.Modes[watch.Line].IsLimited => EventAction.Ignore,
             WatchKind.HeadSettles when !EndsAtRest(watch.Line) => EventAction.Ignore,
@@ -47,7 +49,7 @@ internal sealed partial class DrainModel : IEventSet
             WatchKind.HeadSettles when run.SettledWithin == 0 => EventDirection.Either,
             _ => Direction(watch.Kind),
         };
-        return new EventRule(direction, action);
+        return new EventRule(direction, action, HasKink(watch.Kind));
     }
 
     /// <inheritdoc/>
@@ -67,12 +69,14 @@ internal sealed partial class DrainModel : IEventSet
         return now.LinesAtWork > 0;
     }
 
-    private void React(Watch watch, double t, ReadOnlySpan<double> y)
+    private void React(Watch watch, double t, Span<double> y)
     {
         LineMode mode = now.Modes[watch.Line];
         if (watch.Kind == WatchKind.AllSettle)
             EndAllAtRest(t, y);
-        else if (watch.Kind == WatchKind.MarginVanishes && now.Plant.Lines[watch.Line].HoldsAtVapour)
+        else if (watch.Kind == WatchKind.FrontArrives)
+            Advance(watch.Line, t, y);
+        else if (watch.Kind == WatchKind.MarginVanishes && now.Plant.Lines[watch.Line].HoldsAtVapour && !mode.IsFilling)
             Begin(now.With(t, watch.Line, mode with { IsLimited = !mode.IsLimited }));
         else if (EndingOf(watch, t, y) is { } ending)
             Begin(now.With(t, watch.Line, mode with { Ending = ending, EndedAt = t }));
@@ -82,7 +86,7 @@ internal sealed partial class DrainModel : IEventSet
     /// An act may leave a line where its end is behind it already, its inlet lifted out of the liquid or its head gone:
     /// there nothing crosses zero any more, so what would end the line is looked at once.
     /// </summary>
-    private void JudgeAfterAct(double t, ReadOnlySpan<double> y)
+    private void JudgeAfterAct(double t, Span<double> y)
     {
         Span<double> dydt = stackalloc double[Dimension];
         Span<double> values = stackalloc double[watches.Length];
@@ -106,20 +110,35 @@ internal sealed partial class DrainModel : IEventSet
         WatchKind.AirDrawn => Outcome.InletUncovered,
         WatchKind.AirBreakUncovers => Outcome.AirBreak,
         WatchKind.MarginVanishes or WatchKind.LiftExhausts => Outcome.VapourBreak,
+        WatchKind.FrontStops => Outcome.NeverStarted,
         WatchKind.HeadSettles => RestOf(watch.Line, t, y),
         WatchKind.ReceiverBrims => Outcome.ReceiverFull,
         WatchKind.OutletCovers when RunsBack(watch.Line, t, y) => Outcome.Levelled, // the receiver sank to the outlet
         _ => null,
     };
 
+    /// <summary>Whether the balance is another beyond the event whatever is done there; where a mode changes it goes on as it was.</summary>
+    private static bool HasKink(WatchKind kind) => kind is WatchKind.TankBrims or WatchKind.OutletCovers or WatchKind.ReceiverBrims
+        or WatchKind.SectionPasses or WatchKind.RegimePasses or WatchKind.InflowTurns or WatchKind.ValveMoves;
+
     private static EventDirection Direction(WatchKind kind) => kind switch
     {
         WatchKind.RegimePasses or WatchKind.SectionPasses or WatchKind.OutletCovers
-            or WatchKind.BoreUncovers => EventDirection.Either,
+            or WatchKind.BoreUncovers or WatchKind.ValveMoves => EventDirection.Either,
         WatchKind.ReceiverBrims or WatchKind.VacuumRatingPasses or WatchKind.PressureRatingPasses or WatchKind.TankBrims
-            or WatchKind.InflowTurns => EventDirection.Rising,
+            or WatchKind.InflowTurns or WatchKind.FrontArrives => EventDirection.Rising,
         _ => EventDirection.Falling,
     };
+
+    /// <summary>The front goes on into the next segment; behind the last the line runs full, its flow that of its head.</summary>
+    private void Advance(int line, double t, Span<double> y)
+    {
+        LineMode mode = now.Modes[line];
+        bool isLast = mode.Segment == now.Plant.Lines[line].Filling!.SegmentCount - 1;
+        if (isLast)
+            y[flowAt[line]] = 0;
+        Begin(now.With(t, line, mode with { Segment = isLast ? -1 : mode.Segment + 1 }));
+    }
 
     private void Begin(Epoch next)
     {
@@ -132,7 +151,16 @@ internal sealed partial class DrainModel : IEventSet
         Plant after = new(Job.Timeline[ordinal].ChangeOf(now.Plant.Job, Job));
         if (hasPressure && after.Gas.IsConfined)
             y[LineCount] = GasPressure(now, Volume(now, t, y), y);
-        return now.With(t, after);
+        Epoch next = now.With(t, after);
+        for (int i = 0; i < LineCount; i++)
+        {
+            // Where an act gives a line that still fills other parts, its front goes on from the nearest of them.
+            int last = (after.Lines[i].Filling?.SegmentCount ?? 0) - 1;
+            if (now.Modes[i].IsFilling && now.Modes[i].Segment > last)
+                next = next.With(t, i, now.Modes[i] with { Segment = last });
+        }
+
+        return next;
     }
 
     private bool HoldsHeel(int line) =>
@@ -182,7 +210,13 @@ internal sealed partial class DrainModel : IEventSet
             WatchKind.InletUncovers => (at.Volume - line.UncoverVolume) / vessel.Capacity,
             WatchKind.AirBreakUncovers => line.DrawOff.Line.AirBreak is { } hole ? at.Surface - hole : 1,
             WatchKind.AirDrawn => line.DrawOff.Line.Inlet.AirDraw == AirDraw.Break ? at.Surface - line.SubmergedAbove(flow) : 1,
+            WatchKind.MarginVanishes when now.Modes[watch.Line] is { IsFilling: true, IsAtWork: true } mode =>
+                line.FillingMargin(mode.Segment, at.Surface, at.Gas, flow, dydt[flowAt[watch.Line]]) / atmosphere,
             WatchKind.MarginVanishes => FreeMargin(watch.Line, at, delivered, flow) / atmosphere,
+            WatchKind.FrontArrives => now.Modes[watch.Line] is { IsFilling: true, Segment: var segment }
+                ? line.Filling!.Beyond(segment, delivered)
+                : 1,
+            WatchKind.FrontStops => now.Modes[watch.Line].IsFilling ? flow / flowScales[watch.Line] : 1,
             WatchKind.LiftExhausts => line.Margin(0, at.Surface, at.Gas) / line.SpecificWeight - run.SettledWithin,
             WatchKind.HeadSettles => Unsettled(RestHead(line, at, delivered), line.Hydraulics.YieldHead),
             WatchKind.AllSettle => IsFed(at.Time) ? 1 : LargestHead(at, y) - run.SettledWithin,
@@ -192,6 +226,7 @@ internal sealed partial class DrainModel : IEventSet
             WatchKind.RegimePasses => RegimeDistance(line, watch, at, delivered),
             WatchKind.VacuumRatingPasses => (atmosphere - at.Gas - Job.VacuumRating!.Value) / atmosphere,
             WatchKind.PressureRatingPasses => (at.Gas - atmosphere - Job.PressureRating!.Value) / atmosphere,
+            WatchKind.ValveMoves => (at.Gas - watch.Value) / atmosphere,
             WatchKind.FlowsBalance => Imbalance(at.Time, dydt),
             WatchKind.ActFalls => Job.Timeline[watch.Ordinal] is { Time: { } time } ? time - at.Time : at.Surface - Job.Timeline[watch.Ordinal].Level!.Value,
             WatchKind.InflowTurns => at.Time - watch.Value,
@@ -254,6 +289,8 @@ internal sealed partial class DrainModel : IEventSet
         double largest = 0;
         for (int i = 0; i < LineCount; i++)
         {
+            if (now.Modes[i] is { IsFilling: true, IsAtWork: true })
+                return 1 + run.SettledWithin; // a column on its way does not rest
             if (now.Modes[i].IsAtWork)
                 largest = Math.Max(largest, Math.Abs(RestHead(now.Plant.Lines[i], at, y[i])) - now.Plant.Lines[i].Hydraulics.YieldHead);
         }

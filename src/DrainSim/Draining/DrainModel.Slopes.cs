@@ -12,36 +12,68 @@ internal sealed partial class DrainModel
     public bool IsStiff => now.Plant.Gas.Breathes;
 
     /// <inheritdoc/>
-    /// <remarks>The last row is that of the pressure, which answers to the flows through the growth of the gas.</remarks>
+    /// <remarks>The row behind those of the lines is that of the pressure, which answers to the flows through the growth of the gas.</remarks>
     public void Jacobian(double t, ReadOnlySpan<double> y, ReadOnlySpan<double> dydt, Span<double> byState, Span<double> byTime)
     {
         double volume = Volume(now, t, y), surface = vessel.Level(volume), gas = GasPressure(now, volume, y);
         double rise = 1 / vessel.Area(surface), inflow = now.Inflow(t), growth = -inflow;
         byState.Clear();
         byTime.Clear();
-        Span<double> last = byState[(LineCount * Dimension)..];
+        Span<double> pressure = byState.Slice(LineCount * Dimension, Dimension);
         byTime[LineCount] = -now.InflowSlope(t);
         for (int i = 0; i < LineCount; i++)
         {
             growth += dydt[i];
             if (!now.Modes[i].IsAtWork)
                 continue;
+            Span<double> row = byState.Slice(i * Dimension, Dimension);
+            if (now.Modes[i].IsFilling)
+            {
+                row[flowAt[i]] = 1;
+                pressure[flowAt[i]] += 1;
+                byTime[flowAt[i]] = rise * inflow
+                    * FillingSlopes(i, surface, gas, rise, y, byState.Slice(flowAt[i] * Dimension, Dimension));
+                continue;
+            }
+
             FlowSolutions++;
             LineSlopes slopes = now.Plant.Lines[i].Slopes(new LineConditions(surface, gas, y[i], now.Modes[i].IsLimited), dydt[i]);
-            Span<double> row = byState.Slice(i * Dimension, Dimension);
             row[..LineCount].Fill(-slopes.BySurface * rise);
             row[i] += slopes.ByDelivered;
             row[LineCount] = slopes.ByGas;
             byTime[i] = slopes.BySurface * rise * inflow;
             byTime[LineCount] += byTime[i];
             for (int j = 0; j <= LineCount; j++)
-                last[j] += row[j];
+                pressure[j] += row[j];
         }
 
         PressureRate rate = now.Plant.Gas.Rate(gas, volume, growth);
+        for (int j = 0; j < Dimension; j++)
+            pressure[j] *= rate.ByGrowth;
         for (int j = 0; j < LineCount; j++)
-            last[j] = rate.ByGrowth * last[j] + rate.ByVolume;
-        last[LineCount] = rate.ByGrowth * last[LineCount] + rate.ByPressure;
+            pressure[j] += rate.ByVolume;
+        pressure[LineCount] += rate.ByPressure;
         byTime[LineCount] = rate.ByGrowth * byTime[LineCount] - rate.ByVolume * inflow;
+    }
+
+    /// <summary>
+    /// Fills the row of a filling line's acceleration and gives its slope by the level: it is linear in the level and in the gas, and smooth in its own flow and
+    /// front, for which differences are good to some nine digits.
+    /// </summary>
+    private double FillingSlopes(int line, double surface, double gas, double rise, ReadOnlySpan<double> y, Span<double> row)
+    {
+        const double Share = 1e-6;
+        (CompiledLine compiled, int segment) = (now.Plant.Lines[line], now.Modes[line].Segment);
+        (double delivered, double flow) = (y[line], y[flowAt[line]]);
+        double here = At(surface, gas, delivered, flow);
+        double bySurface = At(surface + 1, gas, delivered, flow) - here;
+        double dv = Share * compiled.Filling!.Volume, dq = Share * flowScales[line];
+        row[..LineCount].Fill(-bySurface * rise);
+        row[line] += (At(surface, gas, delivered + dv, flow) - At(surface, gas, delivered - dv, flow)) / (2 * dv);
+        row[LineCount] = (At(surface, gas + atmosphere, delivered, flow) - here) / atmosphere;
+        row[flowAt[line]] = (At(surface, gas, delivered, flow + dq) - At(surface, gas, delivered, flow - dq)) / (2 * dq);
+        return bySurface;
+
+        double At(double z, double p, double volume, double q) => compiled.Acceleration(segment, z, p, volume, q);
     }
 }

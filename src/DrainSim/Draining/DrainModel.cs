@@ -7,9 +7,10 @@ namespace DrainSim.Draining;
 /// <remarks>
 /// State: y[i] is the volume that line i has taken out of the tank, m³, so that its slope is the line's flow, the volume in
 /// the tank is V = V₀ + ∫inflow − Σy[i] and that in a receiver Vr₀ + y[i]: the balance closes by construction. Where gas
-/// comes and goes its pressure, Pa, is the last component: not its mass, of which the pressure that drives the vent would be a
-/// difference of near equals, kept by a balance of stiff terms at every trial state. What is watched on the way and the slopes for implicit steps
-/// stand in the other parts of the class.
+/// comes and goes its pressure, Pa, follows: not its mass, of which the pressure that drives the vent would be a
+/// difference of near equals, kept by a balance of stiff terms at every trial state. Then comes the flow, m³/s, of each line
+/// whose front has yet to reach the outlet, because there the inertia of the column counts. What is watched on the way and
+/// the slopes for implicit steps stand in the other parts of the class.
 /// </remarks>
 internal sealed partial class DrainModel : IOdeSystem
 {
@@ -19,6 +20,8 @@ internal sealed partial class DrainModel : IOdeSystem
     private readonly bool hasPressure;
     private readonly Watch[] watches;
     private readonly double[] guesses;
+    private readonly int[] flowAt; // component that holds the flow of a line that fills; 0 where none does
+    private readonly double[] flowScales;
     private readonly List<Epoch> epochs;
     private readonly double lastActTime;
     private Epoch now;
@@ -35,6 +38,15 @@ internal sealed partial class DrainModel : IOdeSystem
         lastActTime = Job.Timeline.Max(act => act.Time) ?? double.NegativeInfinity;
         StartMass = plant.Gas.StartMass;
         guesses = new double[LineCount];
+        (flowAt, flowScales) = (new int[LineCount], new double[LineCount]);
+        int dimension = LineCount + (hasPressure ? 1 : 0);
+        for (int i = 0; i < LineCount; i++)
+        {
+            if (modes[i] is { IsFilling: true, IsAtWork: true })
+                (flowAt[i], flowScales[i]) = (dimension++, StartFlow(plant, i));
+        }
+
+        Dimension = dimension;
         watches = WatchList.Of(plant, TargetVolume);
         now = new Epoch(0, plant, modes, 0);
         epochs = [now];
@@ -59,7 +71,7 @@ internal sealed partial class DrainModel : IOdeSystem
     public IReadOnlyList<Epoch> Epochs => epochs;
 
     /// <inheritdoc/>
-    public int Dimension => LineCount + (hasPressure ? 1 : 0);
+    public int Dimension { get; }
 
     /// <summary>Whether gas of a plant with acts may be shut in, so that its pressure is a state throughout.</summary>
     private static bool MayConfine(Plant plant) =>
@@ -108,6 +120,19 @@ internal sealed partial class DrainModel : IOdeSystem
     public double Flow(Epoch epoch, int line, double surface, double gas, double delivered, bool limited) =>
         epoch.Modes[line].IsAtWork ? Solve(epoch, line, surface, gas, delivered, limited) : 0;
 
+    /// <summary>Flow of a line out of the tank, m³/s: a component of the state while the line fills, else solved for.</summary>
+    private double Flow(Epoch epoch, int line, double surface, double gas, ReadOnlySpan<double> y) =>
+        epoch.Modes[line] is { IsFilling: true, IsAtWork: true } ? y[flowAt[line]] : Flow(epoch, line, surface, gas, y[line], epoch.Modes[line].IsLimited);
+
+    /// <summary>Flow of a full line at the first instant, m³/s: what the error in a flow is measured against.</summary>
+    private static double StartFlow(Plant plant, int line)
+    {
+        double gas = plant.Gas.Pressure(plant.Vessel.Volume(plant.Job.Level), plant.Gas.StartMass);
+        return Math.Max(LeastFlowScale, plant.Lines[line].Flow(new LineConditions(plant.Job.Level, gas, 0, false), 0));
+    }
+
+    private const double LeastFlowScale = 1e-15;
+
     private double Solve(Epoch epoch, int line, double surface, double gas, double delivered, bool limited)
     {
         FlowSolutions++;
@@ -131,7 +156,7 @@ internal sealed partial class DrainModel : IOdeSystem
             bool parts = epoch.Modes[i] is { Ending: Outcome.VapourBreak } mode && mode.EndedAt == t;
             flows[i] = parts
                 ? Solve(epoch, i, surface, gas, y[i], limited: false)
-                : Flow(epoch, i, surface, gas, y[i], epoch.Modes[i].IsLimited);
+                : Flow(epoch, i, surface, gas, y);
         }
 
         return At(t, y, flows);
@@ -145,7 +170,7 @@ internal sealed partial class DrainModel : IOdeSystem
     {
         Epoch epoch = EpochAt(t);
         double volume = Volume(epoch, t, y), surface = vessel.Level(volume), gas = GasPressure(epoch, volume, y);
-        (double pressure, double margin) = LowPoint(epoch, surface, gas, flows);
+        (double pressure, double margin) = LowPoint(epoch, surface, gas, y, flows);
         CompiledLine first = epoch.Plant.Lines[0];
         double total = 0;
         foreach (double flow in flows[..LineCount])
@@ -173,10 +198,20 @@ internal sealed partial class DrainModel : IOdeSystem
         double volume = Volume(now, t, y), surface = vessel.Level(volume), gas = GasPressure(now, volume, y);
         double growth = -now.Inflow(t);
         for (int i = 0; i < LineCount; i++)
-            growth += dydt[i] = Flow(now, i, surface, gas, y[i], now.Modes[i].IsLimited);
+            growth += dydt[i] = Flow(now, i, surface, gas, y);
         if (hasPressure)
             dydt[LineCount] = now.Plant.Gas.IsConfined ? now.Plant.Gas.Rate(gas, volume, growth).Rate : 0;
+        for (int i = 0; i < LineCount; i++)
+        {
+            if (flowAt[i] > 0)
+                dydt[flowAt[i]] = Acceleration(now, i, surface, gas, y);
+        }
     }
+
+    private double Acceleration(Epoch epoch, int line, double surface, double gas, ReadOnlySpan<double> y) =>
+        epoch.Modes[line] is { IsFilling: true, IsAtWork: true } mode
+            ? epoch.Plant.Lines[line].Acceleration(mode.Segment, surface, gas, y[line], y[flowAt[line]])
+            : 0;
 
     /// <summary>
     /// The tolerance is meant for the clock: an error in a delivered volume is measured against what the flow moves in
@@ -192,6 +227,11 @@ internal sealed partial class DrainModel : IOdeSystem
             double toRest = vessel.Area(surface) * Math.Max(0, line.MovingHead(surface, gas, y[i]));
             double toAir = Math.Max(0, volume - line.UncoverVolume);
             scale[i] = Math.Max(1e-12 * vessel.Capacity, Math.Abs(dydt[i]) * t + Math.Min(toRest, toAir));
+            if (flowAt[i] == 0)
+                continue;
+            scale[flowAt[i]] = flowScales[i];
+            if (now.Modes[i].IsFilling)
+                scale[i] = Math.Min(scale[i], line.Filling!.Volume);
         }
 
         if (hasPressure)
@@ -202,14 +242,17 @@ internal sealed partial class DrainModel : IOdeSystem
     public double LargestStep(double t, ReadOnlySpan<double> y, ReadOnlySpan<double> dydt) => double.PositiveInfinity;
 
     /// <summary>The line with the least margin: its low point's pressure and margin, Pa.</summary>
-    private (double Pressure, double Margin) LowPoint(Epoch epoch, double surface, double gas, ReadOnlySpan<double> flows)
+    private (double Pressure, double Margin) LowPoint(
+        Epoch epoch, double surface, double gas, ReadOnlySpan<double> y, ReadOnlySpan<double> flows)
     {
         (double Pressure, double Margin) least = (double.PositiveInfinity, double.PositiveInfinity);
         bool anyAtWork = epoch.LinesAtWork > 0;
         for (int i = 0; i < LineCount; i++)
         {
             CompiledLine line = epoch.Plant.Lines[i];
-            double margin = line.Margin(flows[i], surface, gas);
+            double margin = epoch.Modes[i] is { IsFilling: true, IsAtWork: true } mode
+                ? line.FillingMargin(mode.Segment, surface, gas, flows[i], Acceleration(epoch, i, surface, gas, y))
+                : line.Margin(flows[i], surface, gas);
             if (margin < least.Margin && (epoch.Modes[i].IsAtWork || !anyAtWork))
                 least = (margin + line.Threshold, margin);
         }

@@ -6,6 +6,9 @@ public enum EventCode
     /// <summary>Another tenth of the starting volume is gone; the event's number is how many.</summary>
     TenthGone,
 
+    /// <summary>The liquid's front reached the outlet: the line runs full.</summary>
+    RunsFull,
+
     /// <summary>A bore passed from turbulent flow into the transition; the event's number is Re.</summary>
     LeftTurbulent,
 

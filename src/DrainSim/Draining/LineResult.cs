@@ -33,6 +33,14 @@ public sealed record LineResult
     /// <summary>Largest velocity in the narrowest bore, m/s, and when.</summary>
     public required Extreme LargestVelocity { get; init; }
 
+    /// <summary>When the liquid's front reached the outlet, s; null for a line that started full or never came to it.</summary>
+    public double? RanFullAt { get; init; }
+
+    /// <summary>
+    /// Largest Froude number v/√(g·D) in the widest bore behind the crest, once the line runs full, 1; null for a line that never rises above its inlet.
+    /// </summary>
+    public double? OuterLegFroude { get; init; }
+
     /// <summary>Head that the liquid's yield stress holds in it, m; null for a liquid without one.</summary>
     public double? YieldHead { get; init; }
 

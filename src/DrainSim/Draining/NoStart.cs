@@ -18,6 +18,9 @@ public enum NoStart
     /// <summary>The liquid's front in the outer leg does not stand below the level.</summary>
     NoPrime,
 
+    /// <summary>The liquid's front comes to rest in the outer leg before it reaches the outlet.</summary>
+    FrontStops,
+
     /// <summary>A valve on the line is shut.</summary>
     ValveShut,
 }

@@ -8,6 +8,12 @@ namespace DrainSim.Draining;
 /// <param name="StaticLift">crest above the level, m; negative where the crest is flooded</param>
 /// <param name="LiftLimit">highest column that the atmosphere holds over the vapour or least pressure, m</param>
 /// <param name="Suction">vacuum at the outlet end that lifts the liquid over the crest, Pa below atmosphere</param>
+/// <param name="Front">elevation of the front at the start, m; null for a line that is primed to its outlet</param>
+/// <param name="DipFills">
+/// how often a hose is filled by hand until it runs by itself: each time it is pushed under down to the inlet, capped and drawn
+/// out over the rim, and so gains a length equal to the depth of liquid over the inlet; common practice, no source. Null for a
+/// bore above 50 mm or an inlet that is not covered
+/// </param>
 public sealed record PrimeReport(
     double LineVolume,
     double InnerLegVolume,
@@ -15,4 +21,6 @@ public sealed record PrimeReport(
     double FrontElevation,
     double StaticLift,
     double LiftLimit,
-    double Suction);
+    double Suction,
+    double? Front = null,
+    int? DipFills = null);

@@ -55,7 +55,7 @@ internal sealed class RunSurvey
     /// <summary>Least margin of one line while it works, Pa.</summary>
     public Extreme LeastMargin(int line) => model.LineCount == 1
         ? Least(i => i.LowPointMargin)
-        : Least(i => model.EpochAt(i.Time) is var epoch && (epoch.Modes[line].IsAtWork || history.EndTime == 0)
+        : Least(i => model.EpochAt(i.Time) is var epoch && ((epoch.Modes[line].IsAtWork && !epoch.Modes[line].IsFilling) || history.EndTime == 0)
             ? epoch.Plant.Lines[line].Margin(FlowOf(i, line), i.Level, i.HeadspacePressure ?? model.Job.Site.AtmosphericPressure)
             : NotAtWork);
 
@@ -64,6 +64,10 @@ internal sealed class RunSurvey
 
     /// <summary>Largest flow of one line, m³/s.</summary>
     public Extreme LargestFlow(int line) => Largest(i => FlowOf(i, line));
+
+    /// <summary>Largest flow of one line while it runs full, m³/s; 0 where it never does.</summary>
+    public double LargestFullFlow(int line) =>
+        Largest(i => model.EpochAt(i.Time).Modes[line].IsFilling ? 0 : FlowOf(i, line)).Value;
 
     /// <summary>Node at which a line's pressure is least at a time.</summary>
     public int LowPointNode(int line, double time)
@@ -154,7 +158,7 @@ internal sealed class RunSurvey
         if (history.EndTime == 0)
             return new SteadinessCheck(0, 0, 0);
         double inertia = 0, velocity = 0;
-        foreach (Instant instant in history.Instants.Where(i => i is { Flow: > 0, Head: > 0 }))
+        foreach (Instant instant in history.Instants.Where(i => i is { Flow: > 0, Head: > 0 } && !model.EpochAt(i.Time).Modes[0].IsFilling))
         {
             LineHydraulics first = model.EpochAt(instant.Time).Plant.Lines[0].Hydraulics;
             inertia = Math.Max(inertia, first.InertiaTime(Math.Max(0, FlowOf(instant, 0)), instant.Head));

@@ -26,6 +26,12 @@ internal static class RunWatch
     /// <summary>Time below that pressure after which gas may have gathered, s; common practice, no source.</summary>
     private const double GasGathers = 600;
 
+    /// <summary>
+    /// Froude number above which a falling leg clears pockets of air, 1; below 0.3 they rise out of it by themselves, and between
+    /// it carries them irregularly. From memory and a process engineer's web text.
+    /// </summary>
+    private const double ClearsAir = 1;
+
     /// <summary>Margin at the low point of a siphon below which it is thin, Pa; common practice, no source.</summary>
     private const double ThinMargin = 5000;
 
@@ -45,6 +51,8 @@ internal static class RunWatch
                 return (falls ? EventCode.VapourLimitBegins : EventCode.VapourLimitEnds, 0);
             case WatchKind.BoreUncovers:
                 return falls ? (EventCode.BoreUncovered, 0) : null;
+            case WatchKind.FrontArrives:
+                return epoch.Modes[watch.Line].Segment == line.Filling!.SegmentCount - 1 ? (EventCode.RunsFull, 0) : null;
             case WatchKind.OutletCovers:
                 return (falls ? EventCode.OutletFreed : EventCode.OutletCovered, 0);
             case WatchKind.VacuumRatingPasses:
@@ -143,6 +151,8 @@ internal static class RunWatch
         bool siphons = model.Epochs[0].Plant.Lines.Any(line => line.Hydraulics.RisesAboveInlet);
         Add(WarningCode.ThinMargin, result.LeastMargin.Value,
             siphons && result.StoppedAt > 0 && result.LeastMargin.Value is > Touching and < ThinMargin);
+        foreach (LineResult line in result.Lines.Where(l => l is { RanFullAt: not null, OuterLegFroude: < ClearsAir }))
+            Add(WarningCode.AirStaysInLeg, line.OuterLegFroude!.Value, true);
         double differs = TurbulentYield.ShareLess(model.Epochs[0].Plant.Lines[0], job, result.Lines[0].LargestFlow.Value);
         Add(WarningCode.FrictionDiffers, differs, differs > 0);
         double vacuum = result.LargestVacuum?.Value ?? 0;

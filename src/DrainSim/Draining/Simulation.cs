@@ -75,6 +75,8 @@ public static class Simulation
                 return new LineMode(false, Outcome.NeverStarted);
             if (line.DrawOff.Line.AirBreak >= level)
                 return new LineMode(false, Outcome.AirBreak);
+            if (line.Filling is not null)
+                return new LineMode(false, Segment: 0);
             double flow = line.Flow(new LineConditions(level, gas, 0, false), guess: 0);
             if (line.Margin(flow, level, gas) > 0)
                 return new LineMode(false);

@@ -22,6 +22,8 @@ internal static class StartCheck
             _ when job.Level <= line.Hydraulics.InletElevation => NoStart.InletAboveLevel,
             _ when !runsBack && head <= job.Run.SettledWithin => NoStart.NoDrivingHead,
             _ when line.Hydraulics.YieldHead > 0 && line.MovingHead(job.Level, gas, 0) <= job.Run.SettledWithin => NoStart.YieldHolds,
+            { Filling: not null } when line.FrontHead(0, job.Level, gas, 0) <= 0 => NoStart.NoPrime,
+            { Filling: { } filling } when line.FrontHead(0, job.Level, gas, 0) <= filling.YieldHead(0, 0) => NoStart.YieldHolds,
             _ when line.Margin(0, job.Level, gas) <= 0 => NoStart.LiftBeyondLimit,
             _ => null,
         };
@@ -35,7 +37,8 @@ internal static class StartCheck
         LineHydraulics hydraulics = line.Hydraulics;
         if (!hydraulics.RisesAboveInlet)
             return null;
-        double lift = hydraulics.CrestElevation - job.Level;
+        double lift = hydraulics.CrestElevation - job.Level, bore = line.DrawOff.Line.Bore;
+        double dip = Math.Min(job.Level - hydraulics.InletElevation, hydraulics.Node(hydraulics.CrestIndex).Distance);
         return new PrimeReport(
             hydraulics.LineVolume,
             hydraulics.InnerLegVolume,
@@ -43,6 +46,32 @@ internal static class StartCheck
             job.Level,
             lift,
             (job.Site.AtmosphericPressure - line.Threshold) / line.SpecificWeight,
-            Math.Max(0, lift * line.SpecificWeight));
+            Math.Max(0, lift * line.SpecificWeight),
+            line.DrawOff.Front,
+            bore <= WidestByHand && dip > 0 ? (int)Math.Min(MostDips, Math.Ceiling(LengthToFill(hydraulics, job.Level) / dip)) : null);
+    }
+
+    /// <summary>Widest hose that a hand caps, m; common practice, no source.</summary>
+    private const double WidestByHand = 0.05;
+
+    /// <summary>Fills beyond which nobody counts, 1.</summary>
+    private const double MostDips = 1000;
+
+    /// <summary>
+    /// Length of line from the inlet to the place behind the crest at which the front stands at the level, m: filled so far, the
+    /// line runs by itself. The whole length where it never falls to the level.
+    /// </summary>
+    private static double LengthToFill(LineHydraulics hydraulics, double level)
+    {
+        for (int i = hydraulics.CrestIndex + 1; i < hydraulics.NodeCount; i++)
+        {
+            (LineNode from, LineNode to) = (hydraulics.Node(i - 1), hydraulics.Node(i));
+            if (to.Elevation > level)
+                continue;
+            double share = from.Elevation <= level ? 0 : (from.Elevation - level) / (from.Elevation - to.Elevation);
+            return from.Distance + share * (to.Distance - from.Distance);
+        }
+
+        return hydraulics.TotalLength;
     }
 }

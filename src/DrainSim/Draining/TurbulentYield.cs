@@ -1,5 +1,4 @@
 using DrainSim.Lines;
-using DrainSim.Liquids;
 
 namespace DrainSim.Draining;
 

@@ -34,6 +34,12 @@ public enum WarningCode
     NeverEmpties,
 
     /// <summary>
+    /// The outer leg, in which air stood at the start, never runs so fast that it clears; the number is its largest Froude
+    /// number, 1.
+    /// </summary>
+    AirStaysInLeg,
+
+    /// <summary>
     /// A Bingham liquid flows turbulently, for which the published forms differ; the number is the share by which the friction
     /// of <see cref="Lines.DarbyMelson"/> is less than the one taken, 1, at the largest flow.
     /// </summary>

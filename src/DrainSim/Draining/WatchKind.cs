@@ -21,6 +21,12 @@ internal enum WatchKind
     /// <summary>The head that is left to drive a line's flow held at the threshold.</summary>
     LiftExhausts,
 
+    /// <summary>The part of a line's outer leg that its front has passed beyond the segment that it is in.</summary>
+    FrontArrives,
+
+    /// <summary>The flow of a line whose front has yet to reach the outlet.</summary>
+    FrontStops,
+
     /// <summary>A line's driving head above the settled head.</summary>
     HeadSettles,
 
@@ -47,6 +53,9 @@ internal enum WatchKind
 
     /// <summary>The overpressure in the headspace about its rating.</summary>
     PressureRatingPasses,
+
+    /// <summary>The pressure in the headspace about one at which a valve begins to open or is fully open.</summary>
+    ValveMoves,
 
     /// <summary>The difference of inflow and outflow.</summary>
     FlowsBalance,

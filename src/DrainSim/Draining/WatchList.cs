@@ -1,3 +1,4 @@
+using DrainSim.Gas;
 using DrainSim.Lines;
 
 namespace DrainSim.Draining;
@@ -31,6 +32,12 @@ internal static class WatchList
         yield return new(WatchKind.MarginVanishes, index);
         if (line.HoldsAtVapour)
             yield return new(WatchKind.LiftExhausts, index);
+        if (line.Filling is not null)
+        {
+            yield return new(WatchKind.FrontArrives, index);
+            yield return new(WatchKind.FrontStops, index);
+        }
+
         yield return new(WatchKind.HeadSettles, index);
         if (line.HasTail)
             yield return new(WatchKind.BoreUncovers, index);
@@ -55,6 +62,8 @@ internal static class WatchList
             yield return new(WatchKind.VacuumRatingPasses);
         if (isConfined && job.PressureRating is not null)
             yield return new(WatchKind.PressureRatingPasses);
+        foreach (double pressure in job.Timeline.Select(act => act.After).Append(job).SelectMany(ValvePressures).Distinct())
+            yield return new(WatchKind.ValveMoves, Value: pressure);
         Inflow[] inflows = [.. job.Timeline.Select(act => act.After).Prepend(job).Select(plant => plant.Inflow).OfType<Inflow>()];
         if (inflows.Length > 0)
         {
@@ -68,6 +77,18 @@ internal static class WatchList
         {
             if (!job.Timeline[j].IsDueAtStart(job.Level))
                 yield return new(WatchKind.ActFalls, 0, j);
+        }
+    }
+
+    /// <summary>Pressures at which a valve begins to open or is fully open, Pa absolute: there the law of the headspace has a kink.</summary>
+    private static IEnumerable<double> ValvePressures(Job job)
+    {
+        double atmosphere = job.Site.AtmosphericPressure;
+        foreach (PressureValve valve in (job.Headspace as VentedHeadspace)?.Openings.OfType<PressureValve>() ?? [])
+        {
+            double sign = valve is ReliefValve ? 1 : -1;
+            yield return atmosphere + sign * valve.SetPressure;
+            yield return atmosphere + sign * valve.FullOpenPressure;
         }
     }
 }

@@ -14,12 +14,16 @@ internal sealed class EventScan<TSystem> where TSystem : IOdeSystem, IEventSet
     private readonly Sign[] sides;
     private readonly double[] sideTimes;
     private readonly double[] sideValues;
+    private readonly Sign[] keptSides;
+    private readonly double[] keptTimes;
+    private readonly double[] keptValues;
     private readonly double[] values;
     private readonly double[] probe;
     private readonly double[] state;
     private readonly double[] slope;
     private readonly Crossing[] found;
     private readonly List<LocatedEvent> log = [];
+    private int keptLog;
     private int foundCount;
     private int instantStart;
     private int instantEnd;
@@ -31,6 +35,7 @@ internal sealed class EventScan<TSystem> where TSystem : IOdeSystem, IEventSet
         int count = system.EventCount;
         (sides, found) = (new Sign[count], new Crossing[count]);
         (sideTimes, sideValues) = (new double[count], new double[count]);
+        (keptSides, keptTimes, keptValues) = (new Sign[count], new double[count], new double[count]);
         (values, probe) = (new double[count], new double[count]);
         (state, slope) = (new double[system.Dimension], new double[system.Dimension]);
     }
@@ -54,6 +59,20 @@ internal sealed class EventScan<TSystem> where TSystem : IOdeSystem, IEventSet
     /// <summary>The events of that instant, in the order in which they are acted on.</summary>
     public ReadOnlySpan<Crossing> InstantEvents => found.AsSpan(instantStart, instantEnd - instantStart);
 
+    /// <summary>Whether one of them has a kink.</summary>
+    public bool IsKink
+    {
+        get
+        {
+            foreach (ref readonly Crossing crossing in InstantEvents)
+            {
+                if (system.Rule(crossing.Index).IsKink)
+                    return true;
+            }
+            return false;
+        }
+    }
+
     /// <summary>All events that fired in this run.</summary>
     public ImmutableArray<LocatedEvent> Events() => [.. log];
 
@@ -75,6 +94,7 @@ internal sealed class EventScan<TSystem> where TSystem : IOdeSystem, IEventSet
     /// <summary>Looks for events in a step; true when one of them cuts it, at <see cref="Instant"/>.</summary>
     public bool IsCut(DenseStep step, ReadOnlySpan<double> endState, ReadOnlySpan<double> endSlope, int samples)
     {
+        Keep();
         for (int j = 1; j <= samples && sides.Length > 0; j++)
         {
             bool isEnd = j == samples;
@@ -89,6 +109,15 @@ internal sealed class EventScan<TSystem> where TSystem : IOdeSystem, IEventSet
             Settle(t, isEnd);
         }
         return false;
+    }
+
+    /// <summary>Takes back what the last look at a step found, since the step is repeated.</summary>
+    public void Rewind()
+    {
+        keptSides.CopyTo(sides, 0);
+        keptTimes.CopyTo(sideTimes, 0);
+        keptValues.CopyTo(sideValues, 0);
+        log.RemoveRange(keptLog, log.Count - keptLog);
     }
 
     /// <summary>Takes the values after the restarts of an instant; true when a function that they carried
@@ -108,6 +137,14 @@ internal sealed class EventScan<TSystem> where TSystem : IOdeSystem, IEventSet
             return true;
         Settle(t, isStepEnd: false);
         return false;
+    }
+
+    private void Keep()
+    {
+        sides.CopyTo(keptSides, 0);
+        sideTimes.CopyTo(keptTimes, 0);
+        sideValues.CopyTo(keptValues, 0);
+        keptLog = log.Count;
     }
 
     private void FindCrossings(DenseStep step, double t, bool isStepEnd)

@@ -6,6 +6,9 @@ internal interface ILossWalk
     /// <summary>Head used up to the node reached, its velocity head included, m.</summary>
     double Used { get; }
 
+    /// <summary>Head lost up to the node reached, m.</summary>
+    double Lost { get; }
+
     /// <summary>Goes on to the next node; false behind the last.</summary>
     bool MoveNext();
 }

@@ -216,6 +216,32 @@ public sealed class LineHydraulics
     }
 
     /// <summary>
+    /// Head used up on the way to a place on the run in front of a node by a column that ends there, its velocity head
+    /// included, m.
+    /// </summary>
+    /// <param name="node">a node behind a run; at least 1</param>
+    /// <param name="share">place on the run, 1; 0 at its start, 1 at the node</param>
+    /// <param name="flow">flow, m³/s; at least 0</param>
+    public double HeadWithin(int node, double share, double flow) => stress is null
+        ? HeadWithin(new LossWalk(losses, flow / parallel), node, share)
+        : HeadWithin(new StressWalk(stress, flow / parallel), node, share);
+
+    /// <summary>The least absolute pressure over the first nodes while the flow changes, Pa.</summary>
+    /// <param name="flow">flow, m³/s; at least 0</param>
+    /// <param name="acceleration">dQ/dt, m³/s²</param>
+    /// <param name="inertances">Σ L/(g·n·A) from the inlet to each of those nodes, s²/m²</param>
+    /// <param name="surface">elevation of the liquid's surface in the tank, m</param>
+    /// <param name="gasPressure">absolute pressure on that surface, Pa</param>
+    internal double LowPointPressure(
+        double flow, double acceleration, ReadOnlySpan<double> inertances, double surface, double gasPressure)
+    {
+        double highest = stress is null
+            ? HighestLift(new LossWalk(losses, flow / parallel), acceleration, inertances)
+            : HighestLift(new StressWalk(stress, flow / parallel), acceleration, inertances);
+        return gasPressure + weight * (surface - highest);
+    }
+
+    /// <summary>
     /// The largest flow at which the low point is not below a pressure (to rounding), m³/s; 0 when the static lift
     /// alone is too much.
     /// </summary>
@@ -269,6 +295,25 @@ public sealed class LineHydraulics
             }
         }
         return highest;
+    }
+
+    private double HighestLift<TWalk>(TWalk walk, double acceleration, ReadOnlySpan<double> inertances)
+        where TWalk : struct, ILossWalk
+    {
+        double highest = double.NegativeInfinity;
+        for (int i = 0; i < inertances.Length && walk.MoveNext(); i++)
+            highest = Math.Max(highest, nodes[i].Elevation + walk.Used + acceleration * inertances[i]);
+        return highest;
+    }
+
+    private static double HeadWithin<TWalk>(TWalk walk, int node, double share)
+        where TWalk : struct, ILossWalk
+    {
+        for (int i = 0; i < node; i++)
+            walk.MoveNext();
+        double before = walk.Lost;
+        walk.MoveNext();
+        return before + share * (walk.Lost - before) + walk.Used - walk.Lost;
     }
 
     private static double Area(double bore) => Math.PI / 4 * bore * bore;

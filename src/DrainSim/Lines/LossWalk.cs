@@ -17,6 +17,9 @@ internal struct LossWalk(LineLosses losses, double q) : ILossWalk
     /// <inheritdoc/>
     public double Used { get; private set; }
 
+    /// <inheritdoc/>
+    public readonly double Lost => loss;
+
     /// <summary>q times the derivative of <see cref="Used"/> by q, m.</summary>
     public double UsedRise { get; private set; }
 

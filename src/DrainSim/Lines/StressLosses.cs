@@ -20,6 +20,9 @@ internal sealed class StressLosses
     /// <summary>Step in ln q whose square is under the last bit: within one regime no other is needed.</summary>
     private const double LastStep = 1e-8;
 
+    /// <summary>Step in ln q that is rounding: at a kink, where the slope may be of the wrong side, it has to come down to this.</summary>
+    private const double LastBits = 1e-14;
+
     /// <summary>Turns that bisection alone would need, with room.</summary>
     private const int MostTurns = 400;
 
@@ -117,7 +120,7 @@ internal sealed class StressLosses
             double step = Math.Log(wanted / excess) * excess / rise;
             double next = q * Math.Exp(step);
             bool isInside = next >= low && next <= high;
-            if (isInside && Math.Abs(step) < LastStep && SameRegime(q, next))
+            if (Math.Abs(step) < (SameRegime(q, next) ? LastStep : LastBits))
                 return next;
             if (high - low <= 4e-16 * high)
                 return q;

@@ -24,6 +24,9 @@ internal struct StressWalk(StressLosses losses, double q) : ILossWalk
     public readonly double Used => Excess + losses.Steps[Node].YieldToHere;
 
     /// <inheritdoc/>
+    public readonly double Lost => loss + losses.Steps[Node].YieldToHere;
+
+    /// <inheritdoc/>
     public bool MoveNext()
     {
         if (++Node >= losses.Count)

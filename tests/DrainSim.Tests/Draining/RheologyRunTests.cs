@@ -4,7 +4,6 @@ using DrainSim.Lines;
 using DrainSim.Liquids;
 using DrainSim.Reports.Measures;
 using DrainSim.Reports.Wording;
-using DrainSim.Vessels;
 using MathNet.Numerics;
 
 namespace DrainSim.Tests.Draining;

@@ -147,6 +147,6 @@ public sealed class RheologyFrictionTests
     private static double InWords(IReadOnlyDictionary<string, string> row, string letter)
     {
         string word = row["quantity"].Split(' ').Single(w => w.StartsWith(letter + "=", StringComparison.Ordinal));
-        return NumberText.TryRead(word[(letter.Length + 1)..], out double value) ? value : throw new InvalidDataException(word);
+        return NumberText.TryRead(word.AsSpan(letter.Length + 1), out double value) ? value : throw new InvalidDataException(word);
     }
 }

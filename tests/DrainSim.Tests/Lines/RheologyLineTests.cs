@@ -21,7 +21,7 @@ public sealed class RheologyLineTests
         Gen.Select(AnyLine, AnyStrangeLiquid, Gen.Double[-8, 10], Gen.Double[-3, 3]).Sample((line, liquid, logFlow, off) =>
         {
             LineHydraulics compiled = line.Compile(liquid);
-            double flow = Math.Exp(logFlow) * compiled.RegimeFlows[0];
+            double flow = Math.Abs(logFlow) < 0.5 ? compiled.RegimeFlows[0] : Math.Exp(logFlow) * compiled.RegimeFlows[0]; // at the kink too
             double head = compiled.HeadLoss(flow, out double slope);
             // known no better than the head's last bits over the slope in logarithms
             double tolerance = 1e-13 + 1e-13 * head / (slope * flow);

@@ -195,6 +195,15 @@ public sealed class GoodScenarioTests
     }
 
     [Fact]
+    public void A_front_in_the_outer_leg_is_read()
+    {
+        ScenarioReading reading = Read(GoodScenario.With("  inlet: {", "  start: {front: 120 cm}\n  inlet: {"));
+        Assert.Equal("", ProblemReport.Refusal(reading));
+        Assert.Equal(1.2, reading.Scenario!.Job.DrawOffs[0].Front);
+        Assert.Null(Read(GoodScenario.With("  inlet: {", "  start: primed\n  inlet: {")).Scenario!.Job.DrawOffs[0].Front);
+    }
+
+    [Fact]
     public void An_inlet_above_the_level_is_left_to_the_run() =>
         Assert.False(Read(GoodScenario.With("elevation: 50 mm", "elevation: 2.8 m")).IsRefused);
 
