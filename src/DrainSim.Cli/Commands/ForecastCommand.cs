@@ -88,7 +88,7 @@ internal sealed class ForecastCommand : ExplainedCommand
         {
             ForecastReport report = await Task.Run(() => Report(parsed, plan, cancellation), cancellation);
             IReadOnlyList<string> files = await Task.Run(() => ForecastFiles.Write(folder, report), cancellation);
-            ForecastBlockText.Write(parsed.InvocationConfiguration.Output, report, files);
+            ForecastBlock.Write(parsed.InvocationConfiguration.Output, report, files);
             return KeepsLimits(report, error) ? ExitCode.Ran : ExitCode.NotAsExpected;
         }
         catch (ArgumentOutOfRangeException impossible)

@@ -29,7 +29,7 @@ internal sealed class UncertaintyCommand : ExplainedCommand
 
     private readonly Option<string?> samples = new("--samples")
     {
-        Description = "Number of runs, from 32 to 1000000; 2048 unless given here or in the scenario.",
+        Description = "Number of runs, from 32 to 100000; 2048 unless given here or in the scenario.",
         HelpName = "number",
     };
 
@@ -78,7 +78,7 @@ internal sealed class UncertaintyCommand : ExplainedCommand
         try
         {
             (UncertaintyReport report, IReadOnlyList<string> files) = await Task.Run(() => Run(parsed, plan, error, cancellation), cancellation);
-            UncertaintyBlockText.Write(parsed.InvocationConfiguration.Output, report, files);
+            UncertaintyBlock.Write(parsed.InvocationConfiguration.Output, report, files);
             return ExitCode.Ran;
         }
         catch (ArgumentOutOfRangeException nothing)

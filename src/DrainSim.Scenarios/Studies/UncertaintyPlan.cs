@@ -7,6 +7,9 @@ namespace DrainSim.Scenarios.Studies;
 /// <summary>Reads what an uncertainty study has to run.</summary>
 public static class UncertaintyPlan
 {
+    /// <summary>Most samples: their percentiles need all of them in memory, some 900 bytes each.</summary>
+    private const int MostSamples = 100_000;
+
     private const string Nothing = "Give --vary 'tank.level=normal(10 mm)', or a block 'uncertainty' with the key 'parameters'";
 
     /// <summary>The study of a scenario's block <c>uncertainty</c> and of what a caller adds to it.</summary>
@@ -22,7 +25,7 @@ public static class UncertaintyPlan
         UncertaintyBlock block = document.StudyBlock(UncertaintyBlock.Read, new UncertaintyBlock(), problems);
         List<(string Path, SpreadText Spread)> spreads = Spreads(block, request, problems);
         ScenarioDocument set = StudyTexts.Set(document, new StudyBlock { Set = block.Set }, new StudyRequest { Set = request.Set }, problems);
-        int samples = Count(request.Samples ?? block.Samples, "uncertainty.samples", 2 * SamplePlan.Repetitions, 1_000_000, UncertaintyStudy.UsualSamples, problems);
+        int samples = Count(request.Samples ?? block.Samples, "uncertainty.samples", 2 * SamplePlan.Repetitions, MostSamples, UncertaintyStudy.UsualSamples, problems);
         int seed = Count(request.Seed ?? block.Seed, "uncertainty.seed", 0, int.MaxValue, 1, problems);
         SamplingMethod method = Method(request.Sampling ?? block.Sampling, problems);
         if (problems.Count == 0 && spreads.Count is 0 or > SamplePlan.MostDimensions)

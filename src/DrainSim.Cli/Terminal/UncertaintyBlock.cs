@@ -6,7 +6,7 @@ using DrainSim.Studies.Uncertainty;
 namespace DrainSim.Cli.Terminal;
 
 /// <summary>What an uncertainty study found, on the terminal.</summary>
-internal static class UncertaintyBlockText
+internal static class UncertaintyBlock
 {
     /// <summary>Writes the verdict, the percentiles, the chances, the ranking, and where the files are.</summary>
     public static void Write(TextWriter output, UncertaintyReport report, IReadOnlyList<string> files)

@@ -6,7 +6,7 @@ using DrainSim.Studies.Forecasting;
 namespace DrainSim.Cli.Terminal;
 
 /// <summary>What a forecast found, on the terminal.</summary>
-internal static class ForecastBlockText
+internal static class ForecastBlock
 {
     /// <summary>Most readings that are listed.</summary>
     private const int MostRows = 24;
