@@ -16,15 +16,20 @@ internal sealed class LinePressures
         job = result.Job;
         index = WorstLine(result);
         line = new LineHydraulics(job.DrawOffs[index].Line, job.Liquid, job.Site.Gravity);
-        Start = result.Trace.At(0);
+        double? full = result.Lines.ElementAtOrDefault(index)?.RanFullAt;
+        Start = result.Trace.At(full is { } time ? Math.Min(Math.BitIncrement(time), result.Trace.End) : 0);
+        StartName = full is null ? "at the start" : "once full";
         Worst = result.Trace.At(Math.Clamp(result.LeastMargin.Time, 0, result.Trace.End));
         Distances = Along(node => node.Distance);
         Elevations = Along(node => node.Elevation);
         CrestIndex = line.CrestIndex;
     }
 
-    /// <summary>The first moment.</summary>
+    /// <summary>The first moment at which the line is full.</summary>
     public Instant Start { get; }
+
+    /// <summary>That moment in words.</summary>
+    public string StartName { get; }
 
     /// <summary>The moment of the least margin.</summary>
     public Instant Worst { get; }
