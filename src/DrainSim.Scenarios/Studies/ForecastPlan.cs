@@ -41,7 +41,10 @@ public static class ForecastPlan
         if (sheet.Readings.Count <= parameters.Length)
         {
             problems.Add(new Problem(0, 0, "", $"{sheet.Readings.Count} readings cannot tell {parameters.Length} parameters and their errors",
-                $"Give {parameters.Length + 1} readings at least, better three times as many, or fit fewer") { File = Quote.Plain(request.Readings ?? block.Readings!) });
+                $"Give {parameters.Length + 1} readings at least, better three times as many, or fit fewer")
+            {
+                File = Quote.Plain(request.Readings ?? block.Readings!),
+            });
             return null;
         }
 
