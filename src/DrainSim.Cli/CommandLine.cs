@@ -72,6 +72,8 @@ internal static class CommandLine
             new CheckCommand(),
             new SweepCommand(),
             new SizeCommand(),
+            new UncertaintyCommand(),
+            new ForecastCommand(),
             new NewCommand(),
             new LiquidsCommand(),
             new FittingsCommand(),

@@ -111,6 +111,20 @@ public sealed class ScenarioDocument
         return block;
     }
 
+    /// <summary>The block of a study as its own reader takes it; what is wrong with its form is a problem.</summary>
+    /// <param name="read">reads the block from the whole file</param>
+    /// <param name="none">what stands for a file that could not be read at all</param>
+    /// <param name="found">takes the problems</param>
+    internal T StudyBlock<T>(Func<BlockReader, T> read, T none, List<Problem> found)
+    {
+        if (root is null)
+            return none;
+        Findings findings = new(source);
+        T block = read(new BlockReader(root, "", root.At, findings));
+        found.AddRange(findings.Problems);
+        return block;
+    }
+
     /// <summary>The document without the blocks of its studies, which its job does not need.</summary>
     internal ScenarioDocument WithoutStudies() => root is null || !root.Entries.Any(entry => ParameterPath.IsStudy(entry.Key))
         ? this

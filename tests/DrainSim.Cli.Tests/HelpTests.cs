@@ -9,6 +9,8 @@ public sealed class HelpTests
     [InlineData("check")]
     [InlineData("sweep")]
     [InlineData("size")]
+    [InlineData("uncertainty")]
+    [InlineData("forecast")]
     [InlineData("new")]
     [InlineData("liquids")]
     [InlineData("fittings")]

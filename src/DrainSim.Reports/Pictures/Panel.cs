@@ -56,9 +56,12 @@ internal sealed class Panel
     }
 
     /// <summary>Tints the ground between a curve and 0.</summary>
-    public void Tint(double[] xs, double[] ys, SKColor color)
+    public void Tint(double[] xs, double[] ys, SKColor color) => Band(xs, new double[xs.Length], ys, color);
+
+    /// <summary>Tints the ground between two curves.</summary>
+    public void Band(double[] xs, double[] lower, double[] upper, SKColor color)
     {
-        ScottPlot.Plottables.FillY fill = Plot.Add.FillY(xs, new double[xs.Length], ys);
+        ScottPlot.Plottables.FillY fill = Plot.Add.FillY(xs, lower, upper);
         fill.FillColor = Palette.Of(color);
         fill.LineWidth = 0;
         fill.MarkerSize = 0;

@@ -34,6 +34,12 @@ public static class LimitWording
         return $"{Name(check.Kind)} {bound}: {kept}, {worst}{when}.";
     }
 
+    /// <summary>A bound in words, without its full stop.</summary>
+    /// <param name="kind">which bound</param>
+    /// <param name="bound">the bound, in its SI unit</param>
+    /// <param name="format">writes the measures</param>
+    public static string Bound(LimitKind kind, double bound, MeasureFormat format) => $"{Name(kind)} {Measure(kind, bound, format)}";
+
     /// <summary>How one of several lines ended, with its full stop.</summary>
     /// <param name="line">the line</param>
     /// <param name="index">its place in the job, from 0</param>

@@ -222,9 +222,8 @@ internal sealed class BlockReader(BlockNode node, string path, Position at, Find
         foreach (Entry entry in node.Entries.Where(entry => !asked.Contains(entry.Key)))
         {
             string? near = findings.IsFull ? null : Nearest.Find(entry.Key, asked);
-            string? later = LaterWork.Find(PathOf(entry.Key));
-            string help = later ?? (near is null ? $"The keys here are {string.Join(", ", asked)}" : $"did you mean {Quote.Of(near)}?");
-            findings.Refuse(entry.KeyAt, PathOf(Quote.Plain(entry.Key)), later is null ? ScenarioDocument.NoSuchKey : "not read by this version", help);
+            string help = near is null ? $"The keys here are {string.Join(", ", asked)}" : $"did you mean {Quote.Of(near)}?";
+            findings.Refuse(entry.KeyAt, PathOf(Quote.Plain(entry.Key)), ScenarioDocument.NoSuchKey, help);
             if (near is not null)
                 meant.Add(near);
         }

@@ -24,12 +24,14 @@ internal sealed record StudyBlock
     /// <summary>What sizing is to reach; null where there is none.</summary>
     public string? Target { get; init; }
 
-    /// <summary>Reads the blocks <c>sweep</c> and <c>size</c> of a file, where it has them, and tells what is wrong with their form.</summary>
+    /// <summary>Reads the blocks of all studies of a file, where it has them, and tells what is wrong with their form.</summary>
     /// <param name="file">the whole scenario</param>
     public static void Check(BlockReader file)
     {
         Read(file, "sweep");
         Read(file, "size");
+        UncertaintyBlock.Read(file);
+        ForecastBlock.Read(file);
     }
 
     /// <summary>Reads a block; an empty one where the file has none.</summary>
@@ -53,7 +55,8 @@ internal sealed record StudyBlock
         return read;
     }
 
-    private static List<(string, string)> Texts(BlockReader block)
+    /// <summary>The values that a study's block sets for all cases.</summary>
+    internal static List<(string, string)> Texts(BlockReader block)
     {
         List<(string, string)> set = [];
         if (block.Block("set") is not { } keys)

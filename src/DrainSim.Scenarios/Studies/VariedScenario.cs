@@ -1,3 +1,5 @@
+using DrainSim.Studies;
+
 namespace DrainSim.Scenarios.Studies;
 
 /// <summary>A scenario of which some parameters change from case to case.</summary>
@@ -53,4 +55,19 @@ public sealed class VariedScenario
 
     /// <summary>Makes jobs of values; for one thread.</summary>
     public CaseReader NewReader() => new(document, Base.Job, Parameters);
+
+    /// <summary>Makes jobs of numbers in SI, in the order of the parameters; for any thread.</summary>
+    /// <remarks>The parameters are numbers, not words.</remarks>
+    public Func<IReadOnlyList<double>, CaseJob> Maker()
+    {
+        var readers = new ThreadLocal<CaseReader>(NewReader);
+        return values =>
+        {
+            var given = new ParameterValue[values.Count];
+            for (int i = 0; i < given.Length; i++)
+                given[i] = Parameters[i].Of(values[i]);
+            CaseReading made = readers.Value!.Read(given);
+            return made.Job is { } job ? CaseJob.Of(job) : CaseJob.Refused(made.Cause);
+        };
+    }
 }

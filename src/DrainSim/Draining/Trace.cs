@@ -33,6 +33,11 @@ public sealed class Trace
     /// <exception cref="ArgumentOutOfRangeException">the time lies outside the run</exception>
     public Instant At(double time) => at(Require.Within(time, 0, End, "time", "s"));
 
+    /// <summary>The volume in the tank at a time, m³; no flow is solved for it.</summary>
+    /// <param name="time">since the start, s; from 0 to <see cref="End"/></param>
+    /// <exception cref="ArgumentOutOfRangeException">the time lies outside the run</exception>
+    public double VolumeAt(double time) => volumeAt(Require.Within(time, 0, End, "time", "s"));
+
     /// <summary>When the volume first fell to a value, s; null when it never did.</summary>
     /// <param name="volume">volume in the tank, m³</param>
     public double? TimeAtVolume(double volume)

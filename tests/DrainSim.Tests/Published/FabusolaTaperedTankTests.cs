@@ -13,17 +13,17 @@ namespace DrainSim.Tests.Published;
 /// </summary>
 public sealed class FabusolaTaperedTankTests
 {
-    private const double Hole = 0.009;
+    internal const double Hole = 0.009;
     private const double Spacing = 25;
 
     /// <summary>Levels every 25 s, cm above the floor.</summary>
-    private static readonly double[] Levels =
+    internal static readonly double[] Levels =
     [
         24.87, 23.68, 22.98, 22.07, 21.95, 20.86, 20.04, 18.73, 18.12, 16.94, 16.62, 15.74, 14.57, 14.01, 13.09, 12.65, 11.94,
         11.38, 10.68, 10.12, 9.77, 9.01, 8.40, 7.86, 7.20, 6.94, 6.44, 5.95, 5.74, 5.14, 4.89, 4.49, 3.92,
     ];
 
-    private static readonly double[] Times = [.. Levels.Select((_, i) => i * Spacing)];
+    internal static readonly double[] Times = [.. Levels.Select((_, i) => i * Spacing)];
 
     /// <summary>Times to the levels through a hole of coefficient 1, s: for another one they go with its inverse.</summary>
     private static readonly Lazy<double[]> IdealTimes = new(() =>
@@ -56,7 +56,7 @@ public sealed class FabusolaTaperedTankTests
             Assert.Equal(Times[i], begins + inverse * IdealTimes.Value[i], 0.05 * Times[i]);
     }
 
-    private static StrappingTable Tank()
+    internal static StrappingTable Tank()
     {
         const double floor = 102.98e-4, top = 128.95e-4, height = 0.2859;
         return new StrappingTable
