@@ -25,7 +25,9 @@ public static class ForecastWording
         string planned = result.Before.Outcome == result.Run.Outcome
             ? $" As the scenario stood it would have been {report.Moment(result.Before.StoppedAt)}."
             : $" As the scenario stood: {Verdict.Headline(result.Before.Outcome)}, {report.Moment(result.Before.StoppedAt)}.";
-        return $"{Headline(result.Run.Outcome)} {report.Moment(finish.Best)}{band}.{planned}";
+        string found = string.Concat(result.Alternatives.Where(one => one.IsFound).OrderBy(one => one.PValue).Take(1)
+            .Select(one => $" But the readings speak of {Name(one)}: look for it."));
+        return $"{Headline(result.Run.Outcome)} {report.Moment(finish.Best)}{band}.{planned}{found}";
     }
 
     /// <summary>What an estimate says: value, interval, and what the scenario had.</summary>
@@ -67,8 +69,8 @@ public static class ForecastWording
     {
         ArgumentNullException.ThrowIfNull(alternative);
         ArgumentNullException.ThrowIfNull(report);
-        string name = alternative.Kind == AlternativeKind.Leak ? "a leak" : "a steady inflow";
-        if (alternative.Run is not { } run)
+        string name = Name(alternative);
+        if (alternative.FinishedAt is not { } finish)
             return $"No sign of {name}: the readings want none.";
         Measures.Unit unit = report.Format.FlowUnit(alternative.Flow);
         string flow = MeasureFormat.Number(unit.From(alternative.Flow))
@@ -76,9 +78,11 @@ public static class ForecastWording
         string test = string.Create(CultureInfo.InvariantCulture, $"F-test {alternative.PValue:0.000}")
             + (alternative.CriterionGain is { } gain ? string.Create(CultureInfo.InvariantCulture, $", AICc {(gain > 0 ? "better" : "worse")} by {Math.Abs(gain):0.0}") : "");
         return alternative.IsFound
-            ? $"LOOK FOR {name.ToUpperInvariant()}: {flow} explains the readings better ({test}); the finish would then be {report.Moment(run.StoppedAt)}."
+            ? $"LOOK FOR {name.ToUpperInvariant()}: {flow} explains the readings better ({test}); the finish would then be {report.Moment(finish)}."
             : $"No reason to look for {name}: it would not explain the readings better ({test}).";
     }
+
+    private static string Name(Alternative alternative) => alternative.Kind == AlternativeKind.Leak ? "a leak" : "a steady inflow";
 
     private static string Headline(Outcome outcome) => outcome switch
     {

@@ -3,7 +3,6 @@ using DrainSim.Lines;
 using DrainSim.Studies;
 using DrainSim.Studies.Forecasting;
 using DrainSim.Tests.Draining;
-using DrainSim.Vessels;
 
 namespace DrainSim.Tests.Published;
 

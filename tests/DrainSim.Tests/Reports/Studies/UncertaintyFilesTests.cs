@@ -1,5 +1,4 @@
 using System.Text.Json;
-using DrainSim.Draining;
 using DrainSim.Reports.Studies;
 using DrainSim.Studies;
 using DrainSim.Studies.Sampling;
