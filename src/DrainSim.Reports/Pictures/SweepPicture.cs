@@ -1,5 +1,4 @@
 using System.Globalization;
-using DrainSim.Reports.Measures;
 using DrainSim.Reports.Studies;
 using SkiaSharp;
 

@@ -95,7 +95,7 @@ internal sealed partial class CompiledLine
     /// <param name="delivered">volume that has left the tank, m³</param>
     /// <param name="flow">flow, m³/s</param>
     public double Acceleration(int segment, double surface, double gas, double delivered, double flow) =>
-        Filling!.Acceleration(segment, delivered, flow, FrontHead(segment, surface, gas, delivered));
+        Hydraulics.IsShut ? 0 : Filling!.Acceleration(segment, delivered, flow, FrontHead(segment, surface, gas, delivered));
 
     /// <summary>Least pressure in a line that fills less the threshold, Pa.</summary>
     /// <param name="segment">segment that the front is in, from 0</param>

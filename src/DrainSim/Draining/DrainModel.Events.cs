@@ -130,7 +130,10 @@ internal sealed partial class DrainModel : IEventSet
         _ => EventDirection.Falling,
     };
 
-    /// <summary>The front goes on into the next segment; behind the last the line runs full, its flow that of its head.</summary>
+    /// <summary>
+    /// The front goes on into the next segment; behind the last the line runs full, its flow from then on that of its head. A
+    /// column that reaches the limit at its low point on the way parts, also where a full line would hold its flow there.
+    /// </summary>
     private void Advance(int line, double t, Span<double> y)
     {
         LineMode mode = now.Modes[line];
@@ -154,6 +157,9 @@ internal sealed partial class DrainModel : IEventSet
         Epoch next = now.With(t, after);
         for (int i = 0; i < LineCount; i++)
         {
+            if (flowAt[i] > 0 && after.Lines[i].Hydraulics.IsShut)
+                y[flowAt[i]] = 0; // a valve stops the column where it is
+
             // Where an act gives a line that still fills other parts, its front goes on from the nearest of them.
             int last = (after.Lines[i].Filling?.SegmentCount ?? 0) - 1;
             if (now.Modes[i].IsFilling && now.Modes[i].Segment > last)
@@ -216,9 +222,9 @@ internal sealed partial class DrainModel : IEventSet
             WatchKind.FrontArrives => now.Modes[watch.Line] is { IsFilling: true, Segment: var segment }
                 ? line.Filling!.Beyond(segment, delivered)
                 : 1,
-            WatchKind.FrontStops => now.Modes[watch.Line].IsFilling ? flow / flowScales[watch.Line] : 1,
+            WatchKind.FrontStops => now.Modes[watch.Line].IsFilling && !line.Hydraulics.IsShut ? flow / flowScales[watch.Line] : 1,
             WatchKind.LiftExhausts => line.Margin(0, at.Surface, at.Gas) / line.SpecificWeight - run.SettledWithin,
-            WatchKind.HeadSettles => Unsettled(RestHead(line, at, delivered), line.Hydraulics.YieldHead),
+            WatchKind.HeadSettles => Unsettled(RestHead(line, at.Surface, at.Gas, delivered), line.Hydraulics.YieldHead),
             WatchKind.AllSettle => IsFed(at.Time) ? 1 : LargestHead(at, y) - run.SettledWithin,
             WatchKind.BoreUncovers => BoreCover(line.InletLimit(at.Surface), flow),
             WatchKind.OutletCovers => line.ReceiverSurface(delivered) - line.Hydraulics.OutletElevation,
@@ -238,12 +244,12 @@ internal sealed partial class DrainModel : IEventSet
     /// The head that has to be used up before a line rests, m. Under a vent that lets air in at any vacuum the vacuum wears
     /// off: there the liquid's own head has to be used up too, however small the driving head is meanwhile.
     /// </summary>
-    private double RestHead(CompiledLine line, in Moment at, double delivered)
+    private double RestHead(CompiledLine line, double surface, double gas, double delivered)
     {
-        double head = line.Head(at.Surface, at.Gas, delivered);
+        double head = line.Head(surface, gas, delivered);
         if (!now.Plant.Gas.LosesVacuum)
             return head;
-        double liquid = at.Surface - line.OutletLevel(delivered);
+        double liquid = surface - line.OutletLevel(delivered);
         return Math.Abs(liquid) > Math.Abs(head) ? liquid : head;
     }
 
@@ -292,7 +298,7 @@ internal sealed partial class DrainModel : IEventSet
             if (now.Modes[i] is { IsFilling: true, IsAtWork: true })
                 return 1 + run.SettledWithin; // a column on its way does not rest
             if (now.Modes[i].IsAtWork)
-                largest = Math.Max(largest, Math.Abs(RestHead(now.Plant.Lines[i], at, y[i])) - now.Plant.Lines[i].Hydraulics.YieldHead);
+                largest = Math.Max(largest, Math.Abs(RestHead(now.Plant.Lines[i], at.Surface, at.Gas, y[i])) - now.Plant.Lines[i].Hydraulics.YieldHead);
         }
 
         return largest;

@@ -6,10 +6,10 @@ namespace DrainSim.Draining;
 internal sealed partial class DrainModel
 {
     /// <summary>
-    /// Whether the gas breathes: a wide vent wears a pressure off within microseconds, and under a narrow one the liquid
-    /// follows the gas as fast; either while the level takes hours.
+    /// Whether the gas is confined and more than one line moves it: a wide vent wears a pressure off within microseconds, and under a narrow
+    /// one, or none, the vacuum holds the liquid and the flow follows what comes in as fast; either while the level takes hours.
     /// </summary>
-    public bool IsStiff => now.Plant.Gas.Breathes;
+    public bool IsStiff => hasPressure && now.Plant.Gas.IsConfined;
 
     /// <inheritdoc/>
     /// <remarks>The row behind those of the lines is that of the pressure, which answers to the flows through the growth of the gas.</remarks>

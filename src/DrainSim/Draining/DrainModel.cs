@@ -6,11 +6,11 @@ namespace DrainSim.Draining;
 /// <summary>The balance of a tank, its lines, their receivers and its gas, as the integrator steps it.</summary>
 /// <remarks>
 /// State: y[i] is the volume that line i has taken out of the tank, m³, so that its slope is the line's flow, the volume in
-/// the tank is V = V₀ + ∫inflow − Σy[i] and that in a receiver Vr₀ + y[i]: the balance closes by construction. Where gas
-/// comes and goes its pressure, Pa, follows: not its mass, of which the pressure that drives the vent would be a
-/// difference of near equals, kept by a balance of stiff terms at every trial state. Then comes the flow, m³/s, of each line
-/// whose front has yet to reach the outlet, because there the inertia of the column counts. What is watched on the way and
-/// the slopes for implicit steps stand in the other parts of the class.
+/// the tank is V = V₀ + ∫inflow − Σy[i] and that in a receiver Vr₀ + y[i]: the balance closes by construction. Where a
+/// confined gas has more than one line to answer to, its pressure, Pa, follows: not its mass, of which the pressure that drives
+/// the vent would be a difference of near equals, kept by a balance of stiff terms at every trial state. Then comes the flow,
+/// m³/s, of each line whose front has yet to reach the outlet, because there the inertia of the column counts. What is watched
+/// on the way and the slopes for implicit steps stand in the other parts of the class.
 /// </remarks>
 internal sealed partial class DrainModel : IOdeSystem
 {
@@ -34,8 +34,9 @@ internal sealed partial class DrainModel : IOdeSystem
         (vessel, run, atmosphere) = (Job.Vessel, Job.Run, Job.Site.AtmosphericPressure);
         LineCount = plant.Lines.Length;
         StartVolume = vessel.Volume(Job.Level);
-        hasPressure = plant.Gas.Breathes || MayConfine(plant);
         lastActTime = Job.Timeline.Max(act => act.Time) ?? double.NegativeInfinity;
+        bool oneLineAlone = LineCount == 1 && Job.Inflow is null && Job.Timeline.Count == 0;
+        hasPressure = plant.Gas.Breathes || (!oneLineAlone && MayConfine(plant.Job));
         StartMass = plant.Gas.StartMass;
         guesses = new double[LineCount];
         (flowAt, flowScales) = (new int[LineCount], new double[LineCount]);
@@ -73,9 +74,9 @@ internal sealed partial class DrainModel : IOdeSystem
     /// <inheritdoc/>
     public int Dimension { get; }
 
-    /// <summary>Whether gas of a plant with acts may be shut in, so that its pressure is a state throughout.</summary>
-    private static bool MayConfine(Plant plant) =>
-        plant.Job.Timeline.Count > 0 && plant.Job.Timeline.Select(act => act.After).Append(plant.Job).Any(job => job.Headspace is Gas.ConfinedHeadspace);
+    /// <summary>Whether gas is shut in at some time of a job.</summary>
+    private static bool MayConfine(Job job) =>
+        job.Timeline.Select(act => act.After).Append(job).Any(plant => plant.Headspace is Gas.ConfinedHeadspace);
 
     private double? TargetVolume => (run.StopAtLevel, run.StopAtVolume) switch
     {
@@ -224,7 +225,7 @@ internal sealed partial class DrainModel : IOdeSystem
         for (int i = 0; i < LineCount; i++)
         {
             CompiledLine line = now.Plant.Lines[i];
-            double toRest = vessel.Area(surface) * Math.Max(0, line.MovingHead(surface, gas, y[i]));
+            double toRest = vessel.Area(surface) * Math.Max(0, Math.Abs(RestHead(line, surface, gas, y[i])) - line.Hydraulics.YieldHead);
             double toAir = Math.Max(0, volume - line.UncoverVolume);
             scale[i] = Math.Max(1e-12 * vessel.Capacity, Math.Abs(dydt[i]) * t + Math.Min(toRest, toAir));
             if (flowAt[i] == 0)

@@ -47,7 +47,7 @@ internal static class RunWatch
             case WatchKind.RegimePasses:
                 double limit = line.RegimeLimit(line.Hydraulics.RegimeFlows[watch.Ordinal]);
                 return (RegimeCode(falls, limit >= FrictionFactor.TurbulentLimit), limit);
-            case WatchKind.MarginVanishes when line.HoldsAtVapour:
+            case WatchKind.MarginVanishes when line.HoldsAtVapour && !epoch.Modes[watch.Line].IsFilling:
                 return (falls ? EventCode.VapourLimitBegins : EventCode.VapourLimitEnds, 0);
             case WatchKind.BoreUncovers:
                 return falls ? (EventCode.BoreUncovered, 0) : null;

@@ -35,8 +35,8 @@ namespace DrainSim.Integration;
 /// <item>At a Stop the run ends. Restarts at the same instant are listed and not asked; of several stops, the one with
 /// the lowest index counts.</item>
 /// <item>Where an event that cuts a step has a kink, the step is repeated once to end a ten-thousandth beyond the event, and events are
-/// looked for anew: so little of the far side moves no event by more than its square. Where none is found now, the run
-/// goes on from there. What lies in the first thousandth of a step is left as it is.</item>
+/// looked for anew, in a solution that has hardly seen the far side. Where none is found now, the run goes on from there. What lies in
+/// the first thousandth of a step is left as it is.</item>
 /// <item>An event at the end of the run counts: a Stop makes it stopped, a Restart is still asked.</item>
 /// </list>
 /// </remarks>

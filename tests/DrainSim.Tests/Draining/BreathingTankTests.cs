@@ -112,7 +112,40 @@ public sealed class BreathingTankTests
         Assert.InRange(result.Counters.Steps, 1, 100);
     }
 
+    /// <summary>
+    /// A wide valve holds the vacuum between its set and its full-open pressure until the vent beside it is enough: a step over the kink where
+    /// it shuts would take its stiffness along, under which no error shows. The time was 2e-4 off.
+    /// </summary>
+    [Theory]
+    [InlineData(0.0136, 0.173, 249, 0.3)]
+    [InlineData(0.00631, 0.231, 3860, 0.1)]
+    [InlineData(0.00308, 0.298, 252, 0.5)]
+    [InlineData(0.01, 0.05, 100, 1)]
+    public void Where_a_valve_shuts_the_time_holds_under_a_tighter_tolerance(double vent, double valve, double set, double rise)
+    {
+        foreach (double level in new[] { 3, NearlyFull })
+        {
+            Job job = Vented(vent) with { Level = level };
+            job = job with
+            {
+                Headspace = new VentedHeadspace
+                {
+                    Openings =
+                    [
+                        new VentOrifice { Bore = vent, DischargeCoefficient = VentCoefficient },
+                        new VacuumBreak { Bore = valve, SetPressure = set, OpeningRise = rise * set },
+                    ],
+                },
+            };
+            DrainResult result = Jobs.Run(job);
+            DrainResult tight = Jobs.Run(job with { Run = job.Run with { Tolerance = 1e-3 * job.Run.Tolerance } });
+            Assert.InRange(result.Counters.Steps, 1, 250);
+            Assert.Equal(tight.StoppedAt, result.StoppedAt, 1e-6 * tight.StoppedAt);
+        }
+    }
+
     /// <summary>What events are located on: between its steps too a run is the one that a tighter tolerance gives.</summary>
+    /// <remarks>A step may be 1e-8 of the 8 m³ to come off, and 1e-8 of an atmosphere: some ten of either.</remarks>
     [Theory]
     [InlineData(0.002)]
     [InlineData(0.02)]
@@ -127,7 +160,7 @@ public sealed class BreathingTankTests
             double t = step.Start + (i % 4) / 4.0 * (step.End - step.Start);
             coarse.Evaluate(t, y);
             fine.Evaluate(t, exact);
-            Assert.Equal(exact[0], y[0], 1e-7);
+            Assert.Equal(exact[0], y[0], 1e-6);
             Assert.Equal(exact[1], y[1], 1e-2);
         }
 

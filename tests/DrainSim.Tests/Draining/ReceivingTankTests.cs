@@ -78,7 +78,7 @@ public sealed class ReceivingTankTests
         double level = 3 - depth * Sink / Source;
         double covered = 2 * Source / Jobs.OrificeFactor() * (Math.Sqrt(3) - Math.Sqrt(level));
         DrainEvent covers = Assert.Single(result.Events, e => e.Code == EventCode.OutletCovered);
-        Assert.Equal(covered, covers.Time, 1e-6 * result.StoppedAt);
+        Assert.Equal(covered, covers.Time, 1e-9 * result.StoppedAt);
         double time = covered + (Math.Sqrt(level) - Math.Sqrt(1e-3)) / Rate;
         Assert.Equal(time, result.StoppedAt, 1e-6 * time);
     }
@@ -97,7 +97,7 @@ public sealed class ReceivingTankTests
         double time = 2 * Source / Jobs.OrificeFactor() * (Math.Sqrt(3) - Math.Sqrt(level));
         Assert.Equal(Outcome.ReceiverFull, result.Outcome);
         Assert.Equal(full, result.ReceiverLevel!.Value, 1e-9);
-        Assert.Equal(time, result.StoppedAt, 1e-6 * time);
+        Assert.Equal(time, result.StoppedAt, 1e-9 * time);
     }
 
     [Fact]

@@ -1,4 +1,6 @@
+using CsCheck;
 using DrainSim.Draining;
+using DrainSim.Gas;
 using DrainSim.Lines;
 using DrainSim.Liquids;
 using MathNet.Numerics;
@@ -182,6 +184,78 @@ public sealed class StartUpTests
         Assert.Null(result.Lines[1].RanFullAt);
         Assert.Equal(result.InitialVolume, result.LeftVolume + result.Lines.Sum(line => line.DeliveredVolume), 1e-9 * result.InitialVolume);
     }
+
+    [Fact]
+    public void A_column_waits_behind_a_shut_valve_and_starts_when_it_opens()
+    {
+        Job open = WithValve(1), shut = WithValve(0) with { Timeline = [new Act { Time = 60, After = open, Text = "the valve is opened" }] };
+        DrainResult result = Jobs.Run(shut), free = Jobs.Run(open);
+        Assert.Equal(60 + free.Lines[0].RanFullAt!.Value, result.Lines[0].RanFullAt!.Value, 1e-6);
+        Assert.Equal(free.InitialVolume, result.Trace.At(59).Volume);
+        Assert.Equal(60 + free.StoppedAt, result.StoppedAt, 1e-6 * free.StoppedAt);
+
+        static Job WithValve(double opening)
+        {
+            Job job = Siphon(1.0);
+            Line line = job.Line with { Path = [.. job.Line.Path, new Valve { Kind = ValveTable.Find("ball")!, Opening = opening }] };
+            return job with { DrawOffs = [job.DrawOffs[0] with { Line = line }] };
+        }
+    }
+
+    [Fact]
+    public void A_valve_shut_on_the_way_holds_the_column_where_it_is()
+    {
+        Job job = Siphon(2.0), shut = job with
+        {
+            DrawOffs = [job.DrawOffs[0] with { Line = job.Line with { Path = [.. job.Line.Path, new Valve { Kind = ValveTable.Find("ball")!, Opening = 0 }] } }],
+        };
+        Act close = new() { Time = 1.5, After = shut, Text = "shut" }, open = new() { Time = 100, After = job, Text = "opened" };
+        DrainResult result = Jobs.Run(job with { Timeline = [close, open] });
+        Assert.Equal(result.Trace.At(1.5).Volume, result.Trace.At(100).Volume, 1e-12);
+        Assert.True(result.Lines[0].RanFullAt > 100);
+        Assert.Equal(Outcome.InletUncovered, result.Outcome);
+    }
+
+    [Theory]
+    [InlineData(0.02)] // the gas keeps its mass
+    [InlineData(0.1)] // the gas follows at once
+    public void A_line_starts_under_a_vent_too(double vent)
+    {
+        Job job = Siphon(1.0) with { Headspace = new VentedHeadspace { Openings = [new VentOrifice { Bore = vent }] } };
+        DrainResult result = Jobs.Run(job);
+        Assert.Equal(1, result.Lines[0].RanFullAt!.Value / Jobs.Run(Siphon(1.0)).Lines[0].RanFullAt!.Value, 0.02);
+        Assert.Equal(result.InitialVolume, result.DrainedVolume + result.LeftVolume, 1e-9 * result.InitialVolume);
+    }
+
+    [Theory]
+    [InlineData(AtVapour.Break)]
+    [InlineData(AtVapour.Limit)]
+    public void A_column_that_reaches_its_limit_on_the_way_parts(AtVapour at)
+    {
+        Job job = Siphon(1.0) with { Liquid = Jobs.Water with { VapourPressure = 85e3 } };
+        job = job with { DrawOffs = [job.DrawOffs[0] with { Line = job.Line with { AtVapour = at } }] };
+        DrainResult result = Jobs.Run(job);
+        Assert.Equal(Outcome.VapourBreak, result.Outcome);
+        Assert.Null(result.Lines[0].RanFullAt);
+        Assert.Equal(EventCode.VapourBreak, Assert.Single(result.Events).Code);
+        double leg = Math.PI / 4 * 0.032 * 0.032 * 7 * (2.75 - 1.0) / 4.55;
+        Assert.Equal(leg + result.DrainedVolume, result.FallBack!.OutOfOutlet, 1e-9);
+    }
+
+    [Fact]
+    public void A_lower_front_never_runs_full_later() => Gen.Select(Gen.Double[-1.7, 2.1], Gen.Double[0, 1], Gen.Double[-9, 0]).Sample((front, lower, logViscosity) =>
+    {
+        Liquid liquid = Jobs.Water with { Viscosity = Math.Exp(logViscosity) };
+        double? high = Run(front), low = Run(Math.Max(-1.75, front - lower));
+        Assert.True(low <= high * (1 + 1e-6), $"{low} {high}");
+
+        double? Run(double z)
+        {
+            DrainResult result = Simulation.Run(Siphon(z) with { Liquid = liquid, Run = new RunSettings { Until = 1e9 } }, CancellationToken.None);
+            Assert.Equal(result.InitialVolume, result.DrainedVolume + result.LeftVolume, 1e-9 * result.InitialVolume);
+            return result.Lines[0].RanFullAt;
+        }
+    }, iter: 60);
 
     private static (Outcome, NoStart?) Result(Job job) => Jobs.Run(job) is var result ? (result.Outcome, result.NoStart) : default;
 

@@ -20,6 +20,31 @@ public sealed class KinkTests
         Assert.True(Kinked.Declared().Solve(3).Result.Counters.DerivativeEvaluations
             < new Kinked().Solve(3).Result.Counters.DerivativeEvaluations);
 
+    /// <summary>The derivative is that of the far side beyond the place, whatever the restart does: the step is repeated up to it.</summary>
+    [Theory]
+    [InlineData(EventAction.Restart)]
+    [InlineData(EventAction.Stop)]
+    public void An_event_with_a_kink_is_placed_a_hundred_times_better(EventAction action)
+    {
+        Kinked plain = new Kinked().When((_, y, _) => y[0] - 1, action, EventDirection.Falling);
+        Kinked repeated = new();
+        repeated.Add((_, y, _) => y[0] - 1, new EventRule(EventDirection.Falling, action, IsKink: true));
+        double off = Math.Abs(plain.Solve(3, tolerance: 1e-4, firstStep: 2).Result.Events[0].Time - Kinked.KinkTime);
+        IntegrationResult result = repeated.Solve(3, tolerance: 1e-4, firstStep: 2).Result;
+        Assert.InRange(Math.Abs(Assert.Single(result.Events).Time - Kinked.KinkTime), 0, 0.01 * off);
+    }
+
+    [Fact]
+    public void A_step_repeated_for_a_kink_lists_each_event_once()
+    {
+        Kinked problem = new Kinked().When((_, y, _) => y[0] - 1.5, EventAction.Record);
+        problem.Add((_, y, _) => y[0] - 1, new EventRule(EventDirection.Either, EventAction.Restart, IsKink: true));
+        IntegrationResult result = problem.Solve(3, firstStep: 2).Result;
+        Assert.Equal([0, 1], result.Events.Select(e => e.Index));
+        Assert.Equal(problem.Exact(3)[0], result.EndState[0], 1e-7);
+        Assert.InRange(result.Counters.RejectedSteps, 1, 20);
+    }
+
     [Fact]
     public void An_undeclared_kink_is_coped_with_by_error_control()
     {
