@@ -25,8 +25,7 @@ public static class ForecastWording
         string planned = result.Before.Outcome == result.Run.Outcome
             ? $" As the scenario stood it would have been {report.Moment(result.Before.StoppedAt)}."
             : $" As the scenario stood: {Verdict.Headline(result.Before.Outcome)}, {report.Moment(result.Before.StoppedAt)}.";
-        string found = string.Concat(result.Alternatives.Where(one => one.IsFound).OrderBy(one => one.PValue).Take(1)
-            .Select(one => $" But the readings speak of {Name(one)}: look for it."));
+        string found = Best(result) is { } best ? $" But the readings speak of {Name(best)}: look for it." : "";
         return $"{Headline(result.Run.Outcome)} {report.Moment(finish.Best)}{band}.{planned}{found}";
     }
 
@@ -77,9 +76,17 @@ public static class ForecastWording
             + (alternative.FlowError is { } error ? $" ± {MeasureFormat.Number(unit.From(error))}" : "") + " " + unit.Sign;
         string test = string.Create(CultureInfo.InvariantCulture, $"F-test {alternative.PValue:0.000}")
             + (alternative.CriterionGain is { } gain ? string.Create(CultureInfo.InvariantCulture, $", AICc {(gain > 0 ? "better" : "worse")} by {Math.Abs(gain):0.0}") : "");
-        return alternative.IsFound
-            ? $"LOOK FOR {name.ToUpperInvariant()}: {flow} explains the readings better ({test}); the finish would then be {report.Moment(finish)}."
-            : $"No reason to look for {name}: it would not explain the readings better ({test}).";
+        return !alternative.IsFound ? $"No reason to look for {name}: it would not explain the readings better ({test})."
+            : alternative == Best(report.Result)
+                ? $"LOOK FOR {name.ToUpperInvariant()}: {flow} explains the readings better ({test}); the finish would then be {report.Moment(finish)}."
+                : $"{char.ToUpperInvariant(name[0])}{name[1..]} of {flow} would explain them too ({test}), with the finish {report.Moment(finish)}.";
+    }
+
+    /// <summary>The alternative that is found and explains the readings best; null where none is.</summary>
+    public static Alternative? Best(ForecastResult result)
+    {
+        ArgumentNullException.ThrowIfNull(result);
+        return result.Alternatives.Where(one => one.IsFound).MaxBy(one => one.CriterionGain);
     }
 
     private static string Name(Alternative alternative) => alternative.Kind == AlternativeKind.Leak ? "a leak" : "a steady inflow";
