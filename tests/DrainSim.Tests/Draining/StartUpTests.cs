@@ -209,7 +209,7 @@ public sealed class StartUpTests
         {
             DrawOffs = [job.DrawOffs[0] with { Line = job.Line with { Path = [.. job.Line.Path, new Valve { Kind = ValveTable.Find("ball")!, Opening = 0 }] } }],
         };
-        Act close = new() { Time = 1.5, After = shut, Text = "shut" }, open = new() { Time = 100, After = job, Text = "opened" };
+        Act close = new() { Time = 1.5, After = shut, Text = "shut" }, open = new() { Time = 100, Before = shut, After = job, Text = "opened" };
         DrainResult result = Jobs.Run(job with { Timeline = [close, open] });
         Assert.Equal(result.Trace.At(1.5).Volume, result.Trace.At(100).Volume, 1e-12);
         Assert.True(result.Lines[0].RanFullAt > 100);
