@@ -148,7 +148,7 @@ public static class LinePicture
     {
         if (along.Worst.Time > 0)
         {
-            notes.AddAlong(xs, start, PageText.Note(Palette.Liquid), $"{quantity} at the start");
+            notes.AddAlong(xs, start, PageText.Note(Palette.Liquid), $"{quantity} {along.StartName}");
             notes.AddAlong(xs, worst, PageText.Note(Palette.Pressure), $"{quantity} at the worst moment");
         }
         else

@@ -16,7 +16,9 @@ internal sealed class LinePressures
     {
         this.result = result;
         index = WorstLine(result);
-        Start = result.Trace.At(0);
+        double? full = result.Lines.ElementAtOrDefault(index)?.RanFullAt;
+        Start = result.Trace.At(full is { } time ? Math.Min(Math.BitIncrement(time), result.Trace.End) : 0);
+        StartName = full is null ? "at the start" : "once full";
         Worst = result.Trace.At(Math.Clamp(result.LeastMargin.Time, 0, result.Trace.End));
         job = result.JobAt(Worst.Time);
         line = Compiled(job);
@@ -25,8 +27,11 @@ internal sealed class LinePressures
         CrestIndex = line.CrestIndex;
     }
 
-    /// <summary>The first moment.</summary>
+    /// <summary>The first moment at which the line is full.</summary>
     public Instant Start { get; }
+
+    /// <summary>That moment in words.</summary>
+    public string StartName { get; }
 
     /// <summary>The moment of the least margin.</summary>
     public Instant Worst { get; }

@@ -125,7 +125,7 @@ public sealed class LineHydraulics
         if (stress is not null)
         {
             double used = stress.Used(NodeCount - 1, flow / parallel, out double usedRise);
-            slope = flow > 0 ? usedRise / flow : double.PositiveInfinity;
+            slope = flow > 0 ? usedRise / flow : stress.SlopeAtRest;
             return used;
         }
         if (flow == 0)

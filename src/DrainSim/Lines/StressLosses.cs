@@ -34,6 +34,7 @@ internal sealed class StressLosses
     /// <param name="density">its density, kg/m³</param>
     public StressLosses(LineCompiler line, FlowCurve curve, double density)
     {
+        SlopeAtRest = curve is { YieldStress: 0, FlowIndex: > 1 } ? 0 : double.PositiveInfinity;
         LineNode[] nodes = line.Nodes;
         double[] bores = [.. nodes.Select(node => node.Bore).Distinct()];
         Bores = Array.ConvertAll(bores, bore => new BoreStress(curve, density, bore));
@@ -78,6 +79,9 @@ internal sealed class StressLosses
 
     /// <summary>Flows of one line at which a run or the outlet passes a regime limit, rising, m³/s.</summary>
     public double[] RegimeFlows { get; }
+
+    /// <summary>dH/dq at the point of moving, s/m²: infinite but for a liquid that thickens under shear from no stress on.</summary>
+    public double SlopeAtRest { get; }
 
     /// <summary>Number of nodes.</summary>
     public int Count => Steps.Length;
