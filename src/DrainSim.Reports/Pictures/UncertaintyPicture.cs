@@ -102,7 +102,11 @@ public static class UncertaintyPicture
             sheet.Text(UncertaintyWording.Volume(report.Result.LeftVolume[k], report.Format), Edge + 352, y, Plain);
         }
 
-        sheet.Text("P95: 95 of 100 cases stay below. ±: what another seed may change, 95 %.", Edge, y + 2, Quiet);
+        foreach (string line in Sheet.Wrap("P95: 95 of 100 cases stay below. ±: what another seed may change, 95 %.", Quiet, 600, 2))
+        {
+            sheet.Text(line, Edge, y, Quiet);
+            y += Quiet.LineHeight;
+        }
         return y;
     }
 

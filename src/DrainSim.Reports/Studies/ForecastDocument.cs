@@ -82,6 +82,6 @@ public static class ForecastDocument
         json.Number("flow_error_m3_s", alternative.FlowError);
         json.Number("f_test_p", alternative.PValue);
         json.Number("aicc_gain", alternative.CriterionGain);
-        json.Number("finish_s", alternative.Run?.StoppedAt);
+        json.Number("finish_s", alternative.FinishedAt);
     }
 }

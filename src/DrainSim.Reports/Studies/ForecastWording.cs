@@ -25,7 +25,8 @@ public static class ForecastWording
         string planned = result.Before.Outcome == result.Run.Outcome
             ? $" As the scenario stood it would have been {report.Moment(result.Before.StoppedAt)}."
             : $" As the scenario stood: {Verdict.Headline(result.Before.Outcome)}, {report.Moment(result.Before.StoppedAt)}.";
-        return $"{Headline(result.Run.Outcome)} {report.Moment(finish.Best)}{band}.{planned}";
+        string found = Best(result) is { } best ? $" But the readings speak of {Name(best)}: look for it." : "";
+        return $"{Headline(result.Run.Outcome)} {report.Moment(finish.Best)}{band}.{planned}{found}";
     }
 
     /// <summary>What an estimate says: value, interval, and what the scenario had.</summary>
@@ -67,18 +68,28 @@ public static class ForecastWording
     {
         ArgumentNullException.ThrowIfNull(alternative);
         ArgumentNullException.ThrowIfNull(report);
-        string name = alternative.Kind == AlternativeKind.Leak ? "a leak" : "a steady inflow";
-        if (alternative.Run is not { } run)
+        string name = Name(alternative);
+        if (alternative.FinishedAt is not { } finish)
             return $"No sign of {name}: the readings want none.";
         Measures.Unit unit = report.Format.FlowUnit(alternative.Flow);
         string flow = MeasureFormat.Number(unit.From(alternative.Flow))
             + (alternative.FlowError is { } error ? $" ± {MeasureFormat.Number(unit.From(error))}" : "") + " " + unit.Sign;
         string test = string.Create(CultureInfo.InvariantCulture, $"F-test {alternative.PValue:0.000}")
             + (alternative.CriterionGain is { } gain ? string.Create(CultureInfo.InvariantCulture, $", AICc {(gain > 0 ? "better" : "worse")} by {Math.Abs(gain):0.0}") : "");
-        return alternative.IsFound
-            ? $"LOOK FOR {name.ToUpperInvariant()}: {flow} explains the readings better ({test}); the finish would then be {report.Moment(run.StoppedAt)}."
-            : $"No reason to look for {name}: it would not explain the readings better ({test}).";
+        return !alternative.IsFound ? $"No reason to look for {name}: it would not explain the readings better ({test})."
+            : alternative == Best(report.Result)
+                ? $"LOOK FOR {name.ToUpperInvariant()}: {flow} explains the readings better ({test}); the finish would then be {report.Moment(finish)}."
+                : $"{char.ToUpperInvariant(name[0])}{name[1..]} of {flow} would explain them too ({test}), with the finish {report.Moment(finish)}.";
     }
+
+    /// <summary>The alternative that is found and explains the readings best; null where none is.</summary>
+    public static Alternative? Best(ForecastResult result)
+    {
+        ArgumentNullException.ThrowIfNull(result);
+        return result.Alternatives.Where(one => one.IsFound).MaxBy(one => one.CriterionGain);
+    }
+
+    private static string Name(Alternative alternative) => alternative.Kind == AlternativeKind.Leak ? "a leak" : "a steady inflow";
 
     private static string Headline(Outcome outcome) => outcome switch
     {

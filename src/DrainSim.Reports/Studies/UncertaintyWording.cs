@@ -36,7 +36,7 @@ public static class UncertaintyWording
 
     /// <summary>A chance in percent with its interval.</summary>
     public static string Chance(Chance chance) => string.Create(CultureInfo.InvariantCulture,
-        $"{100 * chance.Share:0.#} % ({100 * chance.Low:0.#} to {100 * chance.High:0.#} %)");
+        $"{100 * chance.Share:0.##} % ({100 * chance.Low:0.#} to {100 * chance.High:0.#} %)");
 
     /// <summary>'P5'.</summary>
     public static string Name(Percentile percentile) => string.Create(CultureInfo.InvariantCulture, $"P{100 * percentile.Share:0.#}");
@@ -54,7 +54,8 @@ public static class UncertaintyWording
         string headline = Verdict.Headline(first.Outcome);
         if (result.Outcomes.Count == 1)
             return $"{headline} in every one of {first.Chance.Of} runs.";
-        return string.Join("; ", result.Outcomes.Take(3).Select(one =>
-            string.Create(CultureInfo.InvariantCulture, $"{Verdict.Headline(one.Outcome)} in {100 * one.Chance.Share:0.#} %"))) + ".";
+        string all = string.Join("; ", result.Outcomes.Take(3).Select(one =>
+            string.Create(CultureInfo.InvariantCulture, $"{Verdict.Headline(one.Outcome).ToLowerInvariant()} in {100 * one.Chance.Share:0.##} %")));
+        return char.ToUpperInvariant(all[0]) + all[1..] + ".";
     }
 }

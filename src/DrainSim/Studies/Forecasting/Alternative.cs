@@ -29,6 +29,11 @@ public sealed record Alternative
     /// <summary>The run with it; null where the readings want none.</summary>
     public DrainResult? Run { get; init; }
 
+    /// <summary>When the job's own lines are done with it, s; a leak may run on. Null where the readings want none.</summary>
+    public double? FinishedAt => Run is null ? null
+        : Kind == AlternativeKind.Leak ? Run.Lines.SkipLast(1).Max(line => line.StoppedAt)
+        : Run.StoppedAt;
+
     /// <summary>Whether both tests find it.</summary>
     public bool IsFound => Flow > 0 && PValue < Significance && CriterionGain > 0;
 }

@@ -62,8 +62,7 @@ public sealed record ForecastStudy
                 covariance is null ? double.PositiveInfinity : Math.Sqrt(covariance[j, j]) * scales[j], left))],
             Correlation = CorrelationOf(covariance),
             ConditionIndex = fit.ConditionIndex,
-            Separation = !fit.IsBounded || fit.ConditionIndex > 100 ? Separation.NotApart
-                : fit.ConditionIndex > 30 ? Separation.Hardly : Separation.Apart,
+            Separation = SeparationOf(fit),
             Residuals = [.. Readings.Select(reading => new ReadingResidual(reading, LevelModel.LevelAt(run, reading.Time)))],
             DegreesOfFreedom = left,
             Scatter = scatter,
@@ -75,6 +74,11 @@ public sealed record ForecastStudy
             Alternatives = AlternativeSearch.Find(this, fit, scales, run, cancellation),
         };
     }
+
+    private static Separation SeparationOf(LevelFit fit) =>
+        !fit.IsBounded || fit.ConditionIndex > 100 ? Separation.NotApart
+        : fit.ConditionIndex > 30 ? Separation.Hardly
+        : Separation.Apart;
 
     private static Estimate EstimateOf(FittedParameter parameter, double value, double error, int left)
     {
@@ -91,7 +95,7 @@ public sealed record ForecastStudy
     private (FinishBand Finish, LevelFan? Band, int Refused) Band(
         LevelModel model, LevelFit fit, DrainResult best, double widening, CancellationToken cancellation)
     {
-        if (!fit.IsBounded)
+        if (SeparationOf(fit) == Separation.NotApart)
             return (new FinishBand(best.StoppedAt, null, null), null, 0);
         var plan = new SamplePlan(SamplingMethod.Sobol, Parameters.Count + 1, Draws, Seed);
         List<LevelTrack> tracks = [];
