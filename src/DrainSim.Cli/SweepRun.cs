@@ -42,7 +42,7 @@ internal sealed class SweepRun(SweepCases cases, Shard shard, string path)
     }
 
     /// <summary>What a thread keeps for itself.</summary>
-    private sealed class Worker(SweepCases cases)
+    private sealed class Worker(SweepCases cases) : IDisposable
     {
         private readonly CaseReader reader = cases.Scenario.NewReader();
         private readonly SweepTable table = new();
@@ -56,5 +56,7 @@ internal sealed class SweepRun(SweepCases cases, Shard shard, string path)
                 cells[i] = values[i].IsNumber ? new ParameterCell(values[i].Si, null) : new ParameterCell(double.NaN, values[i].Text);
             return table.Row(number + 1, cells, reader.Run(values, cancellation));
         }
+
+        public void Dispose() => table.Dispose();
     }
 }

@@ -83,7 +83,7 @@ internal static class SweepRuns
     }
 
     /// <summary>What a thread keeps for itself.</summary>
-    private sealed class Worker(SweepCases cases)
+    private sealed class Worker(SweepCases cases) : IDisposable
     {
         public SweepCases Cases => cases;
 
@@ -92,5 +92,7 @@ internal static class SweepRuns
         public SweepTable Table { get; } = new();
 
         public ParameterValue[] Values { get; } = new ParameterValue[1];
+
+        public void Dispose() => Table.Dispose();
     }
 }

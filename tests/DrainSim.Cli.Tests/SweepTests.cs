@@ -129,6 +129,29 @@ public sealed class SweepTests
     }
 
     [Fact]
+    public void The_file_of_the_cases_is_not_overwritten()
+    {
+        using TestFolder folder = Siphon();
+        folder.Write(Table, "tank.level\n1 m\n");
+        Finished refused = DrainSimProcess.Run(folder, "sweep", "siphon.yaml", "--cases", Table);
+        Assert.Equal(2, refused.ExitCode);
+        Assert.Contains("would be overwritten", refused.Error, StringComparison.Ordinal);
+        Assert.Equal("tank.level\n1 m\n", folder.Read(Table));
+    }
+
+    [Fact]
+    public void Rows_of_a_table_are_run_in_their_order()
+    {
+        using TestFolder folder = Siphon();
+        folder.Write("cases.csv", "tank.level,line.bore (mm)\n1 m,38\n1.2 m,25\n");
+        Assert.Equal(0, DrainSimProcess.Run(folder, "sweep", "siphon.yaml", "--cases", "cases.csv").ExitCode);
+        string[] rows = folder.Read(Table).Split('\n');
+        Assert.StartsWith("case,tank.level_m,line.bore_m,outcome,", rows[0], StringComparison.Ordinal);
+        Assert.StartsWith("1,1,0.038,inlet_uncovered,", rows[1], StringComparison.Ordinal);
+        Assert.StartsWith("2,1.2,0.025,inlet_uncovered,", rows[2], StringComparison.Ordinal);
+    }
+
+    [Fact]
     public void A_piped_sweep_shows_no_bar()
     {
         using TestFolder folder = Siphon();

@@ -72,6 +72,12 @@ internal sealed class SweepCommand : ExplainedCommand
         Shard part = parsed.GetValue(shard) ?? Shard.Whole;
         string folder = parsed.GetRequiredValue(study.Folder);
         string path = Path.Combine(folder, $"{cases.Scenario.Base.Name}.sweep{part.Suffix}.csv");
+        if (cases.Scenario.InputFiles.Append(cases.TableFile).Contains(Path.GetFullPath(path)))
+        {
+            await error.WriteLineAsync($"drainsim sweep: '{path}' is read and would be overwritten; name another folder with --out. Nothing was run and nothing was written.");
+            return ExitCode.Refused;
+        }
+
         var run = new SweepRun(cases, part, path);
         try
         {

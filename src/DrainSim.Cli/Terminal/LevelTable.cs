@@ -38,7 +38,7 @@ internal static class LevelTable
             string left = Measure(now.Volume, volume, VolumeDecimals(result.InitialVolume, volume));
             double gone = result.InitialVolume > 0 ? 1 - now.Volume / result.InitialVolume : 0;
             string share = Math.Max(0, 100 * gone).ToString("0", CultureInfo.InvariantCulture) + " %";
-            string shown = clock is null ? "" : $"{(result.StoppedAt < 600 ? clock.OfDay(time, result.StoppedAt) : clock.Short(time)),-14}";
+            string shown = clock is null ? "" : $"{(result.StoppedAt < 600 ? clock.OfDay(time, result.StoppedAt) : clock.DayAndTime(time)),-14}";
             yield return $"  {shown}{MeasureFormat.Duration(time),-12}{level,11}{left,14}{share,9}";
         }
     }

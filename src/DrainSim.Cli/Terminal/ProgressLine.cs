@@ -11,6 +11,9 @@ internal sealed class ProgressLine : IDisposable
     private const int Cells = 30;
     private const long Every = 200;
 
+    /// <summary>A rate is worth something from here on, ms.</summary>
+    private const long FirstRate = 1000;
+
     private readonly TextWriter? terminal;
     private readonly long total;
     private readonly long before;
@@ -38,7 +41,7 @@ internal sealed class ProgressLine : IDisposable
         isShown = true;
         double rate = (done - before) / watch.Elapsed.TotalSeconds;
         int full = (int)(Cells * done / Math.Max(1, total));
-        string left = rate > 0 ? MeasureFormat.Duration((total - done) / rate) : "?";
+        string left = rate > 0 && shownAt >= FirstRate ? MeasureFormat.Duration((total - done) / rate) : "…";
         terminal.Write(string.Create(CultureInfo.InvariantCulture,
             $"\r[{new string('#', full)}{new string('.', Cells - full)}] {done} of {total}, {rate:0} runs/s, {left} left   "));
         terminal.Flush();

@@ -42,7 +42,7 @@ internal static class UncertaintyBlock
             Percentile time = report.Result.DrainTime[k];
             List<string> cells = [UncertaintyWording.Name(time), UncertaintyWording.Time(time), UncertaintyWording.Volume(report.Result.LeftVolume[k], format)];
             if (report.Clock is { } clock)
-                cells.Add(double.IsFinite(time.Value) ? clock.Short(time.Value) : "");
+                cells.Add(double.IsFinite(time.Value) ? clock.DayAndTime(time.Value) : "");
             table.Add([.. cells]);
         }
 

@@ -23,7 +23,7 @@ public sealed class Clock(DateTimeOffset begins)
 
     /// <summary>Date and time without the year: '4 May 10:42'.</summary>
     /// <param name="time">s since the start</param>
-    public string Short(double time) => ToMinute(time).ToString("d MMM HH:mm", CultureInfo.InvariantCulture);
+    public string DayAndTime(double time) => ToMinute(time).ToString("d MMM HH:mm", CultureInfo.InvariantCulture);
 
     /// <summary>The time of the day, to the second where the job is short: '10:42'.</summary>
     /// <param name="time">s since the start</param>

@@ -206,7 +206,7 @@ internal sealed class LevelPanel(
     {
         string elapsed = MeasureFormat.Duration(time);
         return report.Clock is { } clock
-            ? $"{elapsed}, at {(axis.End < 86400 ? clock.OfDay(time, axis.End) : clock.Short(time))}"
+            ? $"{elapsed}, at {(axis.End < 86400 ? clock.OfDay(time, axis.End) : clock.DayAndTime(time))}"
             : elapsed;
     }
 

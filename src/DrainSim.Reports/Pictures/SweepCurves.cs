@@ -50,12 +50,12 @@ internal sealed class SweepCurves
         MarkStretches(panel, frame);
         Notes notes = DrawCurve(panel, times, unit, Palette.Liquid);
         PageText.RowTitle(sheet, frame, $"Drain time, {unit.Sign}");
-        MarkValues(panel, notes, times, unit);
-        NameStretches(panel, notes);
         if (report.TargetTime is { } target)
         {
             notes.Reference(unit.From(target), $"asked for: {MeasureFormat.Duration(target)}", PageText.Note(Palette.Limit), isAbove: true, width: 2.5f);
         }
+        MarkValues(panel, notes, times, unit);
+        NameStretches(panel, notes);
         NameExtremes(panel, notes, times, unit, Palette.Liquid, MeasureFormat.Duration);
     }
 

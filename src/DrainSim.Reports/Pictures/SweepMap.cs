@@ -11,6 +11,9 @@ internal sealed class SweepMap
     private const int MostToldAcross = 9;
     private const int MostToldUp = 10;
 
+    /// <summary>Values up to which each has its tick.</summary>
+    private const int MostTicks = 10;
+
     private readonly Sheet sheet;
     private readonly SweepReport report;
     private readonly MeasureFormat format;
@@ -109,7 +112,7 @@ internal sealed class SweepMap
     private static AxisTicks Ticks(SweepAxis axis, double[] places, double[] edges, int count) => axis.Words.Count > 0
         ? AxisTicks.Words(axis.Words)
         : axis.IsLogarithmic ? AxisTicks.Logarithmic(edges[0], edges[^1])
-        : places.Length <= count ? AxisTicks.At(places)
+        : places.Length <= MostTicks ? AxisTicks.At(places)
         : AxisTicks.Decimal(edges[0], edges[^1], count);
 
     private static double[] Edges(double[] places)

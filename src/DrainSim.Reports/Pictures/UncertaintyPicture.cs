@@ -69,7 +69,7 @@ public static class UncertaintyPicture
         }
         foreach ((Percentile percentile, string name) in marks)
         {
-            string when = report.Clock?.Short(percentile.Value) ?? MeasureFormat.Duration(percentile.Value);
+            string when = report.Clock?.DayAndTime(percentile.Value) ?? MeasureFormat.Duration(percentile.Value);
             notes.Add(new SKPoint(X(percentile), frame.Top + 0.3f * frame.Height), PageText.Note(Palette.Ink), 500, true, name, when);
         }
 

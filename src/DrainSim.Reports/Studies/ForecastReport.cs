@@ -29,7 +29,7 @@ public sealed record ForecastReport
     /// <summary>A moment for people: the clock where it is known, else the time since the start.</summary>
     /// <param name="time">s since the start</param>
     public string Moment(double time) => Clock is null ? MeasureFormat.Duration(time) + " after the start"
-        : HasDate ? Clock.Short(time)
+        : HasDate ? Clock.DayAndTime(time)
         : Clock.OfDay(time, double.PositiveInfinity) + (Clock.At(time).Date - Clock.Begins.Date).Days switch
         {
             0 => "",

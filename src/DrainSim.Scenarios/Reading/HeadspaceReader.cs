@@ -1,6 +1,5 @@
 using DrainSim.Gas;
 using DrainSim.Scenarios.Units;
-using DrainSim.Scenarios.Yaml;
 
 namespace DrainSim.Scenarios.Reading;
 

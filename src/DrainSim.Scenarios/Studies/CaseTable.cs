@@ -37,6 +37,9 @@ internal sealed class CaseTable
     /// <summary>Dotted paths of the columns.</summary>
     public IReadOnlyList<string> Paths => paths;
 
+    /// <summary>Full path of the file.</summary>
+    public string FullPath { get; private init; } = "";
+
     /// <summary>Number of rows.</summary>
     public int Count { get; private set; }
 
@@ -46,7 +49,7 @@ internal sealed class CaseTable
     /// <param name="problems">takes what is wrong</param>
     public static CaseTable? Read(string file, string name, List<Problem> problems)
     {
-        var table = new CaseTable(Quote.Plain(name), problems);
+        var table = new CaseTable(Quote.Plain(name), problems) { FullPath = SafePath(file) };
         if (WholeText.TryRead(file, LargestFile, out string text, out string fault))
             table.ReadRows(text);
         else
@@ -84,6 +87,9 @@ internal sealed class CaseTable
     /// <param name="row">from 0</param>
     /// <param name="column">index of the parameter</param>
     public ParameterValue At(int row, int column) => values[row * paths.Count + column];
+
+    /// <summary>The full path; the name as it is where it is none.</summary>
+    private static string SafePath(string file) => file.Length == 0 || file.Contains('\0', StringComparison.Ordinal) ? file : Path.GetFullPath(file);
 
     private void ReadRows(string text)
     {

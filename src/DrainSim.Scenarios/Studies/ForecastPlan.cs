@@ -40,9 +40,11 @@ public static class ForecastPlan
             return null;
         if (sheet.Readings.Count <= parameters.Length)
         {
-            string few = $"{sheet.Readings.Count} readings cannot tell {parameters.Length} parameters and their errors";
-            string help = $"Give {parameters.Length + 1} readings at least, better three times as many, or fit fewer";
-            problems.Add(new Problem(0, 0, "", few, help) { File = Quote.Plain(request.Readings ?? block.Readings!) });
+            problems.Add(new Problem(0, 0, "", $"{sheet.Readings.Count} readings cannot tell {parameters.Length} parameters and their errors",
+                $"Give {parameters.Length + 1} readings at least, better three times as many, or fit fewer")
+            {
+                File = Quote.Plain(request.Readings ?? block.Readings!),
+            });
             return null;
         }
 

@@ -19,6 +19,9 @@ public sealed class SweepCases
     /// <summary>Number of cases.</summary>
     public long Count { get; }
 
+    /// <summary>Full path of the file whose rows the cases are; null for a grid.</summary>
+    public string? TableFile => table?.FullPath;
+
     /// <summary>Whether the cases are a grid over the parameters, and not rows of a table.</summary>
     public bool IsGrid => table is null;
 

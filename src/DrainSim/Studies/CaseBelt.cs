@@ -50,9 +50,11 @@ internal sealed class CaseBelt<TWorker, TResult>
     /// <summary>Takes block after block until none is left; the work of one thread.</summary>
     public void Work()
     {
+        IDisposable? owned = null;
         try
         {
             TWorker own = worker();
+            owned = own as IDisposable;
             while (Interlocked.Increment(ref taken) - 1 is var number && number < BlockCount && AwaitPlace(number) is { } block)
             {
                 Fill(block, own, number);
@@ -64,6 +66,10 @@ internal sealed class CaseBelt<TWorker, TResult>
 #pragma warning restore CA1031
         {
             fault ??= ExceptionDispatchInfo.Capture(e);
+        }
+        finally
+        {
+            owned?.Dispose();
         }
     }
 

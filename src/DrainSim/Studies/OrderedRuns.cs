@@ -41,7 +41,7 @@ public sealed record OrderedRuns
     /// <typeparam name="TResult">what is kept of a case</typeparam>
     /// <param name="first">number of the first case</param>
     /// <param name="end">number behind the last case</param>
-    /// <param name="worker">makes what a thread keeps for itself; called once by each thread</param>
+    /// <param name="worker">makes what a thread keeps for itself; called once by each thread, which disposes of it where it can be</param>
     /// <param name="run">runs a case; called by all threads at once, each with what is its own</param>
     /// <param name="take">takes the results, in the order of their numbers, one at a time, on any of the threads</param>
     /// <param name="cancellation">ends the study early, after the cases at work</param>

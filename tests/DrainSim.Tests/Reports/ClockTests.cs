@@ -15,7 +15,7 @@ public sealed class ClockTests
     {
         Assert.Equal("Sun 4 May 2031 06:43", Morning.Moment(0)); // to the nearest minute
         Assert.Equal("Mon 5 May 2031 06:42", Morning.Moment(86400 - 31));
-        Assert.Equal("4 May 07:43", Morning.Short(3600));
+        Assert.Equal("4 May 07:43", Morning.DayAndTime(3600));
         Assert.Equal("06:42:31", Morning.OfDay(1, 300));
         Assert.Equal("UTC+02:00", Morning.Zone);
         Assert.Equal("2031-05-04T06:42:30+02:00", Morning.Iso(0));

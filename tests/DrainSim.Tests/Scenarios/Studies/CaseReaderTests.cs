@@ -25,7 +25,7 @@ public sealed class CaseReaderTests
             if (VariedScenario.Find(document, [(path, [])], problems) is not { } varied || varied.Parameters[0].Base is not { } number || path.StartsWith("run.", StringComparison.Ordinal))
                 continue;
             CaseReader reader = varied.NewReader();
-            Factor.Sample(factor => AssertSame(document, path, varied.Parameters[0].Of(number * factor), reader), iter: 6, threads: 1);
+            Factor.Sample(factor => AssertSame(document, path, varied.Parameters[0].Of(number * factor), reader), iter: 3, threads: 1);
         }
     }
 
