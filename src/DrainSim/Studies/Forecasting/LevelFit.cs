@@ -51,17 +51,27 @@ internal sealed class LevelFit
         if (model.Predict(start) is not { } first)
             return null;
         double far = 1e3 * (first.Concat(model.Observed).Max(Math.Abs) + 1);
+        (double[] best, double least) = (start, model.Misfit(first));
         IObjectiveModel objective = ObjectiveFunction.NonlinearModel(
-            (Vector<double> p, Vector<double> x) => Vector<double>.Build.Dense(
-                model.Predict(p.AsArray() ?? p.ToArray()) ?? [.. Enumerable.Repeat(far, first.Length)]),
-            (Vector<double> p, Vector<double> x) => Matrix<double>.Build.DenseOfArray(model.Jacobian(p.AsArray() ?? p.ToArray())),
+            (Vector<double> p, Vector<double> x) => Predict(p.ToArray()),
+            (Vector<double> p, Vector<double> x) => Matrix<double>.Build.DenseOfArray(model.Jacobian(p.ToArray())),
             Vector<double>.Build.Dense(first.Length, i => i), Vector<double>.Build.Dense(model.Observed));
         var minimizer = new LevenbergMarquardtMinimizer(
             gradientTolerance: 1e-12, stepTolerance: 1e-9, functionTolerance: 1e-12, maximumIterations: MostSteps);
         NonlinearMinimizationResult result = minimizer.FindMinimum(objective, Vector<double>.Build.Dense((double[])start.Clone()));
-        double[] best = result.MinimizingPoint.ToArray();
-        return new LevelFit(model, best, model.Misfit(best),
+        return new LevelFit(model, best, least,
             result.ReasonForExit is not (ExitCondition.InvalidValues or ExitCondition.ExceedIterations));
+
+        // The minimizer ends at the point that it looked at last, which is not always the best.
+        Vector<double> Predict(double[] scaled)
+        {
+            if (model.Predict(scaled) is not { } predicted)
+                return Vector<double>.Build.Dense(first.Length, far);
+            double misfit = model.Misfit(predicted);
+            if (misfit < least)
+                (best, least) = (scaled, misfit);
+            return Vector<double>.Build.Dense(predicted);
+        }
     }
 
     /// <summary>Covariance of the scaled parameters where the readings have standard uncertainty 1.</summary>

@@ -39,11 +39,10 @@ internal sealed class LevelModel(
     public double[]? Predict(ReadOnlySpan<double> scaled) =>
         Run(scaled) is { } run ? [.. readings.Select(reading => LevelAt(run, reading.Time) / reading.Uncertainty)] : null;
 
-    /// <summary>Sum of the squared standardised residuals; infinite when the parameters make no job.</summary>
-    public double Misfit(ReadOnlySpan<double> scaled)
+    /// <summary>Sum of the squared standardised residuals.</summary>
+    /// <param name="predicted">what the model says of each reading</param>
+    public double Misfit(double[] predicted)
     {
-        if (Predict(scaled) is not { } predicted)
-            return double.PositiveInfinity;
         double sum = 0;
         for (int i = 0; i < predicted.Length; i++)
             sum += (Observed[i] - predicted[i]) * (Observed[i] - predicted[i]);

@@ -125,6 +125,20 @@ public sealed class ForecastPlanTests : IDisposable
         Assert.DoesNotContain(forecast.Alternatives, one => one.IsFound);
     }
 
+    /// <summary>Bore, loss and roughness act alike; the search ends far out, beside values that make no job.</summary>
+    [Fact]
+    public void Too_many_parameters_are_not_told_apart_and_the_best_fit_is_still_a_job()
+    {
+        List<Problem> problems = [];
+        string path = Path.Combine(House.Repository.Root, "scenarios", "pond-crews-dips.yaml");
+        var request = new ForecastRequest { Fit = ["line.bore", "line.path.strainer.loss", "line.roughness", "tank.level"] };
+        ForecastResult forecast = ForecastPlan.Read(ScenarioDocument.Load(path), request, problems)!.Study.Run(TestContext.Current.CancellationToken);
+        Assert.Equal(Separation.NotApart, forecast.Separation);
+        Assert.Null(forecast.Band);
+        Assert.Equal((null, null), (forecast.Finish.Low, forecast.Finish.High));
+        Assert.InRange(forecast.Scatter, 0, 2);
+    }
+
     private ForecastCase? Read(string text, out List<Problem> problems, string? begins = null, ForecastRequest? request = null)
     {
         problems = [];
