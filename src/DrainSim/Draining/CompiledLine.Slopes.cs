@@ -6,7 +6,7 @@ internal sealed partial class CompiledLine
     /// <summary>Change of level by which the slope of a flow held at the threshold is measured, m: the flow is smooth over it.</summary>
     private const double SlopeProbe = 1e-6;
 
-    /// <summary>The slopes of <see cref="Flow"/>.</summary>
+    /// <summary>The slopes of <see cref="Flow(in LineConditions)"/>.</summary>
     /// <param name="state">as there</param>
     /// <param name="flow">the flow at that state, m³/s</param>
     public LineSlopes Slopes(in LineConditions state, double flow)

@@ -152,13 +152,31 @@ internal sealed partial class CompiledLine
 
     /// <summary>Flow out of the tank, m³/s; negative when a submerged line runs backwards.</summary>
     /// <param name="state">level, gas pressure, delivered volume and whether the flow is held at the threshold</param>
-    /// <param name="guess">a flow nearby, m³/s; 0 when none is known</param>
-    public double Flow(in LineConditions state, double guess)
+    public double Flow(in LineConditions state)
+    {
+        KnownFlow known = default;
+        return Flow(state, ref known);
+    }
+
+    /// <summary>Flow out of the tank, m³/s; negative when a submerged line runs backwards.</summary>
+    /// <param name="state">level, gas pressure, delivered volume and whether the flow is held at the threshold</param>
+    /// <param name="known">the flow that was found last; becomes this one, where there is one</param>
+    public double Flow(in LineConditions state, ref KnownFlow known)
     {
         double head = Head(state.Surface, state.Gas, state.Delivered);
         if (head <= 0)
-            return head < 0 && IsSubmerged(state.Delivered) ? -Hydraulics.Flow(-head, Math.Abs(guess)) : 0;
-        double free = Hydraulics.Flow(head, Math.Max(0, guess));
+        {
+            if (head == 0 || !IsSubmerged(state.Delivered))
+                return 0;
+            double back = Hydraulics.Flow(-head, Math.Abs(known.Flow));
+            if (back > 0)
+                known = new KnownFlow(-back);
+            return -back;
+        }
+
+        double free = Hydraulics.Flow(head, Math.Max(0, known.Near(head)), out double slope);
+        if (free > 0)
+            known = new KnownFlow(free, head, slope);
         if (state.IsLimited)
             return Hydraulics.FlowKeepingLowPoint(Threshold, state.Surface, state.Gas, free);
         return tail is null

@@ -19,7 +19,7 @@ internal sealed partial class DrainModel : IOdeSystem
     private readonly double atmosphere;
     private readonly bool hasPressure;
     private readonly Watch[] watches;
-    private readonly double[] guesses;
+    private readonly KnownFlow[] known;
     private readonly int[] flowAt; // component that holds the flow of a line that fills; 0 where none does
     private readonly double[] flowScales;
     private readonly List<Epoch> epochs;
@@ -38,7 +38,7 @@ internal sealed partial class DrainModel : IOdeSystem
         bool oneLineAlone = LineCount == 1 && Job.Inflow is null && Job.Timeline.Count == 0;
         hasPressure = plant.Gas.Breathes || (!oneLineAlone && MayConfine(plant.Job));
         StartMass = plant.Gas.StartMass;
-        guesses = new double[LineCount];
+        known = new KnownFlow[LineCount];
         (flowAt, flowScales) = (new int[LineCount], new double[LineCount]);
         int dimension = LineCount + (hasPressure ? 1 : 0);
         for (int i = 0; i < LineCount; i++)
@@ -129,7 +129,7 @@ internal sealed partial class DrainModel : IOdeSystem
     private static double StartFlow(Plant plant, int line)
     {
         double gas = plant.Gas.Pressure(plant.Vessel.Volume(plant.Job.Level), plant.Gas.StartMass);
-        return Math.Max(LeastFlowScale, plant.Lines[line].Flow(new LineConditions(plant.Job.Level, gas, 0, false), 0));
+        return Math.Max(LeastFlowScale, plant.Lines[line].Flow(new LineConditions(plant.Job.Level, gas, 0, false)));
     }
 
     private const double LeastFlowScale = 1e-15;
@@ -137,10 +137,7 @@ internal sealed partial class DrainModel : IOdeSystem
     private double Solve(Epoch epoch, int line, double surface, double gas, double delivered, bool limited)
     {
         FlowSolutions++;
-        double flow = epoch.Plant.Lines[line].Flow(new LineConditions(surface, gas, delivered, limited), guesses[line]);
-        if (flow != 0)
-            guesses[line] = flow;
-        return flow;
+        return epoch.Plant.Lines[line].Flow(new LineConditions(surface, gas, delivered, limited), ref known[line]);
     }
 
     /// <summary>The state of the job at a time, the flows solved anew.</summary>

@@ -135,7 +135,7 @@ internal static class RunWatch
 
         double Excess(double level) => first.Plant.Lines
             .Where(line => level > line.UncoverLevel)
-            .Sum(line => line.Flow(new LineConditions(level, gas, 0, false), 0)) / wanted - 1;
+            .Sum(line => line.Flow(new LineConditions(level, gas, 0, false))) / wanted - 1;
     }
 
     /// <summary>What makes the result less sure.</summary>
@@ -184,7 +184,7 @@ internal static class RunWatch
         Plant plant = model.Epochs[0].Plant;
         double level = plant.Lines.Min(line => line.UncoverLevel);
         return plant.Lines.Where(line => line.UncoverLevel <= level)
-            .Sum(line => line.Flow(new LineConditions(level, model.Job.Site.AtmosphericPressure, 0, false), 0));
+            .Sum(line => line.Flow(new LineConditions(level, model.Job.Site.AtmosphericPressure, 0, false)));
     }
 
     private static EventCode RegimeCode(bool falls, bool atTurbulent) => (falls, atTurbulent) switch

@@ -77,7 +77,7 @@ public static class Simulation
                 return new LineMode(false, Outcome.AirBreak);
             if (line.Filling is not null)
                 return new LineMode(false, Segment: 0);
-            double flow = line.Flow(new LineConditions(level, gas, 0, false), guess: 0);
+            double flow = line.Flow(new LineConditions(level, gas, 0, false));
             if (line.Margin(flow, level, gas) > 0)
                 return new LineMode(false);
             return line.HoldsAtVapour ? new LineMode(true) : new LineMode(false, Outcome.VapourBreak);
