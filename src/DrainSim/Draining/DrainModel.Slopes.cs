@@ -24,7 +24,7 @@ internal sealed partial class DrainModel
         for (int i = 0; i < LineCount; i++)
         {
             growth += dydt[i];
-            if (!now.Modes[i].IsAtWork)
+            if (!now.Modes[i].Flows)
                 continue;
             Span<double> row = byState.Slice(i * Dimension, Dimension);
             if (now.Modes[i].IsFilling)

@@ -23,7 +23,7 @@ internal sealed partial class DrainModel : IOdeSystem
     private readonly int[] flowAt; // component that holds the flow of a line that fills; 0 where none does
     private readonly double[] flowScales;
     private readonly List<Epoch> epochs;
-    private readonly double lastActTime;
+    private int timeActsLeft;
     private Epoch now;
 
     /// <param name="plant">the plant at the start</param>
@@ -34,7 +34,7 @@ internal sealed partial class DrainModel : IOdeSystem
         (vessel, run, atmosphere) = (Job.Vessel, Job.Run, Job.Site.AtmosphericPressure);
         LineCount = plant.Lines.Length;
         StartVolume = vessel.Volume(Job.Level);
-        lastActTime = Job.Timeline.Max(act => act.Time) ?? double.NegativeInfinity;
+        timeActsLeft = Job.Timeline.Count(act => act.Time is not null && !act.IsDueAtStart(Job.Level));
         bool oneLineAlone = LineCount == 1 && Job.Inflow is null && Job.Timeline.Count == 0;
         hasPressure = plant.Gas.Breathes || (!oneLineAlone && MayConfine(plant.Job));
         StartMass = plant.Gas.StartMass;
@@ -119,7 +119,7 @@ internal sealed partial class DrainModel : IOdeSystem
 
     /// <summary>Flow of a line out of the tank, solved for, m³/s; 0 for a line that no longer works.</summary>
     public double Flow(Epoch epoch, int line, double surface, double gas, double delivered, bool limited) =>
-        epoch.Modes[line].IsAtWork ? Solve(epoch, line, surface, gas, delivered, limited) : 0;
+        epoch.Modes[line].Flows ? Solve(epoch, line, surface, gas, delivered, limited) : 0;
 
     /// <summary>Flow of a line out of the tank, m³/s: a component of the state while the line fills, else solved for.</summary>
     private double Flow(Epoch epoch, int line, double surface, double gas, ReadOnlySpan<double> y) =>

@@ -49,6 +49,9 @@ internal sealed class Epoch
         return new Epoch(from, Plant, modes, InflowVolume(from));
     }
 
+    /// <summary>The next epoch, with all lines working in other ways.</summary>
+    public Epoch With(double from, LineMode[] modes) => new(from, Plant, modes, InflowVolume(from));
+
     /// <summary>The next epoch, with another plant.</summary>
     public Epoch With(double from, Plant plant) => new(from, plant, Modes, InflowVolume(from));
 }
