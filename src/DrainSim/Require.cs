@@ -28,7 +28,9 @@ public static class Require
             : throw Refused(value, quantity, unit,
                 string.Create(CultureInfo.InvariantCulture, $"from {least} to {most}"));
 
-    private static ArgumentOutOfRangeException Refused(double value, string quantity, string unit, string rule) =>
-        new(null, string.Create(CultureInfo.InvariantCulture,
-            $"{quantity} must be {rule} {unit}, got {value} {unit}").Replace("  ", " ", StringComparison.Ordinal));
+    private static ArgumentOutOfRangeException Refused(double value, string quantity, string unit, string rule)
+    {
+        string behind = unit.Length > 0 ? " " + unit : "";
+        return new(null, string.Create(CultureInfo.InvariantCulture, $"{quantity} must be {rule}{behind}, got {value}{behind}"));
+    }
 }

@@ -138,7 +138,8 @@ internal static class VerdictBlock
     private static string Prime(PrimeReport prime, MeasureFormat format) =>
         $"{format.Volume(prime.LineVolume)} fills the line; it runs by itself once the front in the outer leg stands "
         + $"below {format.Length(prime.FrontElevation)}; static lift {format.Length(prime.StaticLift)} of at most "
-        + $"{format.Length(prime.LiftLimit)}, suction {format.Pressure(prime.Suction)}";
+        + $"{format.Length(prime.LiftLimit)}, suction {format.Pressure(prime.Suction)}"
+            + (prime.DipFills is { } fills ? $"; by hand {MeasureFormat.Number(fills)} × dipped and capped" : "");
 
     private static string When(double time) =>
         time <= 0 ? " at the start" : $" after {MeasureFormat.Duration(time)}";
