@@ -1,4 +1,5 @@
 using DrainSim.Cli.Terminal;
+using DrainSim.Reports.Measures;
 
 namespace DrainSim.Cli.Tests;
 
@@ -23,6 +24,16 @@ public sealed class TerminalTests
         double step = times[1];
         Assert.All(Enumerable.Range(0, times.Length - 1), i => Assert.Equal(i * step, times[i], tolerance: 1e-9 * end));
         Assert.True(times[^1] - times[^2] > 0.09 * step, "the last even step stands on the end");
+    }
+
+    [Fact]
+    public void Where_the_job_has_a_clock_the_crew_dips_at_its_even_steps()
+    {
+        Clock clock = new(new DateTimeOffset(2031, 5, 4, 6, 42, 0, TimeSpan.FromHours(2)));
+        double[] times = [.. LevelTable.ClockTimes(3 * 3600 + 600, clock)];
+        Assert.Equal((0, 3 * 3600 + 600), (times[0], times[^1]));
+        Assert.All(times[1..^1], time => Assert.Equal(0, clock.At(time).Minute % 30 + clock.At(time).Second));
+        Assert.Equal("07:00", clock.OfDay(times[1], 7200));
     }
 
     [Fact]
