@@ -23,7 +23,7 @@ internal sealed class ShapesCommand() : TableCommand("shapes", "Shows the shapes
         table.Add("shape", "stack", "sections", "Shapes on top of each other, from the bottom up");
         table.Add("shape", "table", "file", "A strapping table as CSV: level against volume");
         table.Add("end", "flat", "", "A flat bottom, top or head");
-        table.Add("end", "cone", "height or angle", "A cone");
+        table.Add("end", "cone", "depth or angle", "A cone");
         table.Add("end", "hemisphere", "", "Half a ball");
         table.Add("end", "ellipsoidal", "depth", "A dished end, 2:1 unless its depth is given");
         table.Add("end", "torispherical", "crown_radius, knuckle_radius", "A dished end of a crown and a knuckle");

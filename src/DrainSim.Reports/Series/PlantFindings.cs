@@ -18,7 +18,7 @@ internal static class PlantFindings
             json.WriteString("limit", LimitWording.Code(check.Kind));
             json.WriteBoolean("kept", check.IsKept);
             json.WriteNumber("bound", check.Bound);
-            json.WriteNumber("worst", check.Worst.Value);
+            Number(json, "worst", double.IsFinite(check.Worst.Value) ? check.Worst.Value : null);
             json.WriteNumber("time_s", check.Worst.Time);
             json.WriteString("text", LimitWording.Text(check, format));
             json.WriteEndObject();

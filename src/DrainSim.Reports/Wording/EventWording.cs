@@ -94,6 +94,7 @@ public static class EventWording
         return remedy.Kind switch
         {
             RemedyKind.LowerOutlet => $"Lowering the outlet by {change} (to {value}) {proof}",
+            RemedyKind.LowerReceiver => $"Lowering the outlet and the receiver with it by {change} (the outlet to {value}) {proof}",
             RemedyKind.LowerCrest => $"Lowering the crest by {change} (to {value}) {proof}",
             RemedyKind.LowerInlet => $"Lowering the inlet by {change} (to {value}) {proof}",
             RemedyKind.WidenVent =>

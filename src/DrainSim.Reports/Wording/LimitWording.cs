@@ -31,7 +31,8 @@ public static class LimitWording
         bool isTime = check.Kind is LimitKind.DrainTimeAtLeast or LimitKind.DrainTimeAtMost;
         string when = isTime || check.Kind == LimitKind.LeftVolume ? ""
             : check.Worst.Time > 0 ? $" after {MeasureFormat.Duration(check.Worst.Time)}" : " at the start";
-        return $"{Name(check.Kind)} {bound}: {kept}, {worst}{when}.";
+        string found = double.IsFinite(check.Worst.Value) ? worst + when : "it is not done";
+        return $"{Name(check.Kind)} {bound}: {kept}, {found}.";
     }
 
     /// <summary>A bound in words, without its full stop.</summary>

@@ -77,6 +77,7 @@ public static class ReportCodes
     public static string Of(RemedyKind kind) => kind switch
     {
         RemedyKind.LowerOutlet => "lower_outlet",
+        RemedyKind.LowerReceiver => "lower_receiver",
         RemedyKind.LowerCrest => "lower_crest",
         RemedyKind.ThrottleOutlet => "throttle_outlet",
         RemedyKind.LowerInlet => "lower_inlet",

@@ -49,6 +49,7 @@ public static class Verdict
             Outcome.YieldHeld => $"{stops}: at {level} the liquid's yield stress holds it{YieldHead(result, format)}.",
             Outcome.Balanced => $"Never empties: after {time} as much runs in as out, at {level}, with {left} in the tank.",
             Outcome.ReceiverFull => $"{stops}: at {level} the receiver is full to its brim.",
+            Outcome.Overflowed when result.DrainedVolume < 0 => $"Overflows after {time}: the receiver runs back into it.",
             Outcome.Overflowed => $"Overflows after {time}: more runs in than the line carries.",
             Outcome.Levelled => $"{stops}: at {level} it stands level with {FarEnd(result.Job, result.ReceiverLevel)}.",
             Outcome.TargetReached => Target(result, format, time),

@@ -83,7 +83,7 @@ internal static class ParameterPath
     private static Node? Set(Node node, ReadOnlySpan<string> steps, string text)
     {
         if (steps.Length == 0)
-            return node is TextNode ? new TextNode(text, false, Position.Outside) : null;
+            return node is TextNode or ListNode ? new TextNode(text, false, Position.Outside) : null;
         return node switch
         {
             BlockNode block => InBlock(block, steps, text),

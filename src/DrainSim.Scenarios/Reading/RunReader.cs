@@ -21,7 +21,7 @@ internal static class RunReader
         block.AtMostOne("Give the one at which the job is done", "stop_at_level", "stop_at_volume");
         double? level = block.Amount("stop_at_level", Quantities.Length, Allowed.NotNegative);
         double? volume = block.Amount("stop_at_volume", Quantities.Volume, Allowed.NotNegative);
-        double settled = block.AmountOr("settled_within", Quantities.Length, Allowed.NotNegative, Usual.SettledWithin, "1 mm");
+        double settled = block.AmountOr("settled_within", Quantities.Length, Allowed.Positive, Usual.SettledWithin, "1 mm");
         double? every = block.Amount("report_every", Quantities.Time, Allowed.Positive);
         double tolerance = block.AmountOr("tolerance", Quantities.Ratio, Allowed.Within(1e-13, 1e-2, "from 1e-13 to 0.01"),
             Usual.Tolerance, Usual.Tolerance.ToString("0e0", CultureInfo.InvariantCulture));

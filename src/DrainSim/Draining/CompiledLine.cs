@@ -166,7 +166,7 @@ internal sealed partial class CompiledLine
         double head = Head(state.Surface, state.Gas, state.Delivered);
         if (head <= 0)
         {
-            if (head == 0 || !IsSubmerged(state.Delivered))
+            if (head == 0 || !IsSubmerged(state.Delivered) || receiverStart + Arrived(state.Delivered) <= 0 && receiver is not null)
                 return 0;
             double back = Hydraulics.Flow(-head, Math.Abs(known.Flow));
             if (back > 0)

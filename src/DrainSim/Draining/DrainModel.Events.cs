@@ -11,6 +11,7 @@ internal sealed partial class DrainModel : IEventSet
         Watch watch = watches[index];
         EventAction action = watch.Kind switch
         {
+            WatchKind.FlowsBalance when timeActsLeft > 0 => EventAction.Ignore,
             WatchKind.TargetReached or WatchKind.TankBrims or WatchKind.FlowsBalance => EventAction.Stop,
             WatchKind.VacuumRatingPasses or WatchKind.PressureRatingPasses => EventAction.Record,
             WatchKind.SectionPasses or WatchKind.ActFalls or WatchKind.InflowTurns or WatchKind.ValveMoves => EventAction.Restart,
@@ -158,7 +159,7 @@ internal sealed partial class DrainModel : IEventSet
     }
 
     private bool HoldsHeel(int line) =>
-        now.Plant.Lines[line].Hydraulics.InletElevation > Math.Max(run.SettledWithin, 0);
+        now.Plant.Lines[line] is var own && (own.HasTail ? own.Hydraulics.InletElevation : own.UncoverLevel) > Math.Max(run.SettledWithin, 0);
 
     /// <summary>Whether nothing but the one line at work moves the surfaces.</summary>
     private bool IsAlone => now.LinesAtWork == 1 && now.Plant.Job.Inflow is null;
@@ -167,7 +168,8 @@ internal sealed partial class DrainModel : IEventSet
     private bool EndsAtRest(int line)
     {
         CompiledLine compiled = now.Plant.Lines[line];
-        return (IsAlone && timeActsLeft == 0) || (compiled.DrawOff.Receiver is null && compiled.Hydraulics.RisesAboveInlet);
+        return (IsAlone && timeActsLeft == 0) || (compiled.DrawOff.Receiver is null && compiled.Hydraulics.RisesAboveInlet
+            && compiled.Hydraulics.CrestElevation > compiled.Hydraulics.OutletElevation);
     }
 
     private void EndAllAtRest(double t, ReadOnlySpan<double> y)

@@ -16,7 +16,7 @@ internal sealed partial class DrainModel
     public void Jacobian(double t, ReadOnlySpan<double> y, ReadOnlySpan<double> dydt, Span<double> byState, Span<double> byTime)
     {
         double volume = Volume(now, t, y), surface = vessel.Level(volume), gas = GasPressure(now, volume, y);
-        double rise = 1 / vessel.Area(surface), inflow = now.Inflow(t), growth = -inflow;
+        double rise = 1 / AreaForSlopes(surface), inflow = now.Inflow(t), growth = -inflow;
         byState.Clear();
         byTime.Clear();
         Span<double> pressure = byState.Slice(LineCount * Dimension, Dimension);
@@ -55,6 +55,11 @@ internal sealed partial class DrainModel
         pressure[LineCount] += rate.ByPressure;
         byTime[LineCount] = rate.ByGrowth * byTime[LineCount] - rate.ByVolume * inflow;
     }
+
+    /// <summary>Area of the surface, m²; never less than a small share of the mean: in the point of a top the level has no slope.</summary>
+    private double AreaForSlopes(double surface) => Math.Max(vessel.Area(surface), LeastArea * vessel.Capacity / vessel.Height);
+
+    private const double LeastArea = 1e-4;
 
     /// <summary>
     /// Fills the row of a filling line's acceleration and gives its slope by the level: it is linear in the level and in the gas, and smooth in its own flow and

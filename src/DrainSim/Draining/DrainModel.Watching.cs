@@ -42,7 +42,7 @@ internal sealed partial class DrainModel
                 : 1,
             WatchKind.FrontStops => now.Modes[watch.Line].IsFilling && !line.Hydraulics.IsShut ? flow / flowScales[watch.Line] : 1,
             WatchKind.LiftExhausts => line.Margin(0, at.Surface, at.Gas) / line.SpecificWeight - run.SettledWithin,
-            WatchKind.HeadSettles => Unsettled(RestHead(line, at.Surface, at.Gas, delivered), line.Hydraulics.YieldHead),
+            WatchKind.HeadSettles => Unsettled(HeadToRest(line, at, delivered), line.Hydraulics.YieldHead),
             WatchKind.AllSettle => IsFed(at.Time) ? 1 : LargestHead(at, y) - run.SettledWithin,
             WatchKind.BoreUncovers => BoreCover(line.InletLimit(at.Surface), flow),
             WatchKind.OutletCovers => line.ReceiverSurface(delivered) - line.Hydraulics.OutletElevation,
@@ -69,6 +69,13 @@ internal sealed partial class DrainModel
             return head;
         double liquid = surface - line.OutletLevel(delivered);
         return Math.Abs(liquid) > Math.Abs(head) ? liquid : head;
+    }
+
+    /// <summary>The head to be used up; none where it would draw back over an outlet in the air, through which nothing comes.</summary>
+    private double HeadToRest(CompiledLine line, in Moment at, double delivered)
+    {
+        double head = RestHead(line, at.Surface, at.Gas, delivered);
+        return head < 0 && run.SettledWithin > 0 && !line.IsSubmerged(delivered) ? 0 : head;
     }
 
     /// <summary>Whether something still runs in, now or later.</summary>

@@ -224,7 +224,9 @@ internal sealed partial class DrainModel : IOdeSystem
             CompiledLine line = now.Plant.Lines[i];
             double toRest = vessel.Area(surface) * Math.Max(0, Math.Abs(RestHead(line, surface, gas, y[i])) - line.Hydraulics.YieldHead);
             double toAir = Math.Max(0, volume - line.UncoverVolume);
-            scale[i] = Math.Max(1e-12 * vessel.Capacity, Math.Abs(dydt[i]) * t + Math.Min(toRest, toAir));
+            scale[i] = now.Modes[i].Flows
+                ? Math.Max(1e-12 * vessel.Capacity, Math.Abs(dydt[i]) * t + Math.Min(toRest, toAir))
+                : vessel.Capacity; // what stands still has no error but rounding
             if (flowAt[i] == 0)
                 continue;
             scale[flowAt[i]] = flowScales[i];

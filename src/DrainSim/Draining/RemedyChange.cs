@@ -43,7 +43,7 @@ internal static class RemedyChange
     /// <returns>null where it cannot be changed so</returns>
     public static Job? Apply(Job job, RemedyKind kind, double change) => kind switch
     {
-        RemedyKind.LowerOutlet => WithLine(job, LineChanges.WithLowerOutlet(job.Line, change), change),
+        RemedyKind.LowerOutlet or RemedyKind.LowerReceiver => WithLine(job, LineChanges.WithLowerOutlet(job.Line, change), change),
         RemedyKind.LowerCrest => WithLine(job, LineChanges.WithLowerCrest(job.Line, change), 0),
         RemedyKind.LowerInlet => WithLine(job, LineChanges.WithLowerInlet(job.Line, change), 0),
         RemedyKind.ThrottleOutlet => WithLine(job, LineChanges.WithThrottle(job.Line, change), 0),
@@ -59,7 +59,7 @@ internal static class RemedyChange
         var hydraulics = new LineHydraulics(job.Line, job.Liquid, job.Site.Gravity);
         return kind switch
         {
-            RemedyKind.LowerOutlet => hydraulics.OutletElevation - change,
+            RemedyKind.LowerOutlet or RemedyKind.LowerReceiver => hydraulics.OutletElevation - change,
             RemedyKind.LowerCrest => hydraulics.CrestElevation - change,
             RemedyKind.LowerInlet => hydraulics.InletElevation - change,
             RemedyKind.LessInflow => (1 - change) * job.Inflow!.Points.Max(point => point.Flow),
@@ -108,22 +108,31 @@ internal static class RemedyChange
         ? job with { Inflow = share > 0 ? new Inflow { Points = [.. inflow.Points.Select(p => (p.Time, share * p.Flow))] } : null }
         : null;
 
-    private static Job WithBrim(Job job, double rise) => job with
+    private static Job? WithBrim(Job job, double rise)
     {
-        DrawOffs =
-        [
-            .. job.DrawOffs.Select(drawOff => drawOff.Receiver is ReceivingTank tank
-                ? drawOff with { Receiver = Higher(tank, tank.BrimDepth + rise) }
-                : drawOff),
-        ],
-    };
+        var drawOffs = new List<DrawOff>();
+        foreach (DrawOff drawOff in job.DrawOffs)
+        {
+            ReceivingTank? higher = drawOff.Receiver is ReceivingTank tank ? Higher(tank, tank.BrimDepth + rise) : null;
+            if (drawOff.Receiver is ReceivingTank && higher is null)
+                return null;
+            drawOffs.Add(higher is null ? drawOff : drawOff with { Receiver = higher });
+        }
 
-    /// <summary>The receiver with its walls as high as its new brim, carried on straight up where they end lower.</summary>
-    private static ReceivingTank Higher(ReceivingTank tank, double brim)
+        return job with { DrawOffs = drawOffs };
+    }
+
+    /// <summary>
+    /// The receiver with its walls as high as its new brim, carried on straight up where they end lower; null for one that closes
+    /// over itself, as a drum or a sphere does.
+    /// </summary>
+    private static ReceivingTank? Higher(ReceivingTank tank, double brim)
     {
         double missing = brim - tank.Vessel.Height;
         if (missing <= 0)
             return tank with { Brim = brim };
+        if (tank.Vessel.Area(tank.Vessel.Height) <= 0)
+            return null;
         double width = 2 * Math.Sqrt(tank.Vessel.Area(tank.Vessel.Height * (1 - 1e-9)) / Math.PI);
         Vessel collar = new VerticalCylinder { Diameter = Math.Max(width, 1e-3), ShellHeight = missing, Bottom = new Flat(), Top = new Flat() };
         return tank with { Brim = brim, Vessel = new Stack { Sections = [tank.Vessel, collar] } };

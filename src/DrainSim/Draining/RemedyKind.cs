@@ -6,6 +6,9 @@ public enum RemedyKind
     /// <summary>The outlet, and a receiving surface with it, lower.</summary>
     LowerOutlet,
 
+    /// <summary>The outlet and the receiving tank with it lower.</summary>
+    LowerReceiver,
+
     /// <summary>The crest lower.</summary>
     LowerCrest,
 

@@ -39,8 +39,9 @@ public static class RemedySearch
     {
         if (result.Outcome == Outcome.VacuumHeld || PassesRating(result))
             yield return RemedyKind.WidenVent;
+        bool hasTank = result.Job.DrawOffs[0].Receiver is ReceivingTank;
         foreach (RemedyKind kind in OfEnding(result.Outcome, result.NoStart))
-            yield return kind;
+            yield return kind == RemedyKind.LowerOutlet && hasTank ? RemedyKind.LowerReceiver : kind;
     }
 
     private static RemedyKind[] OfEnding(Outcome outcome, NoStart? noStart) => (outcome, noStart) switch

@@ -17,7 +17,9 @@ internal static class RunFindings
     /// <param name="trajectory">its course</param>
     public static DrainResult Of(DrainModel model, IntegrationResult integration, Trajectory trajectory)
     {
-        var history = new RunHistory(model, trajectory, integration.EndTime);
+        RunHistory history = trajectory.StepCount > 0
+            ? new RunHistory(model, trajectory, integration.EndTime)
+            : new RunHistory(model); // it ended before it moved
         return Assemble(model, OutcomeOf(model, integration), history, PassedEvents(model, integration), integration.Counters);
     }
 

@@ -163,7 +163,7 @@ internal sealed class RunSurvey
             LineHydraulics first = model.EpochAt(instant.Time).Plant.Lines[0].Hydraulics;
             inertia = Math.Max(inertia, first.InertiaTime(Math.Max(0, FlowOf(instant, 0)), instant.Head));
             double surface = instant.Flow / model.Job.Vessel.Area(instant.Level);
-            if (instant.Volume > LastDrops * model.StartVolume)
+            if (instant.Volume > LastDrops * model.StartVolume && double.IsFinite(surface))
                 velocity = Math.Max(velocity, surface * surface / (2 * model.Job.Site.Gravity * instant.Head));
         }
 

@@ -65,10 +65,11 @@ internal static class WatchList
         foreach (double pressure in job.Timeline.Select(act => act.After).Append(job).SelectMany(ValvePressures).Distinct())
             yield return new(WatchKind.ValveMoves, Value: pressure);
         Inflow[] inflows = [.. job.Timeline.Select(act => act.After).Prepend(job).Select(plant => plant.Inflow).OfType<Inflow>()];
+        if (inflows.Length > 0 || job.DrawOffs.Any(drawOff => drawOff.Receiver is not null))
+            yield return new(WatchKind.TankBrims, Value: job.Vessel.Capacity);
         if (inflows.Length > 0)
         {
             yield return new(WatchKind.FlowsBalance);
-            yield return new(WatchKind.TankBrims, Value: job.Vessel.Capacity);
             foreach (double time in inflows.SelectMany(inflow => inflow.Points).Select(p => p.Time).Where(time => time > 0).Distinct())
                 yield return new(WatchKind.InflowTurns, Value: time);
         }
