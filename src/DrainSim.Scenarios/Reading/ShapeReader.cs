@@ -7,17 +7,19 @@ namespace DrainSim.Scenarios.Reading;
 /// <summary>Reads the shape of a tank and its dimensions.</summary>
 internal static class ShapeReader
 {
-    private static readonly (string Word, Func<BlockReader, string, Vessel?> Read)[] Shapes =
+    private static readonly (string Word, ShapeOf Read)[] Shapes =
     [
-        ("vertical_cylinder", (block, _) => VerticalCylinder(block, "bottom")),
-        ("horizontal_cylinder", HorizontalCylinder),
-        ("sphere", Sphere),
-        ("box", Box),
-        ("cone", Cone),
-        ("basin", Basin),
-        ("stack", Stack),
-        ("table", StrappingFileReader.Read),
+        ("vertical_cylinder", (block, _, bottomHead) => VerticalCylinder(block, bottomHead)),
+        ("horizontal_cylinder", (block, _, _) => HorizontalCylinder(block)),
+        ("sphere", (block, _, _) => Sphere(block)),
+        ("box", (block, _, _) => Box(block)),
+        ("cone", (block, _, _) => Cone(block)),
+        ("basin", (block, _, _) => Basin(block)),
+        ("stack", (block, folder, _) => Stack(block, folder)),
+        ("table", (block, folder, _) => StrappingFileReader.Read(block, folder)),
     ];
+
+    private delegate Vessel? ShapeOf(BlockReader block, string folder, string bottomHead);
 
     /// <summary>The vessel; null when it is refused.</summary>
     /// <param name="block">the block that has the key <c>shape</c></param>
@@ -27,9 +29,9 @@ internal static class ShapeReader
     {
         if (!block.Has("shape"))
             block.Miss("is missing", $"The shapes are {string.Join(", ", Shapes.Select(shape => shape.Word))}", "shape");
-        Func<BlockReader, string, Vessel?>? read = block.Choice<Func<BlockReader, string, Vessel?>?>("shape", null, [.. Shapes]);
+        ShapeOf? read = block.Choice<ShapeOf?>("shape", null, [.. Shapes]);
         if (read is not null)
-            return read == Shapes[0].Read ? VerticalCylinder(block, bottomHead) : read(block, folder);
+            return read(block, folder, bottomHead);
         // Without the shape nobody knows which dimensions belong to it: they are not unknown keys.
         foreach (string dimension in Dimensions)
             block.Has(dimension);
@@ -53,7 +55,7 @@ internal static class ShapeReader
             : null;
     }
 
-    private static HorizontalCylinder? HorizontalCylinder(BlockReader block, string folder)
+    private static HorizontalCylinder? HorizontalCylinder(BlockReader block)
     {
         double? diameter = Dimension(block, "diameter");
         double? length = Dimension(block, "length");
@@ -63,10 +65,10 @@ internal static class ShapeReader
             : null;
     }
 
-    private static Sphere? Sphere(BlockReader block, string folder) =>
+    private static Sphere? Sphere(BlockReader block) =>
         Dimension(block, "diameter") is { } d ? block.Build(() => new Sphere { Diameter = d }) : null;
 
-    private static Box? Box(BlockReader block, string folder)
+    private static Box? Box(BlockReader block)
     {
         double? length = Dimension(block, "length");
         double? width = Dimension(block, "width");
@@ -76,7 +78,7 @@ internal static class ShapeReader
             : null;
     }
 
-    private static Cone? Cone(BlockReader block, string folder)
+    private static Cone? Cone(BlockReader block)
     {
         double? bottom = block.Needed("bottom_diameter", Quantities.Length, Allowed.NotNegative);
         double? top = block.Needed("top_diameter", Quantities.Length, Allowed.NotNegative);
@@ -86,7 +88,7 @@ internal static class ShapeReader
             : null;
     }
 
-    private static Basin? Basin(BlockReader block, string folder)
+    private static Basin? Basin(BlockReader block)
     {
         double? length = Dimension(block, "bottom_length");
         double? width = Dimension(block, "bottom_width");

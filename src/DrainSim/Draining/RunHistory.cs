@@ -65,9 +65,6 @@ internal sealed class RunHistory
     /// <summary>The volume in the tank at a time, m³.</summary>
     public double Volume(double t) => model.Volume(model.EpochAt(t), t, State(t));
 
-    /// <summary>The level in the tank at a time, m.</summary>
-    public double Level(double t) => model.Job.Vessel.Level(Volume(t));
-
     /// <summary>The run as its reader sees it.</summary>
     public Trace ToTrace() => new(Knots, At, Volume, Array.ConvertAll(Instants, instant => instant.Volume));
 

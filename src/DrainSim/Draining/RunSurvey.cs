@@ -79,27 +79,6 @@ internal sealed class RunSurvey
         return node;
     }
 
-    /// <summary>First time at which a quantity of the level and one line's flow falls to zero, s; null when it never does.</summary>
-    /// <param name="line">index of the line</param>
-    /// <param name="quantity">the quantity of the level, m, and the flow, m³/s</param>
-    public double? FirstFall(int line, Func<double, double, double> quantity)
-    {
-        Instant[] instants = history.Instants;
-        double last = 0;
-        for (int i = 0; i < instants.Length && model.EpochAt(instants[i].Time).Modes[line].IsAtWork; i++)
-        {
-            double value = quantity(instants[i].Level, FlowOf(instants[i], line));
-            if (value <= 0)
-                return i == 0 ? 0 : FallWithin(instants[i - 1].Time, instants[i].Time, last - value);
-            last = value;
-        }
-
-        return null;
-
-        double FallWithin(double from, double to, double scale) => Brent.TryFindRoot(
-            t => quantity(history.Level(t), history.Flows(t)[line]) / scale, from, to, 1e-12, 100, out double root) ? root : to;
-    }
-
     /// <summary>First time at which a quantity of the state falls to zero, s; null when it never does.</summary>
     /// <param name="line">index of a line; looked at while it works</param>
     /// <param name="quantity">the quantity of a state</param>

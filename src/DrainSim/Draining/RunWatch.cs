@@ -94,7 +94,7 @@ internal static class RunWatch
             CompiledLine line = model.Epochs[0].Plant.Lines[index];
             foreach (EventCode code in DrawnAir)
             {
-                if (survey.FirstFall(index, (level, flow) => level - line.Hydraulics.InletElevation - Depth(flow, code)) is not { } time)
+                if (survey.FirstFall(index, at => at.Level - line.Hydraulics.InletElevation - Depth(RunSurvey.FlowOf(at, index), code)) is not { } time)
                     continue;
                 (Instant instant, double depth) = survey.At(time, state => Depth(RunSurvey.FlowOf(state, index), code));
                 yield return new DrainEvent(time, code, instant.Level, instant.Volume, depth, index);
